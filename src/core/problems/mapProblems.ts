@@ -1,0 +1,2 @@
+/** Problems of map files. */
+export const mapProblems = {} as const;

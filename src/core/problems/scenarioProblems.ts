@@ -1,0 +1,2 @@
+/** Problems of scenario files. */
+export const scenarioProblems = {} as const;

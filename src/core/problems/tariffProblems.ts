@@ -1,0 +1,2 @@
+/** Problems of tariff files. */
+export const tariffProblems = {} as const;

@@ -1,0 +1,2 @@
+/** Problems of weather files. */
+export const weatherProblems = {} as const;
