@@ -1,0 +1,44 @@
+import type { YearColumns } from './columns.ts';
+import { AT } from './hourScratch.ts';
+import { runAt } from './spaceHeat.ts';
+import type { YearPlan } from './yearPlan.ts';
+
+/**
+ * Heat of the backup for the rooms: the top-up above the unit's highest flow, and what the heat pump could neither give
+ * nor leave waiting. What a boiler gives to hot water in the hour the rooms do not get.
+ *
+ * In the mode `cheapest` a boiler carries the hour where it is cheaper than the heat pump for what that could give.
+ * Reference: MODEL section 10; with a lumped house the backup is asked only for what exceeds full capacity.
+ */
+export function runBackup(plan: YearPlan, c: YearColumns, i: number, hour: Float64Array): void {
+  const { backup } = plan;
+  const available = backup.isBoiler ? Math.max(0, backup.power - c.backupWaterHeat[i]) : backup.power;
+  if (plan.sourcePrices !== null && boilerIsCheaper(plan, c, i)) {
+    carryByBoiler(plan, c, i, available, hour);
+    return;
+  }
+  const asked = hour[AT.topUp] + hour[AT.asked] - c.heatPumpSpaceHeat[i] - c.waitingHeat[i];
+  const given = Math.min(available, Math.max(0, asked));
+  c.backupSpaceHeat[i] = given;
+  c.unmetHeat[i] = Math.max(0, asked - given);
+}
+
+/** Ties go to the heat pump; where it can give nothing there is nothing to compare. */
+function boilerIsCheaper(plan: YearPlan, c: YearColumns, i: number): boolean {
+  const prices = plan.sourcePrices;
+  const heat = c.heatPumpSpaceHeat[i];
+  if (prices === null || heat <= 0) return false;
+  const byHeatPump = c.heatPumpSpaceElectricity[i] * prices.electricity[i];
+  return byHeatPump > (heat / plan.backup.efficiency) * prices.fuel;
+}
+
+/** The boiler carries top-up and demand as far as its power goes, the heat pump what is left; nothing waits. */
+function carryByBoiler(plan: YearPlan, c: YearColumns, i: number, available: number, hour: Float64Array): void {
+  const wanted = hour[AT.topUp] + hour[AT.asked];
+  const byBoiler = Math.min(available, wanted);
+  const left = Math.min(hour[AT.asked], wanted - byBoiler);
+  runAt(plan, c, i, Math.min(left, hour[AT.canGive]), hour);
+  c.waitingHeat[i] = 0;
+  c.backupSpaceHeat[i] = byBoiler;
+  c.unmetHeat[i] = Math.max(0, wanted - byBoiler - c.heatPumpSpaceHeat[i]);
+}

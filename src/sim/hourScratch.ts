@@ -1,0 +1,23 @@
+/**
+ * Places of the scratch column in which the stages of one hour hand figures on: a typed array, so that nothing is
+ * allocated in the loop.
+ */
+export const AT = {
+  /** Full capacity and COP after frost loss. */
+  capacity: 0,
+  cop: 1,
+  /** Capacity and COP of the lowest level after frost loss. */
+  lowestCapacity: 2,
+  lowestCop: 3,
+  /** Share of the design load that sets flow and return. */
+  load: 4,
+  /** Heat asked of the heat pump (L + D), and what it could give. */
+  asked: 5,
+  canGive: 6,
+  /** Heat above the unit's highest flow that only the backup can give. */
+  topUp: 7,
+  /** Electricity and starts of the last rate that was priced. */
+  electricity: 8,
+  starts: 9,
+  size: 10,
+} as const;

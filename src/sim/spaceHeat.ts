@@ -1,0 +1,120 @@
+import { MARK, type YearColumns } from './columns.ts';
+import { emitterFlow, emitterLoad, returnTemperature } from './flowTemperature.ts';
+import { readMap } from './heatPumpMap.ts';
+import { AT } from './hourScratch.ts';
+import { marksOfPoint } from './mapMarks.ts';
+import { priceRate } from './partLoad.ts';
+import type { YearPlan } from './yearPlan.ts';
+
+/** Heat may wait for at most so many hours of the design load (MODEL section 9). */
+const WAITING_HOURS = 2;
+
+/**
+ * Flow temperature of the hour.
+ *
+ * @param waiting heat left from the hour before, kWh
+ *
+ * Reference: MODEL section 5.
+ */
+export function setFlow(plan: YearPlan, c: YearColumns, i: number, waiting: number, hour: Float64Array): void {
+  const { flow, house } = plan;
+  const need = c.spaceHeatNeed[i];
+  if (flow.set !== null) {
+    hour[AT.load] = need / house.designLoad;
+    c.flowTemperature[i] = flow.set[i];
+    return;
+  }
+  const share = c.hotWaterShare[i];
+  const limited = plan.quietShare !== null && plan.quietShare[i] < 1;
+  const harder = share > 0 || (waiting > 0 && !limited);
+  hour[AT.load] = harder ? emitterLoad(need, waiting, share, house.designLoad) : need / house.designLoad;
+  c.flowTemperature[i] = emitterFlow(flow, hour[AT.load]);
+}
+
+/**
+ * Capacity and COP of both levels at the hour's outdoor and flow temperature, after frost loss; nothing where the unit
+ * rests.
+ *
+ * Reference: MODEL sections 6, 7 and 9.
+ */
+export function findCapacity(plan: YearPlan, c: YearColumns, i: number, hour: Float64Array): void {
+  const { unit, capacityLoss, copLoss, lossFollowsLevel, highestFlow } = plan.unitOnWeather;
+  if (plan.resting[i] === 1) {
+    hour[AT.capacity] = 0;
+    c.capacity[i] = 0;
+    return;
+  }
+  const outdoor = plan.weather.temperature[i];
+  const flow = Math.min(c.flowTemperature[i], highestFlow[i]);
+  const { lowest } = unit;
+  readMap(unit.full, outdoor, flow, hour, AT.capacity);
+  const frostFree = hour[AT.capacity];
+  if (lowest.given === 'table') {
+    readMap(lowest.map, outdoor, flow, hour, AT.lowestCapacity);
+  } else {
+    hour[AT.lowestCapacity] = lowest.capacity * frostFree;
+    hour[AT.lowestCop] = lowest.cop * hour[AT.cop];
+  }
+  // at a lower level the coil is less cold, so `humidity` takes less there
+  const level = lossFollowsLevel ? hour[AT.lowestCapacity] / frostFree : 1;
+  hour[AT.capacity] = frostFree * (1 - capacityLoss[i]);
+  hour[AT.cop] *= 1 - copLoss[i];
+  hour[AT.lowestCapacity] *= 1 - capacityLoss[i] * level;
+  hour[AT.lowestCop] *= 1 - copLoss[i] * level;
+  c.capacity[i] = hour[AT.capacity];
+}
+
+/**
+ * Space heat that the heat pump gives, after hot water has had its share of the hour; what it displaced waits.
+ *
+ * @param waiting heat left from the hour before, kWh; always 0 with a lumped house
+ *
+ * Leaves in the scratch what was asked, what could be given, and the top-up that is the backup's. Reference: MODEL section 9.
+ */
+export function giveSpaceHeat(plan: YearPlan, c: YearColumns, i: number, waiting: number, hour: Float64Array): void {
+  const need = c.spaceHeatNeed[i];
+  const flow = c.flowTemperature[i];
+  const highest = plan.unitOnWeather.highestFlow[i];
+  let carried = need;
+  if (flow > highest) {
+    const back = returnTemperature(plan.flow, flow, hour[AT.load]);
+    carried = need * Math.min(Math.max((highest - back) / (flow - back), 0), 1);
+    if (need > 0) c.marks[i] |= MARK.flowAboveLimit;
+  }
+  const free = 1 - c.hotWaterShare[i];
+  const full = hour[AT.capacity];
+  const canGive = (plan.quietShare === null ? full : full * plan.quietShare[i]) * free;
+  const asked = carried + waiting;
+  const given = Math.min(asked, canGive);
+  hour[AT.topUp] = need - carried;
+  hour[AT.asked] = asked;
+  hour[AT.canGive] = canGive;
+  c.waitingHeat[i] = leftWaiting(plan, c, i, asked - given, waiting + full - canGive);
+  runAt(plan, c, i, given, hour);
+}
+
+/** Heat that waits: with degree hours for the next hour, with mass it is what the room waits for in this one. */
+function leftWaiting(plan: YearPlan, c: YearColumns, i: number, lacking: number, displaced: number): number {
+  if (plan.house.mass !== null) return Math.min(lacking, displaced);
+  if (plan.resting[i] === 1 || i === c.hours - 1) return 0;
+  return Math.min(lacking, plan.house.designLoad * WAITING_HOURS, displaced);
+}
+
+/**
+ * Enters a rate of the heat pump into the columns: heat, electricity, starts and marks.
+ *
+ * @param given heat of the hour, kWh
+ */
+export function runAt(plan: YearPlan, c: YearColumns, i: number, given: number, hour: Float64Array): void {
+  c.heatPumpSpaceHeat[i] = given;
+  c.heatPumpSpaceElectricity[i] = 0;
+  c.starts[i] = 0;
+  if (given <= 0) return;
+  priceRate(plan, given, 1 - c.hotWaterShare[i], hour);
+  if (given / (1 - c.hotWaterShare[i]) < Math.min(hour[AT.lowestCapacity], hour[AT.capacity]))
+    c.marks[i] |= MARK.cycling;
+  c.heatPumpSpaceElectricity[i] = hour[AT.electricity];
+  c.starts[i] = hour[AT.starts];
+  const flow = Math.min(c.flowTemperature[i], plan.unitOnWeather.highestFlow[i]);
+  c.marks[i] |= marksOfPoint(plan.unitOnWeather.unit.full, plan.weather.temperature[i], flow);
+}

@@ -1,0 +1,168 @@
+import { compensatedSum } from '../core/sum.ts';
+import { MARK, type YearColumns } from './columns.ts';
+import type { YearPlan } from './yearPlan.ts';
+
+/** Sums of a year or of a month; kWh, hours, K·h. */
+export interface EnergyTotals {
+  /** Need of the rooms; with a lumped house that of the second pass with unlimited heat. */
+  readonly spaceHeatNeed: number;
+  readonly heatPumpSpaceHeat: number;
+  readonly heatPumpWaterHeat: number;
+  readonly backupSpaceHeat: number;
+  readonly backupWaterHeat: number;
+  /** Lumped house: need less what was delivered, negative in a month of recovery. */
+  readonly unmetHeat: number;
+  readonly hotWaterAsked: number;
+  readonly hotWaterShort: number;
+  readonly cylinderLoss: number;
+  readonly heatPumpSpaceElectricity: number;
+  readonly heatPumpWaterElectricity: number;
+  /** Electricity of an electric backup and of the heater in the cylinder; 0 with a boiler. */
+  readonly backupElectricity: number;
+  readonly circulationElectricity: number;
+  readonly standbyElectricity: number;
+  readonly crankcaseElectricity: number;
+  /** All electricity of the heating system: the uses above, summed. */
+  readonly electricity: number;
+  /** Fuel of a boiler backup. */
+  readonly fuel: number;
+}
+
+/** Hours of the year in which something held. */
+export interface HourCounts {
+  readonly backup: number;
+  readonly backupForSpace: number;
+  readonly backupForWater: number;
+  readonly outsideMap: number;
+  readonly belowLowestFlow: number;
+  readonly flowAboveLimit: number;
+  readonly cycling: number;
+  readonly hotWaterShort: number;
+  readonly heating: number;
+  readonly unmet: number;
+}
+
+export interface YearTotals {
+  readonly annual: EnergyTotals;
+  /** Twelve months of standard time. */
+  readonly monthly: readonly EnergyTotals[];
+  readonly hours: HourCounts;
+  /** Compressor starts, an estimate. */
+  readonly starts: number;
+  /** Lumped house: kelvin-hours below the set point in hours with need. */
+  readonly kelvinHoursBelow: number;
+}
+
+/** A tenth of a watt-hour: less than that is rounding, not a shortfall. */
+const ROUNDING = 1e-10;
+
+/**
+ * Months and year of a run; the year is the sum of its months.
+ *
+ * @param plan the plan that was run
+ * @param c its columns
+ */
+export function totalsOf(plan: YearPlan, c: YearColumns): YearTotals {
+  const monthly: EnergyTotals[] = [];
+  for (let month = 0; month < 12; month++) {
+    monthly.push(sumHours(plan, c, plan.weather.monthStart[month], plan.weather.monthStart[month + 1]));
+  }
+  return {
+    annual: sumMonths(monthly),
+    monthly,
+    hours: countHours(c),
+    starts: compensatedSum(c.starts),
+    kelvinHoursBelow: plan.house.mass === null ? 0 : kelvinHoursBelow(plan, c),
+  };
+}
+
+function sumHours(plan: YearPlan, c: YearColumns, from: number, to: number): EnergyTotals {
+  const sum = (column: Float64Array) => compensatedSum(column, from, to);
+  const lumped = plan.house.mass !== null;
+  const need = sum(lumped ? c.unlimitedNeed : c.spaceHeatNeed);
+  const heatPumpSpaceHeat = sum(c.heatPumpSpaceHeat);
+  const backupSpaceHeat = sum(c.backupSpaceHeat);
+  const backupWaterHeat = sum(c.backupWaterHeat);
+  const short = sum(c.hotWaterShort);
+  const uses = {
+    heatPumpSpaceElectricity: sum(c.heatPumpSpaceElectricity),
+    heatPumpWaterElectricity: sum(c.heatPumpWaterElectricity),
+    backupElectricity: plan.backup.isBoiler ? 0 : backupSpaceHeat + backupWaterHeat,
+    circulationElectricity: sum(c.circulationElectricity),
+    standbyElectricity: sum(c.standbyElectricity),
+    crankcaseElectricity: sum(c.crankcaseElectricity),
+  };
+  return {
+    spaceHeatNeed: need,
+    heatPumpSpaceHeat,
+    heatPumpWaterHeat: sum(c.heatPumpWaterHeat),
+    backupSpaceHeat,
+    backupWaterHeat,
+    unmetHeat: lumped ? need - heatPumpSpaceHeat - backupSpaceHeat : sum(c.unmetHeat),
+    hotWaterAsked: sum(c.hotWaterServed) + short,
+    hotWaterShort: short,
+    cylinderLoss: sum(c.cylinderLoss),
+    ...uses,
+    electricity: compensatedSum(Object.values(uses)),
+    fuel: sum(c.fuel),
+  };
+}
+
+function sumMonths(monthly: readonly EnergyTotals[]): EnergyTotals {
+  const total = (key: keyof EnergyTotals) => compensatedSum(monthly.map((month) => month[key]));
+  return {
+    spaceHeatNeed: total('spaceHeatNeed'),
+    heatPumpSpaceHeat: total('heatPumpSpaceHeat'),
+    heatPumpWaterHeat: total('heatPumpWaterHeat'),
+    backupSpaceHeat: total('backupSpaceHeat'),
+    backupWaterHeat: total('backupWaterHeat'),
+    unmetHeat: total('unmetHeat'),
+    hotWaterAsked: total('hotWaterAsked'),
+    hotWaterShort: total('hotWaterShort'),
+    cylinderLoss: total('cylinderLoss'),
+    heatPumpSpaceElectricity: total('heatPumpSpaceElectricity'),
+    heatPumpWaterElectricity: total('heatPumpWaterElectricity'),
+    backupElectricity: total('backupElectricity'),
+    circulationElectricity: total('circulationElectricity'),
+    standbyElectricity: total('standbyElectricity'),
+    crankcaseElectricity: total('crankcaseElectricity'),
+    electricity: total('electricity'),
+    fuel: total('fuel'),
+  };
+}
+
+function countHours(c: YearColumns): HourCounts {
+  return {
+    backup: countIf(c, (i) => c.backupSpaceHeat[i] > 0 || c.backupWaterHeat[i] > 0),
+    backupForSpace: countIf(c, (i) => c.backupSpaceHeat[i] > 0),
+    backupForWater: countIf(c, (i) => c.backupWaterHeat[i] > 0),
+    outsideMap: countMarked(c, MARK.outsideMap),
+    belowLowestFlow: countMarked(c, MARK.belowLowestFlow),
+    flowAboveLimit: countMarked(c, MARK.flowAboveLimit),
+    cycling: countMarked(c, MARK.cycling),
+    hotWaterShort: countIf(c, (i) => c.hotWaterShort[i] > ROUNDING),
+    heating: countIf(c, (i) => c.spaceHeatNeed[i] > 0),
+    unmet: countIf(c, (i) => c.unmetHeat[i] > ROUNDING),
+  };
+}
+
+function countMarked(c: YearColumns, mark: number): number {
+  let count = 0;
+  for (let i = 0; i < c.hours; i++) count += (c.marks[i] & mark) === 0 ? 0 : 1;
+  return count;
+}
+
+function countIf(c: YearColumns, holds: (i: number) => boolean): number {
+  let count = 0;
+  for (let i = 0; i < c.hours; i++) count += holds(i) ? 1 : 0;
+  return count;
+}
+
+function kelvinHoursBelow(plan: YearPlan, c: YearColumns): number {
+  const { setPoint } = plan.house;
+  let sum = 0;
+  for (let i = 0; i < c.hours; i++) {
+    if (c.spaceHeatNeed[i] > 0) sum += Math.max(0, setPoint[i] - c.indoorTemperature[i]);
+  }
+  return sum;
+}
