@@ -1,4 +1,4 @@
-import type { YearColumns } from './columns.ts';
+import { MARK, type YearColumns } from './columns.ts';
 import { AT } from './hourScratch.ts';
 import { runAt } from './spaceHeat.ts';
 import type { YearPlan } from './yearPlan.ts';
@@ -17,10 +17,20 @@ export function runBackup(plan: YearPlan, c: YearColumns, i: number, hour: Float
     carryByBoiler(plan, c, i, available, hour);
     return;
   }
-  const asked = hour[AT.topUp] + hour[AT.asked] - c.heatPumpSpaceHeat[i] - c.waitingHeat[i];
+  // in this order an hour that lacks nothing comes out at exactly zero
+  const asked = hour[AT.topUp] + (hour[AT.asked] - c.heatPumpSpaceHeat[i] - c.waitingHeat[i]);
   const given = Math.min(available, Math.max(0, asked));
+  enterBackup(c, i, given, asked - given);
+}
+
+/** Lacking heat below this is rounding, kWh. */
+const UNMET = 1e-10;
+
+function enterBackup(c: YearColumns, i: number, given: number, lacking: number): void {
   c.backupSpaceHeat[i] = given;
-  c.unmetHeat[i] = Math.max(0, asked - given);
+  c.unmetHeat[i] = Math.max(0, lacking);
+  if (given > 0) c.marks[i] |= MARK.backupForSpace;
+  if (lacking > UNMET) c.marks[i] |= MARK.unmet;
 }
 
 /** Ties go to the heat pump; where it can give nothing there is nothing to compare. */
@@ -39,6 +49,5 @@ function carryByBoiler(plan: YearPlan, c: YearColumns, i: number, available: num
   const left = Math.min(hour[AT.asked], wanted - byBoiler);
   runAt(plan, c, i, Math.min(left, hour[AT.canGive]), hour);
   c.waitingHeat[i] = 0;
-  c.backupSpaceHeat[i] = byBoiler;
-  c.unmetHeat[i] = Math.max(0, wanted - byBoiler - c.heatPumpSpaceHeat[i]);
+  enterBackup(c, i, byBoiler, wanted - byBoiler - c.heatPumpSpaceHeat[i]);
 }

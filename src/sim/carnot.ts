@@ -1,11 +1,15 @@
 import { KELVIN_AT_ZERO_CELSIUS } from '../core/constants.ts';
 
 /** Kelvins by which condensing lies above the flow, and evaporating below the outdoor air (MODEL section 6). */
-export const CONDENSER_APPROACH = 3;
-export const EVAPORATOR_APPROACH = 7;
+const CONDENSER_APPROACH = 3;
+const EVAPORATOR_APPROACH = 7;
 
 /** Least temperature lift that κ sees, K: keeps it bounded where air is nearly as warm as the flow (MODEL section 6). */
-const LEAST_LIFT = 15;
+export const LEAST_LIFT = 15;
+
+/** What is added to the flow for the absolute condensing temperature, and to flow less air for the lift, K. */
+export const CONDENSING_OFFSET = CONDENSER_APPROACH + KELVIN_AT_ZERO_CELSIUS;
+export const LIFT_OFFSET = CONDENSER_APPROACH + EVAPORATOR_APPROACH;
 
 /**
  * Carnot COP with approach temperatures, the yardstick κ of the map.
@@ -18,8 +22,7 @@ const LEAST_LIFT = 15;
  * Reference: Carnot's law; approach temperatures as fixed in MODEL section 6.
  */
 export function carnotCop(outdoor: number, flow: number): number {
-  const condensing = flow + CONDENSER_APPROACH + KELVIN_AT_ZERO_CELSIUS;
-  return condensing / Math.max(flow - outdoor + CONDENSER_APPROACH + EVAPORATOR_APPROACH, LEAST_LIFT);
+  return (flow + CONDENSING_OFFSET) / Math.max(flow - outdoor + LIFT_OFFSET, LEAST_LIFT);
 }
 
 /**

@@ -8,7 +8,19 @@ export const MARK = {
   flowAboveLimit: 4,
   /** The compressor cycled below its lowest level. */
   cycling: 8,
+  /** The backup gave space heat, or heat into the cylinder. */
+  backupForSpace: 16,
+  backupForWater: 32,
+  /** Hot water ran short. */
+  hotWaterShort: 64,
+  /** Heat asked of the backup could not be given. */
+  unmet: 128,
+  /** Space heat was needed. */
+  heating: 256,
 } as const;
+
+/** Marks an hour may bear: every combination of the bits. */
+export const MARK_COMBINATIONS = 512;
 
 /**
  * A year in columns of one entry an hour; kW ≡ kWh per step. Every column is finite; a column that a run does not use
@@ -53,7 +65,7 @@ export interface YearColumns {
   /** Need of the lumped house if heat were unlimited, kWh (second pass). */
   readonly unlimitedNeed: Float64Array;
   /** Bits of MARK. */
-  readonly marks: Uint8Array;
+  readonly marks: Uint16Array;
 }
 
 /**
@@ -89,6 +101,6 @@ export function newColumns(hours: number): YearColumns {
     fuel: column(),
     indoorTemperature: column(),
     unlimitedNeed: column(),
-    marks: new Uint8Array(hours),
+    marks: new Uint16Array(hours),
   };
 }

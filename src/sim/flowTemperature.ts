@@ -1,4 +1,5 @@
 import { type Polyline, polylineAt } from '../core/polyline.ts';
+import { type FixedPower, fixedPower, powerOf } from '../core/power.ts';
 import type { PreparedWeather } from '../weather/series.ts';
 
 /** Spread between flow and return where it does not follow from the emitters, K (MODEL section 5). */
@@ -13,8 +14,8 @@ export interface FlowSetting {
   readonly roomTemperature: number;
   /** Mean over-temperature of the emitters at design, (flow + return)/2 − room, K. */
   readonly overTemperature: number;
-  /** 1/n of the emitters' exponent. */
-  readonly inverseExponent: number;
+  /** The power 1/n of the emitters' exponent n. */
+  readonly inverseExponent: FixedPower;
   readonly spread: number;
   readonly lowest: number;
   readonly highest: number;
@@ -41,7 +42,7 @@ export function emitterSetting(emitters: Emitters): FlowSetting {
     set: null,
     roomTemperature: emitters.roomTemperature,
     overTemperature: (emitters.flow + emitters.return) / 2 - emitters.roomTemperature,
-    inverseExponent: 1 / emitters.exponent,
+    inverseExponent: fixedPower(1 / emitters.exponent),
     spread: emitters.flow - emitters.return,
     lowest: emitters.lowestFlow,
     highest: emitters.highestFlow,
@@ -60,7 +61,7 @@ export function curveSetting(curve: Polyline, weather: PreparedWeather): FlowSet
     set: weather.temperature.map((outdoor) => polylineAt(curve, outdoor)),
     roomTemperature: 0,
     overTemperature: 0,
-    inverseExponent: 1,
+    inverseExponent: fixedPower(1),
     spread: USUAL_SPREAD,
     lowest: 0,
     highest: 0,
@@ -79,7 +80,9 @@ export function curveSetting(curve: Polyline, weather: PreparedWeather): FlowSet
  */
 export function emitterFlow(setting: FlowSetting, load: number): number {
   const flow =
-    setting.roomTemperature + setting.overTemperature * load ** setting.inverseExponent + (load * setting.spread) / 2;
+    setting.roomTemperature +
+    setting.overTemperature * powerOf(setting.inverseExponent, load) +
+    (load * setting.spread) / 2;
   return Math.min(Math.max(flow, setting.lowest), setting.highest);
 }
 

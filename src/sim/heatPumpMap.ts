@@ -21,10 +21,10 @@ export interface HeatPumpMap {
 const LEAST_COLD_SLOPE = 0.01;
 const COLD_CAPACITY_FLOOR = 0.3;
 /** κ sees at most so many kelvins above the warmest row. */
-const WARMEST_BEYOND = 5;
+export const WARMEST_BEYOND = 5;
 /** COP gained per kelvin below the lowest flow column, over at most so many kelvins (common practice, no source). */
-const LOW_FLOW_GAIN = 0.02;
-const LOW_FLOW_REACH = 10;
+export const LOW_FLOW_GAIN = 0.02;
+export const LOW_FLOW_REACH = 10;
 
 /**
  * Fills the gaps of a table along the outdoor axis and turns COP into its share of κ.

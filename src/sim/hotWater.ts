@@ -1,12 +1,14 @@
 import { WATER_HEAT_CAPACITY } from '../core/constants.ts';
-import type { YearColumns } from './columns.ts';
-import { readMap } from './heatPumpMap.ts';
+import { MARK, type YearColumns } from './columns.ts';
 import type { HotWaterPlan } from './hotWaterPlan.ts';
 import { marksOfPoint } from './mapMarks.ts';
+import { readHour } from './mapOnWeather.ts';
 import type { YearPlan } from './yearPlan.ts';
 
 /** The condenser's flow lies so far above the cylinder's mean temperature, and the cylinder below the highest flow, K. */
 const FLOW_ABOVE_CYLINDER = 5;
+/** A shortfall below this is rounding, kWh. */
+const SHORTFALL = 1e-10;
 /** A temperature counts as reached within so many kelvins: rounding only. */
 const REACHED = 1e-9;
 
@@ -32,8 +34,8 @@ export function heatHotWater(plan: YearPlan, hotWater: HotWaterPlan, c: YearColu
   const point = new Float64Array(2);
   state[TEMPERATURE] = hotWater.setPoint;
   for (let i = from; i < to; i++) {
-    drawAndLose(hotWater, c, i, state);
     c.marks[i] = 0;
+    drawAndLose(hotWater, c, i, state);
     c.hotWaterShare[i] = 0;
     c.heatPumpWaterHeat[i] = 0;
     c.heatPumpWaterElectricity[i] = 0;
@@ -57,6 +59,7 @@ function drawAndLose(hotWater: HotWaterPlan, c: YearColumns, i: number, state: F
   const loss = hotWater.lossCoefficient * (first - hotWater.surroundingTemperature);
   c.hotWaterServed[i] = served;
   c.hotWaterShort[i] = asked - served;
+  if (asked - served > SHORTFALL) c.marks[i] |= MARK.hotWaterShort;
   c.cylinderLoss[i] = loss;
   state[TEMPERATURE] = first - (served + loss) / capacity;
 }
@@ -81,7 +84,7 @@ function reheat(
   if (plan.resting[i] === 0 && reach > first) {
     const flow = (first + reach) / 2 + FLOW_ABOVE_CYLINDER;
     const outdoor = plan.weather.temperature[i];
-    readMap(unitOnWeather.unit.full, outdoor, flow, point, 0);
+    readHour(unitOnWeather.full, i, outdoor, flow, point, 0);
     const kW = point[0] * (1 - unitOnWeather.capacityLoss[i]);
     const cop = point[1] * (1 - unitOnWeather.copLoss[i]) * (1 - plan.inUseAllowance);
     const wanted = capacity * (reach - first);
@@ -98,6 +101,7 @@ function reheat(
     const power = backup.isBoiler ? backup.power : hotWater.immersionPower;
     c.backupWaterHeat[i] = Math.min(lacking, power * (1 - share));
     given += c.backupWaterHeat[i];
+    if (c.backupWaterHeat[i] > 0) c.marks[i] |= MARK.backupForWater;
   }
   state[TEMPERATURE] = first + given / capacity;
   const reached = state[TEMPERATURE] >= target - REACHED;

@@ -1,7 +1,7 @@
 import { MARK, type YearColumns } from './columns.ts';
 import { emitterFlow, emitterLoad, returnTemperature } from './flowTemperature.ts';
-import { readMap } from './heatPumpMap.ts';
 import { AT } from './hourScratch.ts';
+import { readLevels } from './levels.ts';
 import { marksOfPoint } from './mapMarks.ts';
 import { priceRate } from './partLoad.ts';
 import type { YearPlan } from './yearPlan.ts';
@@ -19,6 +19,7 @@ const WAITING_HOURS = 2;
 export function setFlow(plan: YearPlan, c: YearColumns, i: number, waiting: number, hour: Float64Array): void {
   const { flow, house } = plan;
   const need = c.spaceHeatNeed[i];
+  if (need > 0) c.marks[i] |= MARK.heating;
   if (flow.set !== null) {
     hour[AT.load] = need / house.designLoad;
     c.flowTemperature[i] = flow.set[i];
@@ -38,29 +39,13 @@ export function setFlow(plan: YearPlan, c: YearColumns, i: number, waiting: numb
  * Reference: MODEL sections 6, 7 and 9.
  */
 export function findCapacity(plan: YearPlan, c: YearColumns, i: number, hour: Float64Array): void {
-  const { unit, capacityLoss, copLoss, lossFollowsLevel, highestFlow } = plan.unitOnWeather;
   if (plan.resting[i] === 1) {
     hour[AT.capacity] = 0;
     c.capacity[i] = 0;
     return;
   }
-  const outdoor = plan.weather.temperature[i];
-  const flow = Math.min(c.flowTemperature[i], highestFlow[i]);
-  const { lowest } = unit;
-  readMap(unit.full, outdoor, flow, hour, AT.capacity);
-  const frostFree = hour[AT.capacity];
-  if (lowest.given === 'table') {
-    readMap(lowest.map, outdoor, flow, hour, AT.lowestCapacity);
-  } else {
-    hour[AT.lowestCapacity] = lowest.capacity * frostFree;
-    hour[AT.lowestCop] = lowest.cop * hour[AT.cop];
-  }
-  // at a lower level the coil is less cold, so `humidity` takes less there
-  const level = lossFollowsLevel ? hour[AT.lowestCapacity] / frostFree : 1;
-  hour[AT.capacity] = frostFree * (1 - capacityLoss[i]);
-  hour[AT.cop] *= 1 - copLoss[i];
-  hour[AT.lowestCapacity] *= 1 - capacityLoss[i] * level;
-  hour[AT.lowestCop] *= 1 - copLoss[i] * level;
+  const flow = Math.min(c.flowTemperature[i], plan.unitOnWeather.highestFlow[i]);
+  readLevels(plan.unitOnWeather, i, plan.weather.temperature[i], flow, hour);
   c.capacity[i] = hour[AT.capacity];
 }
 

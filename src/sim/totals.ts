@@ -1,5 +1,6 @@
+import { columnSum } from '../core/columnSum.ts';
 import { compensatedSum } from '../core/sum.ts';
-import { MARK, type YearColumns } from './columns.ts';
+import { MARK, MARK_COMBINATIONS, type YearColumns } from './columns.ts';
 import type { YearPlan } from './yearPlan.ts';
 
 /** Sums of a year or of a month; kWh, hours, K·h. */
@@ -53,9 +54,6 @@ export interface YearTotals {
   readonly kelvinHoursBelow: number;
 }
 
-/** A tenth of a watt-hour: less than that is rounding, not a shortfall. */
-const ROUNDING = 1e-10;
-
 /**
  * Months and year of a run; the year is the sum of its months.
  *
@@ -71,13 +69,13 @@ export function totalsOf(plan: YearPlan, c: YearColumns): YearTotals {
     annual: sumMonths(monthly),
     monthly,
     hours: countHours(c),
-    starts: compensatedSum(c.starts),
+    starts: columnSum(c.starts, 0, c.hours),
     kelvinHoursBelow: plan.house.mass === null ? 0 : kelvinHoursBelow(plan, c),
   };
 }
 
 function sumHours(plan: YearPlan, c: YearColumns, from: number, to: number): EnergyTotals {
-  const sum = (column: Float64Array) => compensatedSum(column, from, to);
+  const sum = (column: Float64Array) => columnSum(column, from, to);
   const lumped = plan.house.mass !== null;
   const need = sum(lumped ? c.unlimitedNeed : c.spaceHeatNeed);
   const heatPumpSpaceHeat = sum(c.heatPumpSpaceHeat);
@@ -131,31 +129,23 @@ function sumMonths(monthly: readonly EnergyTotals[]): EnergyTotals {
   };
 }
 
+/** Hours by mark, from how often each combination of marks stands in the year. */
 function countHours(c: YearColumns): HourCounts {
+  const frequency = new Int32Array(MARK_COMBINATIONS);
+  for (let i = 0; i < c.hours; i++) frequency[c.marks[i]]++;
+  const count = (bits: number) => frequency.reduce((sum, hours, marks) => sum + ((marks & bits) === 0 ? 0 : hours), 0);
   return {
-    backup: countIf(c, (i) => c.backupSpaceHeat[i] > 0 || c.backupWaterHeat[i] > 0),
-    backupForSpace: countIf(c, (i) => c.backupSpaceHeat[i] > 0),
-    backupForWater: countIf(c, (i) => c.backupWaterHeat[i] > 0),
-    outsideMap: countMarked(c, MARK.outsideMap),
-    belowLowestFlow: countMarked(c, MARK.belowLowestFlow),
-    flowAboveLimit: countMarked(c, MARK.flowAboveLimit),
-    cycling: countMarked(c, MARK.cycling),
-    hotWaterShort: countIf(c, (i) => c.hotWaterShort[i] > ROUNDING),
-    heating: countIf(c, (i) => c.spaceHeatNeed[i] > 0),
-    unmet: countIf(c, (i) => c.unmetHeat[i] > ROUNDING),
+    backup: count(MARK.backupForSpace | MARK.backupForWater),
+    backupForSpace: count(MARK.backupForSpace),
+    backupForWater: count(MARK.backupForWater),
+    outsideMap: count(MARK.outsideMap),
+    belowLowestFlow: count(MARK.belowLowestFlow),
+    flowAboveLimit: count(MARK.flowAboveLimit),
+    cycling: count(MARK.cycling),
+    hotWaterShort: count(MARK.hotWaterShort),
+    heating: count(MARK.heating),
+    unmet: count(MARK.unmet),
   };
-}
-
-function countMarked(c: YearColumns, mark: number): number {
-  let count = 0;
-  for (let i = 0; i < c.hours; i++) count += (c.marks[i] & mark) === 0 ? 0 : 1;
-  return count;
-}
-
-function countIf(c: YearColumns, holds: (i: number) => boolean): number {
-  let count = 0;
-  for (let i = 0; i < c.hours; i++) count += holds(i) ? 1 : 0;
-  return count;
 }
 
 function kelvinHoursBelow(plan: YearPlan, c: YearColumns): number {

@@ -1,10 +1,14 @@
 import { polylineAt } from '../core/polyline.ts';
 import type { PreparedWeather } from '../weather/series.ts';
+import { layMapOnWeather, type MapOnWeather } from './mapOnWeather.ts';
 import type { Defrost, HeatPumpUnit } from './unit.ts';
 
 /** What follows from a unit and a weather series alone, by hour: made once for both, used by every run of them. */
 export interface UnitOnWeather {
   readonly unit: HeatPumpUnit;
+  readonly full: MapOnWeather;
+  /** The lowest level where it has a table of its own. */
+  readonly lowest: MapOnWeather | null;
   /** Share of capacity and of COP lost to frost at full load. */
   readonly capacityLoss: Float64Array;
   readonly copLoss: Float64Array;
@@ -37,6 +41,8 @@ export function layUnitOnWeather(unit: HeatPumpUnit, weather: PreparedWeather): 
   }
   return {
     unit,
+    full: layMapOnWeather(unit.full, weather),
+    lowest: unit.lowest.given === 'table' ? layMapOnWeather(unit.lowest.map, weather) : null,
     ...frostLosses(unit.defrost, weather),
     lossFollowsLevel: unit.defrost.method === 'humidity',
     highestFlow,

@@ -15,4 +15,16 @@ export const fileProblems = {
     says: 'the file cannot be written: {found}',
     cure: 'choose a folder that exists and may be written',
   },
+  'file.output-is-folder': {
+    says: 'a result cannot be written here: this is a folder',
+    cure: 'name a file in it, such as {path}',
+  },
+  'file.output-is-input': {
+    says: 'the result would be written over this file, which is read as an input',
+    cure: 'choose another name for the result',
+  },
+  'file.output-twice': {
+    says: 'two results would be written to this same file',
+    cure: 'give each result a name of its own',
+  },
 } as const;

@@ -1,0 +1,34 @@
+/** Text and the encoding in which it was written, in words. */
+export interface DecodedText {
+  readonly text: string;
+  readonly encoding: string;
+}
+
+const marks = [
+  { bytes: [0xef, 0xbb, 0xbf], label: 'utf-8', encoding: 'UTF-8 with byte-order mark' },
+  { bytes: [0xff, 0xfe], label: 'utf-16le', encoding: 'UTF-16 (little-endian)' },
+  { bytes: [0xfe, 0xff], label: 'utf-16be', encoding: 'UTF-16 (big-endian)' },
+] as const;
+
+/**
+ * Bytes of a text file as text: by its byte-order mark, else as UTF-8 where that is valid, else as Latin-1.
+ *
+ * @param bytes the whole file; anything at all. Where a mark promises an encoding that the bytes break, the broken
+ *   places come out as U+FFFD.
+ * @returns the text without its mark, and the encoding in words
+ * @example decodeText(Uint8Array.of(0xb0, 0x43)) // { text: '°C', encoding: 'Latin-1 (Windows-1252)' }
+ *
+ * Reference: WHATWG Encoding Standard, which reads Latin-1 as windows-1252.
+ */
+export function decodeText(bytes: Uint8Array): DecodedText {
+  for (const { bytes: mark, label, encoding } of marks) {
+    if (mark.every((byte, i) => bytes[i] === byte)) {
+      return { text: new TextDecoder(label).decode(bytes), encoding };
+    }
+  }
+  try {
+    return { text: new TextDecoder('utf-8', { fatal: true }).decode(bytes), encoding: 'UTF-8' };
+  } catch {
+    return { text: new TextDecoder('windows-1252').decode(bytes), encoding: 'Latin-1 (Windows-1252)' };
+  }
+}
