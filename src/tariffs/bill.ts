@@ -1,0 +1,198 @@
+import { compensatedSum } from '../core/sum.ts';
+import { blocksOfMonths } from './blockPrices.ts';
+import type { CivilClock } from './civilClock.ts';
+import type { PreparedPart, PreparedTariff } from './preparedTariff.ts';
+
+/** What a year or a month of electricity costs; money in the tariff's currency. */
+export interface BillSums {
+  readonly kWh: number;
+  /** Rates, series and blocks. */
+  readonly energy: number;
+  readonly standing: number;
+  readonly demand: number;
+  /** Taxes that come on top. */
+  readonly taxes: number;
+  /** Taxes that are inside the prices as stated: a part of energy, standing and demand, shown for information. */
+  readonly taxesInside: number;
+  /** Fixed credits, positive. */
+  readonly credits: number;
+  /** energy + standing + demand + taxes − credits; negative where credits or negative prices exceed the rest. */
+  readonly total: number;
+}
+
+export interface RateSums {
+  readonly kWh: number;
+  /** Hours of the year in which the rate holds. */
+  readonly hours: number;
+  /** Energy cost, before taxes that come on top. */
+  readonly cost: number;
+}
+
+/** A year's bill. Costs by rate add up to the energy cost, months to the year, taxes by name to all taxes. */
+export interface Bill extends BillSums {
+  readonly byRate: Readonly<Record<string, RateSums>>;
+  /** Taxes by name, on top or inside. */
+  readonly byTax: Readonly<Record<string, number>>;
+  /** Twelve civil months, January first. */
+  readonly monthly: readonly BillSums[];
+}
+
+/** Where the twelve months of each column begin in a ledger; kWh come first. */
+const ENERGY = 12;
+const STANDING = 24;
+const DEMAND = 36;
+const TAXES = 48;
+const TAXES_INSIDE = 60;
+const CREDITS = 72;
+const LEDGER_LENGTH = 84;
+
+/**
+ * Sums that the parts of a year add to. One array for all months, since a bill is made thousands of times and small
+ * arrays cost more than their sums.
+ */
+interface Ledger {
+  /** Twelve months of each column, one column after the other: kWh, then as the constants say. */
+  readonly months: Float64Array;
+  readonly rateKWh: number[];
+  readonly rateCost: number[];
+  readonly byTax: Map<string, number>;
+}
+
+/**
+ * The bill for a year of electricity (MODEL section 12).
+ *
+ * @param prepared the tariff laid on the year
+ * @param electricity all electricity on the bill, kWh a step; exactly as many values as the clock has hours, all finite
+ * @returns money in the tariff's currency, and kWh
+ * @example bill(prepared, electricity).total // 8760 kWh at a flat 0.30: 2628
+ */
+export function bill(prepared: PreparedTariff, electricity: Float64Array): Bill {
+  const ledger: Ledger = {
+    months: new Float64Array(LEDGER_LENGTH),
+    rateKWh: prepared.rateNames.map(() => 0),
+    rateCost: prepared.rateNames.map(() => 0),
+    byTax: new Map(),
+  };
+  for (const part of prepared.parts) chargePart(part, prepared, electricity, ledger);
+  const { months } = ledger;
+  const monthly: BillSums[] = [];
+  for (let m = 0; m < 12; m++) monthly.push(sumsOf((column) => months[column + m]));
+  const byRate = prepared.rateNames.map((name, r): [string, RateSums] => [
+    name,
+    { kWh: ledger.rateKWh[r], hours: prepared.hoursOfRate[r], cost: ledger.rateCost[r] },
+  ]);
+  return {
+    ...sumsOf((column) => compensatedSum(months, column, column + 12)),
+    byRate: Object.fromEntries(byRate),
+    byTax: Object.fromEntries(ledger.byTax),
+    monthly,
+  };
+}
+
+function sumsOf(at: (column: number) => number): BillSums {
+  const energy = at(ENERGY);
+  const standing = at(STANDING);
+  const demand = at(DEMAND);
+  const taxes = at(TAXES);
+  const credits = at(CREDITS);
+  const total = energy + standing + demand + taxes - credits;
+  return { kWh: at(0), energy, standing, demand, taxes, taxesInside: at(TAXES_INSIDE), credits, total };
+}
+
+/** Adds one supplier's days to the ledger. */
+function chargePart(part: PreparedPart, prepared: PreparedTariff, electricity: Float64Array, ledger: Ledger): void {
+  const cells = energyCells(part, prepared.price, electricity);
+  const { kWh, cost } = cells;
+  const { months } = ledger;
+  if (part.blocks) addBlocks(part, prepared.clock, cells);
+  part.rateOfRule.forEach((rate, rule) => {
+    ledger.rateKWh[rate] += compensatedSum(kWh, 12 * rule, 12 * rule + 12);
+    ledger.rateCost[rate] += compensatedSum(cost, 12 * rule, 12 * rule + 12);
+  });
+  const peaks = part.demandPrice === 0 ? undefined : highestOfMonths(part, prepared.clock, electricity);
+  let taxed = 0;
+  for (let m = 0; m < 12; m++) {
+    const energy = sumOfMonth(cost, m);
+    const demand = peaks ? part.demandPrice * peaks[m] * part.shareOfMonth[m] : 0;
+    const charged = energy + part.standing[m] + demand;
+    const base = part.taxInside ? charged / (1 + part.taxShare) : charged;
+    const tax = base * part.taxShare;
+    taxed += base;
+    months[m] += sumOfMonth(kWh, m);
+    months[ENERGY + m] += energy;
+    months[STANDING + m] += part.standing[m];
+    months[DEMAND + m] += demand;
+    months[(part.taxInside ? TAXES_INSIDE : TAXES) + m] += tax;
+    months[CREDITS + m] += part.credits[m];
+  }
+  for (const { name, share } of part.taxes) ledger.byTax.set(name, (ledger.byTax.get(name) ?? 0) + taxed * share);
+}
+
+interface EnergyCells {
+  /** By cell rule · 12 + month. */
+  readonly kWh: Float64Array;
+  readonly cost: Float64Array;
+}
+
+/** The part's kWh and energy cost by rule and month, blocks apart. */
+function energyCells(part: PreparedPart, price: Float64Array, electricity: Float64Array): EnergyCells {
+  const { runs, mixed, rulePrice, hasSeries } = part;
+  const kWh = new Float64Array(12 * rulePrice.length);
+  const cost = new Float64Array(12 * rulePrice.length);
+  for (let r = 0; r < runs.cell.length; r++) {
+    const to = runs.to[r];
+    let used = 0;
+    let paid = 0;
+    if (hasSeries) {
+      for (let i = runs.from[r]; i < to; i++) {
+        used += electricity[i];
+        paid += electricity[i] * price[i];
+      }
+    } else for (let i = runs.from[r]; i < to; i++) used += electricity[i];
+    kWh[runs.cell[r]] += used;
+    cost[runs.cell[r]] += paid;
+  }
+  for (let k = 0; k < mixed.cell.length; k++) {
+    kWh[mixed.cell[k]] += electricity[mixed.step[k]] * mixed.share[k];
+    if (hasSeries) cost[mixed.cell[k]] += electricity[mixed.step[k]] * mixed.cost[k];
+  }
+  if (!hasSeries) for (let cell = 0; cell < cost.length; cell++) cost[cell] = kWh[cell] * rulePrice[(cell / 12) | 0];
+  return { kWh, cost };
+}
+
+/** Sum over the rules of one month's cells. */
+function sumOfMonth(cells: Float64Array, month: number): number {
+  let sum = 0;
+  for (let cell = month; cell < cells.length; cell += 12) sum += cells[cell];
+  return sum;
+}
+
+/** Adds the blocks' cost of each month to the rules' cells, by kWh. */
+function addBlocks({ blocks, shareOfMonth }: PreparedPart, clock: CivilClock, { kWh, cost }: EnergyCells): void {
+  if (!blocks) return;
+  const kWhOfMonth = Float64Array.from({ length: 12 }, (_, m) => sumOfMonth(kWh, m));
+  const ofMonths = blocksOfMonths(blocks, kWhOfMonth, shareOfMonth, clock.daysOfMonth);
+  for (let cell = 0; cell < kWh.length; cell++) {
+    const all = kWhOfMonth[cell % 12];
+    if (all > 0) cost[cell] += (ofMonths[cell % 12] * kWh[cell]) / all;
+  }
+}
+
+/** Highest hourly kW of each civil month among the steps that begin on the part's days. */
+function highestOfMonths({ days }: PreparedPart, clock: CivilClock, electricity: Float64Array): Float64Array {
+  const highest = new Float64Array(12);
+  const { month, civilDay } = clock;
+  const { from, until } = days;
+  let at = month[0];
+  let most = 0;
+  for (let i = 0; i < electricity.length; i++) {
+    if (month[i] !== at) {
+      highest[at - 1] = Math.max(highest[at - 1], most);
+      at = month[i];
+      most = 0;
+    }
+    if (electricity[i] > most && civilDay[i] >= from && civilDay[i] < until) most = electricity[i];
+  }
+  highest[at - 1] = Math.max(highest[at - 1], most);
+  return highest;
+}
