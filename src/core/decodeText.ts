@@ -10,6 +10,9 @@ const marks = [
   { bytes: [0xfe, 0xff], label: 'utf-16be', encoding: 'UTF-16 (big-endian)' },
 ] as const;
 
+/** What windows-1252 puts in place of the control characters 0x80 … 0x9f; five of them stay what they are. */
+const WINDOWS_SIGNS = '€\u0081‚ƒ„…†‡ˆ‰Š‹Œ\u008dŽ\u008f\u0090‘’“”•–—˜™š›œ\u009džŸ';
+
 /**
  * Bytes of a text file as text: by its byte-order mark, else as UTF-8 where that is valid, else as Latin-1.
  *
@@ -29,6 +32,12 @@ export function decodeText(bytes: Uint8Array): DecodedText {
   try {
     return { text: new TextDecoder('utf-8', { fatal: true }).decode(bytes), encoding: 'UTF-8' };
   } catch {
-    return { text: new TextDecoder('windows-1252').decode(bytes), encoding: 'Latin-1 (Windows-1252)' };
+    return { text: decodeLatin1(bytes), encoding: 'Latin-1 (Windows-1252)' };
   }
+}
+
+/** Some releases of Node leave the control characters where windows-1252 has signs; browsers do not. */
+function decodeLatin1(bytes: Uint8Array): string {
+  const text = new TextDecoder('windows-1252').decode(bytes);
+  return text.replace(/[\u0080-\u009f]/g, (control) => WINDOWS_SIGNS.charAt(control.charCodeAt(0) - 0x80));
 }

@@ -1,5 +1,7 @@
 import { fileProblems } from './fileProblems.ts';
+import { labelProblems } from './labelProblems.ts';
 import { mapProblems } from './mapProblems.ts';
+import { readingProblems } from './readingProblems.ts';
 import { scenarioProblems } from './scenarioProblems.ts';
 import { tariffProblems } from './tariffProblems.ts';
 import { weatherProblems } from './weatherProblems.ts';
@@ -20,6 +22,8 @@ export const problemCatalogue = {
   ...tariffProblems,
   ...scenarioProblems,
   ...mapProblems,
+  ...readingProblems,
+  ...labelProblems,
 } as const satisfies Record<string, ProblemKind>;
 
 export type ProblemCode = keyof typeof problemCatalogue;

@@ -35,7 +35,7 @@ export const scenarioProblems = {
   'scenario.contradiction': { says: '{path} is {found}; {allowed}', cure: 'correct one of the two' },
   'scenario.points-not-rising': {
     says: '{path} is at {found}, not above the point before it at {allowed}',
-    cure: 'write the points from the coldest outdoor temperature to the warmest, each temperature once',
+    cure: 'write the points from the lowest temperature to the highest, each temperature once',
   },
   'scenario.no-heat-loss': {
     says: '{path} comes to {found}; a house loses heat',

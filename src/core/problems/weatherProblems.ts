@@ -45,7 +45,7 @@ export const weatherProblems = {
     cure: "name another column under 'columns', or set 'decimal' if the decimal mark was mistaken",
   },
   'weather.column-implausible': {
-    says: 'most values cannot be a {path}: {found}; possible is {allowed}',
+    says: 'most values of the {path} are impossible, such as {found}; possible is {allowed}',
     cure: "name another column under 'columns', or the unit under 'units'",
   },
   'weather.unit-guessed': {
@@ -79,6 +79,10 @@ export const weatherProblems = {
   'weather.stamp-format': {
     says: '{path} is {found}; no stamp of the file has this form, the first is {allowed}',
     cure: 'use luxon tokens: yyyy year, MM month, dd day, HH hour, mm minute, ZZ offset; text in single quotes',
+  },
+  'weather.unread-stamps': {
+    says: '{path} seems to hold the stamps, but {found} is of no form that is recognised',
+    cure: "state the form by 'stampFormat', such as 'dd-MMM-yyyy HH:mm'",
   },
   'weather.some-offsets': {
     says: 'some stamps carry an offset from UTC, others such as {found} do not',

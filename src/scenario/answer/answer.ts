@@ -1,0 +1,68 @@
+import type { BoilerYear } from '../../compare/boiler.ts';
+import type { YearColumns } from '../../sim/columns.ts';
+import type { SeasonalFactors } from '../../sim/seasonalFactors.ts';
+import type { YearTotals } from '../../sim/totals.ts';
+import type { YearPlan } from '../../sim/yearPlan.ts';
+import type { Bill } from '../../tariffs/bill.ts';
+import type { LoadedScenario } from '../loadScenario.ts';
+
+/** One tariff: the whole bill, and the heating's part of it beside the boiler's on the same tariff. */
+export interface TariffCost {
+  readonly tariff: string;
+  readonly file: string;
+  readonly currency: string;
+  readonly pricesStated: 'withTax' | 'withoutTax';
+  /** The whole bill: heating and household. */
+  readonly bill: Bill;
+  /** The bill of the household alone: standing charges only, where no household is entered. */
+  readonly householdBill: Bill;
+  /** Running cost of the heating: bill less the household's, and a hybrid boiler's fuel. */
+  readonly heatingCost: number;
+  /** Running cost of the boiler on this tariff: fuel, standing charge, taxes, service, its pump; absent without a boiler. */
+  readonly boilerCost?: number;
+  /** Boiler less heating; absent without a boiler. */
+  readonly saving?: number;
+}
+
+/** Carbon of a year, kg; or why it is not known. */
+export type Carbon = number | 'no factor' | 'no boiler';
+
+/** A kind of thing that an assessor should look at before signing. */
+export interface Warning {
+  readonly code: string;
+  /** What was seen, with its figure and unit. */
+  readonly text: string;
+  /** What usually helps. */
+  readonly remedy: string;
+}
+
+/** Something the result rests on. */
+export interface Assumption {
+  /** Place in the scenario or unit file, or the name of a rule of the model. */
+  readonly path: string;
+  readonly text: string;
+}
+
+/** Everything that was found for one scenario, before it is printed or written. */
+export interface Answer {
+  readonly loaded: LoadedScenario;
+  readonly plan: YearPlan;
+  readonly columns: YearColumns;
+  readonly totals: YearTotals;
+  readonly factors: SeasonalFactors;
+  /** Heat loss, W/K. */
+  readonly heatLoss: number;
+  readonly designLoad: number;
+  /** Heating degree hours to the set point's base, K·d, and that base. */
+  readonly degreeDays: { readonly base: number; readonly annual: number; readonly monthly: readonly number[] };
+  readonly costs: readonly TariffCost[];
+  /** Cost of a hybrid boiler's fuel; 0 without one. */
+  readonly fuelCost: number;
+  readonly boiler?: BoilerYear;
+  readonly carbon?: { readonly heatPump: Carbon; readonly boiler: Carbon };
+  readonly warnings: readonly Warning[];
+  readonly assumptions: readonly Assumption[];
+}
+
+/** An answer before its warnings and assumptions. */
+export type BareAnswer = Omit<Answer, 'warnings' | 'assumptions'>;
