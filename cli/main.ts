@@ -1,1 +1,15 @@
-process.stdout.write('winterledger\n');
+import { version } from '../package.json';
+import type { Io } from './io.ts';
+import { lastResort } from './lastResort.ts';
+import { mayColour } from './mayColour.ts';
+import { runProgram } from './program.ts';
+import { textSink } from './textSink.ts';
+
+const io: Io = {
+  stdout: textSink(process.stdout, 'standard output'),
+  stderr: textSink(process.stderr, 'standard error'),
+  colour: mayColour(process.stderr, process.env),
+  version,
+};
+
+process.exitCode = await runProgram(process.argv.slice(2), io).catch((fault: unknown) => lastResort(fault, io));

@@ -1,0 +1,45 @@
+import { hasErrors, visibleText } from '../../src/core/problem.ts';
+import { type CheckedFile, checkFile } from '../../src/scenario/checkFile.ts';
+import { DiskSource } from '../diskSource.ts';
+import { type CommandInput, EXIT, type Io } from '../io.ts';
+import { tellProblems } from '../tellProblems.ts';
+
+const kindWords = {
+  scenario: 'a scenario',
+  unit: 'a heat-pump unit',
+  tariff: 'a tariff',
+  read: 'read settings',
+  weather: 'weather',
+  priceSeries: 'a price series',
+} as const;
+
+/** Looks through input files: says what each was taken for, and lists all that is wrong with any of them. */
+export async function run({ files }: CommandInput, io: Io): Promise<number> {
+  const source = new DiskSource();
+  let sound = true;
+  for (const file of files) {
+    const checked = checkFile(file, source);
+    sound &&= !hasErrors(checked.problems);
+    await io.stdout.write(statement(file, checked));
+    await tellProblems(checked.problems, io);
+  }
+  return sound ? EXIT.done : EXIT.wrongInput;
+}
+
+/** `house.yaml  taken for a scenario: in order`, and below it what was recognised. */
+function statement(file: string, { kind, about, problems }: CheckedFile): string {
+  const taken = kind === undefined ? 'not recognised' : `taken for ${kindWords[kind]}`;
+  const lines = about.map((line) => `    ${visibleText(line)}\n`);
+  return `${visibleText(file)}  ${taken}: ${verdict(problems)}\n${lines.join('')}`;
+}
+
+function verdict(problems: CheckedFile['problems']): string {
+  const errors = problems.filter(({ severity }) => severity === 'error').length;
+  const warnings = problems.length - errors;
+  if (problems.length === 0) return 'in order';
+  return [counted(errors, 'fault'), counted(warnings, 'warning')].filter((part) => part !== '').join(', ');
+}
+
+function counted(count: number, what: string): string {
+  return count === 0 ? '' : `${count} ${what}${count === 1 ? '' : 's'}`;
+}

@@ -1,0 +1,74 @@
+import { visibleText } from '../core/problem.ts';
+import { factor, figure } from './figures.ts';
+import { type Column, table } from './layout.ts';
+import type { ResultDocument } from './resultSchema.ts';
+import type { Words } from './words.ts';
+
+type Cost = ResultDocument['costs'][0];
+
+/** The tariffs side by side: what the bill is made of, the heating's part of it, the boiler and what is saved. */
+export function tariffTable(costs: readonly Cost[], words: Words): string {
+  const { columns } = words;
+  const sameCurrency = new Set(costs.map(({ currency }) => currency)).size === 1;
+  const named = (heading: string, of: (cost: Cost) => number | undefined): Column => ({
+    heading,
+    figures: true,
+    cells: costs.map((cost) => cellOf(of(cost), sameCurrency ? '' : ` ${cost.currency}`)),
+  });
+  const taxed = costs.some(({ taxes }) => taxes !== 0);
+  const shown = [
+    named(columns.energy, ({ energy }) => energy),
+    named(columns.standing, ({ standing }) => standing),
+    ...whereAny(
+      named(columns.demand, ({ demand }) => demand),
+      costs.some(({ demand }) => demand !== 0),
+    ),
+    ...whereAny(
+      named(columns.taxes, ({ taxes }) => taxes),
+      taxed,
+    ),
+    ...whereAny(
+      named(columns.credits, ({ credits }) => -credits),
+      costs.some(({ credits }) => credits !== 0),
+    ),
+    named(columns.bill, ({ total }) => total),
+    named(columns.heating, ({ systemTotal }) => systemTotal),
+    ...whereAny(
+      named(columns.boiler, ({ boilerTotal }) => boilerTotal),
+      costs[0].boilerTotal !== undefined,
+    ),
+    ...whereAny(
+      named(columns.saving, ({ saving }) => saving),
+      costs[0].saving !== undefined,
+    ),
+  ];
+  const names = { heading: columns.tariff, figures: false, cells: costs.map(({ tariff }) => visibleText(tariff)) };
+  return table([names, ...shown]);
+}
+
+function whereAny(column: Column, shown: boolean): Column[] {
+  return shown ? [column] : [];
+}
+
+function cellOf(value: number | undefined, currency: string): string {
+  return value === undefined ? '–' : `${figure(value, 0)}${currency}`;
+}
+
+/** The months and the year: need, heat by source, electricity, seasonal factor. */
+export function monthTable({ monthly, annual }: ResultDocument, words: Words): string {
+  const { columns } = words;
+  const rows = [...monthly, annual];
+  const column = (heading: string, of: (row: (typeof rows)[0]) => string): Column => ({
+    heading,
+    figures: true,
+    cells: rows.map(of),
+  });
+  return table([
+    { heading: columns.month, figures: false, cells: [...words.months, words.year] },
+    column(columns.need, (row) => figure(row.spaceHeatNeed, 0)),
+    column(columns.heatPumpHeat, (row) => figure(row.heatPumpHeat, 0)),
+    column(columns.backupHeat, (row) => figure(row.backupHeat, 0)),
+    column(columns.electricity, (row) => figure(row.electricity.total, 0)),
+    column(columns.factor, (row) => factor(row.seasonalFactor.h4)),
+  ]);
+}

@@ -1,0 +1,111 @@
+/** Figures of a sentence, already written with their units. */
+type Said = Readonly<Record<string, string>>;
+
+/**
+ * Every word that a report is made of, in English. Another language is one more object of the same type.
+ */
+export const english = {
+  of: 'Unit',
+  months: ['January', 'February', 'March', 'April', 'May', 'June', 'July', 'August', 'September', 'October'].concat(
+    'November',
+    'December',
+  ),
+  year: 'Year',
+  headings: {
+    costs: 'Cost of a year on each tariff',
+    months: 'Month by month, kWh',
+    warnings: 'Look at this before you sign',
+    assumptions: 'Assumed, because no file says otherwise',
+    weather: 'How the weather file was understood',
+    inputs: 'Files this rests on (beginning of their SHA-256)',
+  },
+  columns: {
+    tariff: 'Tariff',
+    energy: 'Energy',
+    standing: 'Standing',
+    demand: 'Demand',
+    taxes: 'Taxes',
+    credits: 'Credits',
+    bill: 'Bill',
+    heating: 'Heating',
+    boiler: 'Boiler',
+    saving: 'Saved',
+    month: 'Month',
+    need: 'Need',
+    heatPumpHeat: 'Heat pump heat',
+    backupHeat: 'Backup heat',
+    electricity: 'Electricity',
+    factor: 'H4',
+  },
+  costsNote:
+    'Heating is the bill less what the household would pay on this tariff without it, with the fuel of a hybrid.',
+
+  use: ({ electricity, heat, factor }: Said) =>
+    `In a year the heat pump and its backup would use ${electricity} for ${heat} of heat: a seasonal factor H4 of ${factor}, so each kWh bought gives ${factor} kWh of heat.`,
+  useWithFuel: ({ electricity, fuel, heat, factor }: Said) =>
+    `In a year the heat pump and its boiler would use ${electricity} of electricity and ${fuel} of fuel for ${heat} of heat: a seasonal factor H4 of ${factor}, so each kWh bought, fuel included, gives ${factor} kWh of heat.`,
+  electricityOf: (amount: string) => `${amount} of electricity`,
+  noHeat: (electricity: string) =>
+    `No heat would be given in the year; the system would use ${electricity} of electricity standing by.`,
+
+  backup: ({ hours, heat }: Said) => `The backup would run in ${hours} hours and give ${heat}`,
+  backupForWater: (heat: string) => `, ${heat} of it for hot water`,
+  noBackup: 'The backup would never run',
+  unmet: (heat: string) => `; ${heat} that the rooms need would be missing.`,
+  lessThanOne: 'less than 1 kWh',
+  noUnmet: ', and no heat would be missing.',
+
+  costs: (list: string) => `The heating would cost ${list} a year`,
+  costOn: ({ cost, tariff }: Said) => `${cost} on ${tariff}`,
+  costsFromTo: ({ least, most, cheapest, dearest }: Said) => `from ${least} on ${cheapest} to ${most} on ${dearest}`,
+  and: ' and ',
+  boilerCosts: (cost: string) => `; the boiler for the same house ${cost}`,
+  cheaper: ({ saving, tariff }: Said) => `, so on ${tariff} the heat pump saves ${saving}.`,
+  dearer: ({ saving, tariff }: Said) => `, so on ${tariff} the heat pump costs ${saving} more.`,
+  boilerAlone: (cost: string) => `The boiler for the same house would cost ${cost} a year.`,
+
+  carbon: (mass: string) => `It would emit ${mass} of carbon dioxide`,
+  carbonOfBoiler: (mass: string) => `, the boiler ${mass}`,
+  noCarbonFactor: 'Its carbon dioxide is not known: a carbon factor of the fuel is missing.',
+
+  house: ({ heatLoss, designLoad }: Said) => `House: heat loss ${heatLoss}, design load ${designLoad}.`,
+  housePerArea: (loss: string) => `Per area of floor that is ${loss}.`,
+  starts: (count: string) => `About ${count} compressor starts a year, an estimate.`,
+  outside: ({ outside, below }: Said) => `Hours outside the unit’s table: ${outside}; below its lowest flow: ${below}.`,
+  hotWater: ({ asked, short, loss }: Said) =>
+    `Hot water: ${asked} asked, ${short} of it not delivered; the cylinder loses ${loss}.`,
+  factors: ({ h2, h3, h4 }: Said) =>
+    `Seasonal factors: H2 ${h2} (unit alone), H3 ${h3} (with backup), H4 ${h4} (with pump).`,
+
+  degreeDays: {
+    title: ({ base, method }: Said) =>
+      method === 'threshold' ? 'Heating degree days, threshold' : `Heating degree days to ${base}, ${method}`,
+    column: 'K·d',
+    methods: {
+      hours: 'Each hour counts by what it lies below the base (ISO 15927-6).',
+      mean: 'Each day counts by what its mean lies below the base.',
+      minmax: 'Each day counts by what the middle of its extremes lies below the base (the US convention).',
+      fourcase: 'Each day counts by its extremes, with rules for days that cross the base (the UK convention).',
+      threshold:
+        'Days with a mean of 15 °C or less count by their distance to 18 °C (European statistics); no base is used.',
+    },
+  },
+
+  weather: {
+    columns: (list: string) => `columns ${list}`,
+    rows: ({ rows, step }: Said) => `${rows} rows, one every ${step}`,
+    minutes: (count: string) => `${count} min`,
+    stamps: { begin: 'a stamp marks the beginning of its step', end: 'a stamp marks the end of its step' },
+    offset: (offset: string) => `standard time ${offset}`,
+    repaired: ({ hours, column }: Said) => `${hours} hours of ${column} interpolated`,
+  },
+
+  cautions: [
+    'This is an estimate and no guarantee: weather, settings and habits change it.',
+    'Sizing, electrical supply and refrigerant work need licensed people.',
+    'Local codes decide on hot-water hygiene.',
+  ],
+};
+
+/** The words of a report in one language. */
+export type Words = typeof english;

@@ -1,0 +1,54 @@
+import { relative } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { DiskSource } from '../../../cli/diskSource.ts';
+import type { Answer } from '../../../src/scenario/answer/answer.ts';
+import { makeAnswer } from '../../../src/scenario/answer/makeAnswer.ts';
+import { type FileSource, type InputBytes, isProblem } from '../../../src/scenario/fileSource.ts';
+import { loadScenario } from '../../../src/scenario/loadScenario.ts';
+
+// From the working folder, so that no result holds the place of this folder on the machine.
+const HOUSE = relative(process.cwd(), fileURLToPath(new URL('../../../data/demo/house.yaml', import.meta.url)));
+
+/**
+ * The answer of the demo, or of the demo with passages of its scenario replaced.
+ *
+ * @param changes passage and replacement; every passage stands in the scenario once
+ */
+export function demoAnswer(...changes: readonly [string, string][]): Answer {
+  const { loaded, problems } = loadScenario(HOUSE, changedSource(changes));
+  if (loaded === undefined) throw new Error(JSON.stringify(problems));
+  const { answer } = makeAnswer(loaded, problems);
+  if (answer === undefined) throw new Error('no answer');
+  return answer;
+}
+
+function changedSource(changes: readonly [string, string][]): FileSource {
+  const disk = new DiskSource();
+  return {
+    read(name, from) {
+      const read = disk.read(name, from);
+      return isProblem(read) || read.name !== HOUSE ? read : changed(read, changes);
+    },
+  };
+}
+
+function changed(read: InputBytes, changes: readonly [string, string][]): InputBytes {
+  let text = new TextDecoder().decode(read.bytes);
+  for (const [passage, by] of changes) {
+    if (text.split(passage).length !== 2) throw new Error(`'${passage}' does not stand in the scenario once`);
+    text = text.replace(passage, by);
+  }
+  return { ...read, bytes: new TextEncoder().encode(text) };
+}
+
+/** A cylinder with a profile, for the demo's house. */
+export const HOT_WATER: [string, string] = [
+  'backup:\n',
+  'hotWater:\n  volume: 200\n  loss: { given: standingLoss, value: 1.8 }\n  draw: { given: profile, profile: L }\nbackup:\n',
+];
+
+/** The demo's house with mass instead of degree hours. */
+export const WITH_MASS: [string, string] = ['model: degreeHours', 'model: lumped'];
+
+/** Below freezing the unit rests and its crankcase heater runs. */
+export const RESTING_IN_COLD: [string, string] = ['{ kind: parallel }', '{ kind: alternative, switchTemperature: 0 }'];
