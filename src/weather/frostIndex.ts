@@ -25,15 +25,29 @@ const REFERENCE_COIL_PRESSURE = saturationPressureOverIce(REFERENCE_TEMPERATURE 
  * Reference: MODEL section 7.
  */
 export function frostIndex(temperature: number, ratio: number, pressure: number): number {
-  const coil = temperature - COIL_DEPRESSION;
+  const coil = coilTemperature(temperature);
   if (coil >= 0) return 0;
-  const settling = ratio - humidityRatio(saturationPressureOverIce(coil), pressure);
+  const settling = ratio - ratioOverIce(coil, pressure);
   if (settling <= 0) return 0;
-  const staying = Math.min(-coil / FULL_FROST_DEPTH, 1);
-  return Math.min((staying * settling) / referenceSettling(pressure), LARGEST_INDEX);
+  return Math.min((stayingShare(coil) * settling) / referenceSettling(pressure), LARGEST_INDEX);
+}
+
+/** Temperature of the outdoor coil, °C, for air of a temperature in °C. */
+export function coilTemperature(temperature: number): number {
+  return temperature - COIL_DEPRESSION;
+}
+
+/** Humidity ratio of air saturated over ice of a temperature in °C, at most 0, at a pressure in Pa, kg/kg. */
+export function ratioOverIce(temperature: number, pressure: number): number {
+  return humidityRatio(saturationPressureOverIce(temperature), pressure);
+}
+
+/** Share of the settling water that stays as frost on a coil of a temperature in °C, at most 0; 0 … 1. */
+export function stayingShare(coil: number): number {
+  return Math.min(-coil / FULL_FROST_DEPTH, 1);
 }
 
 /** Difference of humidity ratio between reference air and its coil at the same pressure, kg/kg; above 0. */
-function referenceSettling(pressure: number): number {
+export function referenceSettling(pressure: number): number {
   return humidityRatio(REFERENCE_VAPOUR_PRESSURE, pressure) - humidityRatio(REFERENCE_COIL_PRESSURE, pressure);
 }

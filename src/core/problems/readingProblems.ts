@@ -8,6 +8,10 @@ export const readingProblems = {
     says: 'the file has {found} lines; at most {allowed} are read',
     cure: 'one reading a day is enough; cut the file to the last years',
   },
+  'readings.no-names': {
+    says: 'the first line has {found} where the names of the columns should be',
+    cure: 'add a line of names above it, such as “date;reading kWh”',
+  },
   'readings.no-column': {
     says: 'no column for the {path} was recognised; the first line has {found}',
     cure: 'name it in the first line: “date”, and one of “reading” (of the meter), “use” (since the date before) or “fill” (of a tank)',
