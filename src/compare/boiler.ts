@@ -1,11 +1,14 @@
-import { type Fuel, type FuelCost, fuelCost } from './fuel.ts';
+import { columnSum } from '../core/columnSum.ts';
+import { type BoilerFuel, type FuelCost, fuelCost, pricedFuel } from './fuel.ts';
+import { type SpaceHeatEfficiency, spaceHeatInput } from './spaceHeatInput.ts';
 
-/** A boiler that would meet the same need. */
+/** A boiler that would meet the same need; also pellets, district heat or direct electric heating. */
 export interface Boiler {
-  /** Seasonal efficiencies on the fuel's calorific value, above 0. */
-  readonly efficiency: number;
+  /** For space heat, on the fuel's calorific value. */
+  readonly efficiency: SpaceHeatEfficiency;
+  /** For hot water, constant, above 0. */
   readonly hotWaterEfficiency: number;
-  readonly fuel: Fuel;
+  readonly fuel: BoilerFuel;
   /** Electricity of pump and fan while it heats the rooms, kW. */
   readonly pumpPower: number;
   /** Money a year. */
@@ -16,50 +19,66 @@ export interface Boiler {
 export interface BoilerNeed {
   /** Space-heat need by hour, kWh. */
   readonly spaceHeat: Float64Array;
-  /** Their sum. */
-  readonly spaceHeatTotal: number;
   /** Hot water asked, also where it was not served, kWh. */
   readonly hotWater: number;
-  /** Standing loss of the cylinder, kWh. */
+  /** The same by hour; looked at only where the boiler is on the household's tariff. */
+  readonly hotWaterByHour: Float64Array;
+  /** Standing loss of the cylinder, kWh a year. */
   readonly cylinderLoss: number;
 }
 
 /** A year with the boiler. */
 export interface BoilerYear {
-  /** Fuel, kWh on its calorific value. */
+  /** Fuel at its own price, kWh on its calorific value; 0 where the boiler is on the household's tariff. */
   readonly fuel: number;
   readonly cost: FuelCost;
   readonly service: number;
-  /** Electricity of its pump by hour, kWh; it is on the household's bill. */
-  readonly pump: Float64Array;
+  /** Electricity on the household's bill by hour, kWh: the pump, and the heat where it is made on that tariff. */
+  readonly electricity: Float64Array;
+  /** The pump's part of it, kWh a year. */
   readonly pumpElectricity: number;
+  /** The heat's part of it, kWh a year; 0 where the boiler has a fuel of its own price. */
+  readonly heatElectricity: number;
+  /** Space heat over what was taken for it. */
+  readonly meanSpaceHeatEfficiency: number | 'no heat';
 }
 
 /**
  * A year in which a boiler meets the whole need.
  *
+ * On the household's tariff, hot water is taken as heated when it is drawn, and the loss of the cylinder as even over the
+ * hours.
+ *
  * @param boiler efficiencies and fuel
  * @param need what it has to give
- * @returns fuel = space need/η + (hot water + cylinder loss)/η_w, its cost, and the electricity of the pump
+ * @returns fuel = Σ space need/η + (hot water + cylinder loss)/η_w, its cost, and the electricity on the household's bill
  * @example boilerYear(boiler, need).fuel // 10,000 kWh of space heat at an efficiency of 0.8: 12,500
  *
  * Reference: MODEL section 12.
  */
 export function boilerYear(boiler: Boiler, need: BoilerNeed): BoilerYear {
-  const fuel =
-    need.spaceHeatTotal / boiler.efficiency + (need.hotWater + need.cylinderLoss) / boiler.hotWaterEfficiency;
-  const pump = new Float64Array(need.spaceHeat.length);
-  let pumpHours = 0;
-  for (let i = 0; i < pump.length; i++) {
-    if (need.spaceHeat[i] <= 0) continue;
-    pump[i] = boiler.pumpPower;
-    pumpHours++;
-  }
-  return {
-    fuel,
-    cost: fuelCost(boiler.fuel, fuel),
+  const { hotWaterEfficiency, pumpPower } = boiler;
+  const forRooms = spaceHeatInput(boiler.efficiency, need.spaceHeat);
+  const roomInput = sumOf(forRooms);
+  const pump = need.spaceHeat.map((heat) => (heat > 0 ? pumpPower : 0));
+  const input = roomInput + (need.hotWater + need.cylinderLoss) / hotWaterEfficiency;
+  const fuel = pricedFuel(boiler.fuel);
+  const common = {
     service: boiler.servicePerYear,
-    pump,
-    pumpElectricity: pumpHours * boiler.pumpPower,
+    pumpElectricity: sumOf(pump),
+    meanSpaceHeatEfficiency: roomInput > 0 ? sumOf(need.spaceHeat) / roomInput : ('no heat' as const),
   };
+  if (fuel !== undefined) {
+    return { ...common, fuel: input, cost: fuelCost(fuel, input), electricity: pump, heatElectricity: 0 };
+  }
+  const lossOfHour = need.cylinderLoss / pump.length;
+  const electricity = pump.map(
+    (kWh, i) => kWh + forRooms[i] + (need.hotWaterByHour[i] + lossOfHour) / hotWaterEfficiency,
+  );
+  const standing = fuelCost({ ...boiler.fuel, price: 0 }, 0);
+  return { ...common, fuel: 0, cost: standing, electricity, heatElectricity: input };
+}
+
+function sumOf(column: Float64Array): number {
+  return columnSum(column, 0, column.length);
 }

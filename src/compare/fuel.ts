@@ -14,6 +14,26 @@ export interface Fuel {
   readonly carbonFactor?: number | undefined;
 }
 
+/** Electricity that is bought as the household's is: on its tariff, not at a price of its own. */
+export interface TariffElectricity extends Omit<Fuel, 'kind' | 'price'> {
+  readonly kind: 'electricity';
+  /** Left out; a standing charge of its own and the taxes on it count all the same. */
+  readonly price?: number | undefined;
+}
+
+/** What a boiler burns or draws; electricity without a price is on the household's tariff. */
+export type BoilerFuel = Fuel | TariffElectricity;
+
+/**
+ * A fuel as something that is bought at a price.
+ *
+ * @returns nothing where it is electricity on the household's tariff
+ * @example pricedFuel({ kind: 'electricity', calorificValue: 'gross', standingPerYear: 0, taxes: [] }) // undefined
+ */
+export function pricedFuel(fuel: BoilerFuel): Fuel | undefined {
+  return fuel.price === undefined ? undefined : { ...fuel, price: fuel.price };
+}
+
 /**
  * Carbon dioxide of burning one kWh of net calorific value, kg.
  *
@@ -40,7 +60,7 @@ const netPerGross: Partial<Record<FuelKind, number>> = { naturalGas: 0.9, heatin
  * @returns kg per kWh; nothing where none is entered and none is published here
  * @example carbonFactorOf({ kind: 'naturalGas', calorificValue: 'net', price: 0.1, standingPerYear: 0, taxes: [] }) // 0.20196
  */
-export function carbonFactorOf(fuel: Fuel): number | undefined {
+export function carbonFactorOf(fuel: Pick<Fuel, 'kind' | 'calorificValue' | 'carbonFactor'>): number | undefined {
   if (fuel.carbonFactor !== undefined) return fuel.carbonFactor;
   const perNet = carbonPerNetKwh[fuel.kind];
   const net = netPerGross[fuel.kind];
