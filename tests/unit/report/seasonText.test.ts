@@ -55,14 +55,14 @@ describe('the text of a label check', () => {
   });
 
   test('shows a season without outlet temperatures by its points alone, and one without points by its map', () => {
-    const warmer = {
-      ...{ climate: 'warmer', application: 45, operatingLimit: 2, bivalentTemperature: 2 },
+    const warmer: WrittenSeason = {
+      ...{ ...sampleSeason, climate: 'warmer', application: 45, operatingLimit: 2, bivalentTemperature: 2 },
       points: [
         { outdoor: 2, capacity: 6, cop: 3 },
         { outdoor: 12, capacity: 2, cop: 4.5 },
       ],
-    } as const;
-    const file = labelFile({ ...sampleLabel, seasons: [{ ...sampleSeason, ...warmer, points: [...warmer.points] }] });
+    };
+    const file = labelFile({ ...sampleLabel, seasons: [warmer] });
     const text = seasonText(checkedLabel(file), { bins: true }).replace(/\s+/g, ' ');
     expect(text).toContain('the map cannot be rated without outlet temperatures; the declared points give');
     const alone = seasonText(checkedLabel(labelFile(undefined)), { bins: true }).replace(/\s+/g, ' ');
