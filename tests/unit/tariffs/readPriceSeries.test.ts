@@ -209,8 +209,8 @@ describe('what is wrong in a price file is said with line and column', () => {
         '4:1  tomorrow is no stamp; allowed is YYYY-MM-DDTHH:MM with Z or an offset such as +01:00',
       ],
     ],
-    ['one line', lines(row(0)), ['prices.csv  the price series has one line of prices; at least two lines are needed']],
-    ['nothing', ' \n\n', ['prices.csv  the price series has no line of prices; at least two lines are needed']],
+    ['one line', lines(row(0)), ['prices.csv  the file has one line of prices; at least two lines are needed']],
+    ['nothing', ' \n\n', ['prices.csv  the file has no line of prices; at least two lines are needed']],
     [
       'an open quotation mark',
       lines(row(0), `"${row(1)}`, row(2)),
@@ -232,7 +232,7 @@ describe('what is wrong in a price file is said with line and column', () => {
       '1  the column cost of series.priceColumn is not there; the file has when, money, more',
     ]);
     const twice = 'when,money,money\n2025-01-01T00:00Z,1,2\n2025-01-01T01:00Z,1,2\n';
-    expect(codes(read(twice, { timeColumn: 'when', priceColumn: 'money' }).problems)).toBe('tariff.series-column');
+    expect(codes(read(twice, { timeColumn: 'when', priceColumn: 'money' }).problems)).toBe('series.column');
   });
 
   test('the line counts what a quoted cell hides', () => {
