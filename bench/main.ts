@@ -2,40 +2,84 @@ import { execSync } from 'node:child_process';
 import { cpus } from 'node:os';
 import { newColumns } from '../src/sim/columns.ts';
 import { totalsOf } from '../src/sim/totals.ts';
-import { simulateYear } from '../src/sim/year.ts';
+import { simulateByStages, simulateYear } from '../src/sim/year.ts';
 import { bill } from '../src/tariffs/bill.ts';
 import { loadDemo, planOf } from './demo.ts';
-import { measure } from './measure.ts';
+import { type Candidate, measure } from './measure.ts';
+import { plainC } from './plainC.ts';
+import { everythingOn } from './plans.ts';
 
-const SAMPLES = 41;
+const SAMPLES = 31;
+const YEARS_OF_C = 20;
 
 const loaded = loadDemo();
-const plan = planOf(loaded);
-const { hours } = plan.weather;
-const columns = simulateYear(plan, newColumns(hours));
-const tariff = loaded.tariffs[0].prepared;
+const demo = planOf(loaded);
+const everything = planOf(everythingOn(loaded, 'degreeHours'));
+const lumped = planOf(everythingOn(loaded, 'lumped'));
+const { hours } = demo.weather;
+const columns = newColumns(hours);
+simulateYear(demo, columns);
+const ofDemo = simulateYear(demo);
+const [tariff] = loaded.tariffs;
+const year = (name: string, run: () => void): Candidate => ({
+  name,
+  repeat: YEARS_OF_C,
+  run: () => {
+    run();
+    return columns.electricity[0];
+  },
+});
 
+const inC = plainC(everything);
+const candidates: Candidate[] = [
+  year('a prepared year of the demo', () => simulateYear(demo, columns)),
+  year('… with everything on', () => simulateYear(everything, columns)),
+  year('… and a house with mass', () => simulateYear(lumped, columns)),
+  year('… everything, stage by stage', () => simulateByStages(everything, columns)),
+  { name: 'months and totals', repeat: YEARS_OF_C, run: () => totalsOf(demo, ofDemo).annual.electricity },
+  { name: 'one more tariff on it', repeat: 50, run: () => bill(tariff.prepared, ofDemo.electricity).total },
+];
+const inCNs: number[] = [];
 const measured = measure(
-  [
-    { name: 'a prepared year of the demo', repeat: 20, run: () => simulateYear(plan, columns).electricity[0] },
-    { name: 'its months and totals', repeat: 20, run: () => totalsOf(plan, columns).annual.electricity },
-    { name: 'one more tariff on it', repeat: 50, run: () => bill(tariff, columns.electricity).total },
-  ],
+  inC === undefined
+    ? candidates
+    : [...candidates, { name: 'plain C loop, everything on', repeat: 1, run: () => timeOfC(inC.time(YEARS_OF_C)) }],
   SAMPLES,
-);
+).filter(({ name }) => !name.startsWith('plain C'));
+
+/** The C program times itself: starting it does not count. */
+function timeOfC(ns: number): number {
+  inCNs.push(ns);
+  return ns;
+}
 
 console.log(
   `${new Date().toISOString().slice(0, 10)}  ${cpus()[0].model.trim()}  Node ${process.version}  ${commit()}`,
 );
 console.log(`medians of ${SAMPLES} interleaved samples\n`);
+const perHour = (name: string) => {
+  const found = measured.find((each) => each.name === name);
+  return found === undefined ? 0 : (found.median * 1e6) / hours;
+};
 for (const { name, least, median, most } of measured) {
-  const perHour = ((median * 1e6) / hours).toFixed(1);
-  console.log(
-    `${name.padEnd(32)} ${median.toFixed(3).padStart(8)} ms  ${perHour.padStart(7)} ns an hour   (${least.toFixed(3)} to ${most.toFixed(3)})`,
-  );
+  const figures = `${median.toFixed(3).padStart(8)} ms ${((median * 1e6) / hours).toFixed(1).padStart(7)} ns an hour`;
+  console.log(`${name.padEnd(32)} ${figures}   (${least.toFixed(3)} to ${most.toFixed(3)})`);
 }
+if (inC === undefined) {
+  console.log('no C compiler here: nothing to hold the year against');
+} else {
+  const ns = inCNs.toSorted((a, b) => a - b)[inCNs.length >> 1];
+  console.log(`${'plain C loop, everything on'.padEnd(32)} ${''.padStart(11)} ${ns.toFixed(1).padStart(7)} ns an hour`);
+  console.log(`\neverything on takes ${(perHour('… with everything on') / ns).toFixed(2)} × the plain C loop`);
+  console.log(`a house with mass takes ${(perHour('… and a house with mass') / ns).toFixed(2)} × the same loop`);
+  inC.close();
+}
+const year1 = perHour('a prepared year of the demo');
 console.log(
-  `\none more tariff costs ${((100 * measured[2].median) / measured[0].median).toFixed(1)} % of a simulated year`,
+  `hot water and mass take ${(perHour('… and a house with mass') / year1).toFixed(2)} × the year without them`,
+);
+console.log(
+  `one more tariff costs ${((100 * perHour('one more tariff on it')) / year1).toFixed(1)} % of a simulated year`,
 );
 
 function commit(): string {

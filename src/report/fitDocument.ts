@@ -14,15 +14,15 @@ import type { FitDocument } from './fitResultSchema.ts';
  */
 export function fitDocument(answer: FitAnswer, version: string): FitDocument {
   const { scenario, readings, heatLoss, signature, believed, doubts } = answer;
-  const { baseTemperature, baseUse, slope, slopeError, slopeErrorAtBase } = signature;
+  const { baseTemperature, baseUse, slope, slopeErrorWithBase, slopeError } = signature;
   const { degreesOfFreedom, rSquared, cvRmse } = signature;
-  const { value, standardError, low, high } = heatLoss;
+  const { value, standardError, standardErrorWithBase, low, high } = heatLoss;
   return {
     version,
     scenario: scenario.scenario.name,
-    heatLoss: { value, standardError, low, high, entered: answer.enteredHeatLoss },
+    heatLoss: { value, standardError, standardErrorWithBase, low, high, entered: answer.enteredHeatLoss },
     signature: {
-      ...{ baseTemperature, baseUse, slope, slopeError, slopeErrorAtBase },
+      ...{ baseTemperature, baseUse, slope, slopeErrorWithBase, slopeError },
       ...{ degreesOfFreedom, rSquared, cvRmse },
     },
     believed,

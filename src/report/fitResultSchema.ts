@@ -23,7 +23,10 @@ export const fitResultSchema = z.strictObject({
   heatLoss: z
     .strictObject({
       value: quantity('Heat loss by the readings: slope · efficiency / 24.'),
-      standardError: quantity('Its standard error.'),
+      standardError: quantity('Its standard error, the base temperature taken as found.'),
+      standardErrorWithBase: quantity(
+        'Its standard error with the base temperature fitted beside it; the interval comes from this one.',
+      ),
       low: quantity('Lower end of the 95 % interval.'),
       high: quantity('Upper end.'),
       entered: quantity('Heat loss that the scenario has now.'),
@@ -34,8 +37,8 @@ export const fitResultSchema = z.strictObject({
       baseTemperature: quantity('Outdoor temperature below which the house is heated, °C.'),
       baseUse: quantity('Use that does not depend on the weather, kWh/d of the metered energy.'),
       slope: quantity('Metered energy a degree day, kWh.'),
-      slopeError: quantity('Standard error of the slope with the base temperature fitted beside it.'),
-      slopeErrorAtBase: quantity('Standard error of the slope if the base temperature were known.'),
+      slopeErrorWithBase: quantity('Standard error of the slope with the base temperature fitted beside it.'),
+      slopeError: quantity('Standard error of the slope if the base temperature were known.'),
       degreesOfFreedom: count('Periods less three.'),
       rSquared: quantity('R².'),
       cvRmse: quantity('CV(RMSE), as a share.'),

@@ -5,7 +5,7 @@ type Said = Readonly<Record<string, string>>;
 export const englishFit = {
   title: (scenario: string) => `Heat loss by meter readings: ${scenario}`,
   loss: ({ value, error, low, high }: Said) =>
-    `By its readings the house loses ${value} (standard error ${error}; it lies between ${low} and ${high} with 95 % confidence).`,
+    `By its readings the house loses ${value} (standard error ${error}; with the uncertainty of the base temperature it lies between ${low} and ${high} with 95 % confidence).`,
   within: (entered: string) => `The ${entered} of the scenario lie within.`,
   outside: (entered: string) => `The ${entered} of the scenario lie outside.`,
   base: ({ base, use }: Said) =>

@@ -1,7 +1,7 @@
 import { MARK, type YearColumns } from './columns.ts';
 import { AT } from './hourScratch.ts';
 import { runAt } from './spaceHeat.ts';
-import type { YearPlan } from './yearPlan.ts';
+import type { Backup, SourcePrices, YearPlan } from './yearPlan.ts';
 
 /**
  * Heat of the backup for the rooms: the top-up above the unit's highest flow, and what the heat pump could neither give
@@ -11,20 +11,30 @@ import type { YearPlan } from './yearPlan.ts';
  * Reference: MODEL section 10; with a lumped house the backup is asked only for what exceeds full capacity.
  */
 export function runBackup(plan: YearPlan, c: YearColumns, i: number, hour: Float64Array): void {
-  const { backup } = plan;
-  const available = backup.isBoiler ? Math.max(0, backup.power - c.backupWaterHeat[i]) : backup.power;
-  if (plan.sourcePrices !== null && boilerIsCheaper(plan, c, i)) {
+  const { backup, sourcePrices } = plan;
+  const available = availableBackup(backup, c, i);
+  if (sourcePrices !== null && boilerIsCheaper(backup, sourcePrices, c, i)) {
     carryByBoiler(plan, c, i, available, hour);
     return;
   }
-  // in this order an hour that lacks nothing comes out at exactly zero
-  const asked = hour[AT.topUp] + (hour[AT.asked] - c.heatPumpSpaceHeat[i] - c.waitingHeat[i]);
+  const asked = askedOfBackup(c, i, hour);
   const given = Math.min(available, Math.max(0, asked));
   enterBackup(c, i, given, asked - given);
 }
 
+/** Power left for the rooms, kW: what a boiler gives to hot water they do not get. */
+export function availableBackup(backup: Backup, c: YearColumns, i: number): number {
+  return backup.isBoiler ? Math.max(0, backup.power - c.backupWaterHeat[i]) : backup.power;
+}
+
+/** Heat asked of the backup once the heat pump has given its part, kWh. */
+export function askedOfBackup(c: YearColumns, i: number, hour: Float64Array): number {
+  // in this order an hour that lacks nothing comes out at exactly zero
+  return hour[AT.topUp] + (hour[AT.asked] - c.heatPumpSpaceHeat[i] - c.waitingHeat[i]);
+}
+
 /** Lacking heat below this is rounding, kWh. */
-const UNMET = 1e-10;
+export const UNMET = 1e-10;
 
 function enterBackup(c: YearColumns, i: number, given: number, lacking: number): void {
   c.backupSpaceHeat[i] = given;
@@ -34,12 +44,17 @@ function enterBackup(c: YearColumns, i: number, given: number, lacking: number):
 }
 
 /** Ties go to the heat pump; where it can give nothing there is nothing to compare. */
-function boilerIsCheaper(plan: YearPlan, c: YearColumns, i: number): boolean {
-  const prices = plan.sourcePrices;
-  const heat = c.heatPumpSpaceHeat[i];
-  if (prices === null || heat <= 0) return false;
-  const byHeatPump = c.heatPumpSpaceElectricity[i] * prices.electricity[i];
-  return byHeatPump > (heat / plan.backup.efficiency) * prices.fuel;
+export function boilerIsCheaper(backup: Backup, prices: SourcePrices, c: YearColumns, i: number): boolean {
+  if (c.heatPumpSpaceHeat[i] <= 0) return false;
+  return costByHeatPump(prices, c, i) > costByBoiler(backup, prices, c, i);
+}
+
+/** Cost of what the heat pump could give, by itself and by the boiler; money, taxes in. */
+export function costByHeatPump(prices: SourcePrices, c: YearColumns, i: number): number {
+  return c.heatPumpSpaceElectricity[i] * prices.electricity[i];
+}
+export function costByBoiler(backup: Backup, prices: SourcePrices, c: YearColumns, i: number): number {
+  return (c.heatPumpSpaceHeat[i] / backup.efficiency) * prices.fuel;
 }
 
 /** The boiler carries top-up and demand as far as its power goes, the heat pump what is left; nothing waits. */

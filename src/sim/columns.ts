@@ -62,6 +62,8 @@ export interface YearColumns {
   readonly fuel: Float64Array;
   /** Mean indoor air temperature of the lumped house, °C. */
   readonly indoorTemperature: Float64Array;
+  /** Mass of the lumped house at the hour's beginning, °C. */
+  readonly massTemperature: Float64Array;
   /** Need of the lumped house if heat were unlimited, kWh (second pass). */
   readonly unlimitedNeed: Float64Array;
   /** Bits of MARK. */
@@ -100,6 +102,7 @@ export function newColumns(hours: number): YearColumns {
     electricity: column(),
     fuel: column(),
     indoorTemperature: column(),
+    massTemperature: column(),
     unlimitedNeed: column(),
     marks: new Uint16Array(hours),
   };

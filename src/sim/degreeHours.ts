@@ -11,15 +11,30 @@ import type { House } from './house.ts';
  * Reference: MODEL section 4, degree hours; the sun of a day is stored, so irradiance is the mean of hours i−23 … i.
  */
 export function degreeHourNeed(house: House, weather: PreparedWeather, need: Float64Array): void {
-  const { heatLoss, setPoint, nominalSetPoint, baseTemperature, internalGains, heatingLimit } = house;
+  const { heatLoss, internalGains, heatingLimit } = house;
   const { temperature, trailingMeanTemperature, trailingMeanRadiation } = weather;
   const apertureKw = house.solarAperture / 1000;
   for (let i = 0; i < weather.hours; i++) {
-    const base =
-      baseTemperature === null
-        ? setPoint[i] - (internalGains + apertureKw * trailingMeanRadiation[i]) / heatLoss
-        : baseTemperature + (setPoint[i] - nominalSetPoint);
+    const base = baseTemperature(house, i, gainsOf(internalGains, apertureKw, trailingMeanRadiation[i]));
     const heating = trailingMeanTemperature[i] < heatingLimit;
     need[i] = heating ? heatLoss * Math.max(0, base - temperature[i]) : 0;
   }
+}
+
+/** Gains of a house, kW: internal ones in kW, and an aperture of `apertureKw`, m²/1000, in a radiation of W/m². */
+export function gainsOf(internalGains: number, apertureKw: number, radiation: number): number {
+  return internalGains + apertureKw * radiation;
+}
+
+/**
+ * Base temperature of an hour, °C: the set point less what the gains carry, or as entered, moving with the set point.
+ *
+ * @param gains kW; counted only where no base is entered
+ *
+ * Reference: MODEL section 4.
+ */
+export function baseTemperature(house: House, i: number, gains: number): number {
+  return house.baseTemperature === null
+    ? house.setPoint[i] - gains / house.heatLoss
+    : house.baseTemperature + (house.setPoint[i] - house.nominalSetPoint);
 }

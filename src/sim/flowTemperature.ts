@@ -5,7 +5,7 @@ import type { PreparedWeather } from '../weather/series.ts';
 /** Spread between flow and return where it does not follow from the emitters, K (MODEL section 5). */
 const USUAL_SPREAD = 5;
 /** The return is found for at least this share of the design load. */
-const LEAST_RETURN_LOAD = 0.2;
+export const LEAST_RETURN_LOAD = 0.2;
 
 /** How the flow temperature is set, ready to run; temperatures in °C, spread in K. */
 export interface FlowSetting {

@@ -30,7 +30,7 @@ export interface HeatLossParts {
  * @param bridges lengths and ψ
  * @param ventilation volume V in m³ and air changes n in 1/h
  * @returns W/K by windows, opaque elements and ventilation
- * @example heatLossOfElements([{ name: 'wall', kind: 'opaque', area: 100, uValue: 0.5, factor: 1 }], [], { volume: 300, airChanges: 0.5 }) // opaque 50, ventilation 49.5
+ * @example heatLossOfElements([{ name: 'wall', kind: 'opaque', area: 100, uValue: 0.5, factor: 1 }], [], { volume: 300, airChanges: 0.5 }) // { windows: 0, opaque: 50, ventilation: 49.5 }
  *
  * Reference: MODEL section 4.
  */

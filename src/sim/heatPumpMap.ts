@@ -108,38 +108,57 @@ export function readMap(map: HeatPumpMap, outdoor: number, flow: number, out: Fl
   const nextColumn = lastColumn === 0 ? 0 : column + 1;
   const rowA = row * (lastColumn + 1);
   const rowB = rowA + lastColumn + 1;
-  const u = (heldOutdoor - (rows[row] as number)) / ((rows[row + 1] as number) - (rows[row] as number));
-  const v =
-    lastColumn === 0
-      ? 0
-      : (heldFlow - (columns[column] as number)) / ((columns[nextColumn] as number) - (columns[column] as number));
+  const u = shareInCell(rows, row, heldOutdoor);
+  const v = lastColumn === 0 ? 0 : shareInCell(columns, column, heldFlow);
 
-  const capacity = map.capacity;
-  const capacityA = (1 - v) * (capacity[rowA + column] as number) + v * (capacity[rowA + nextColumn] as number);
-  const capacityB = (1 - v) * (capacity[rowB + column] as number) + v * (capacity[rowB + nextColumn] as number);
-  const quality = map.quality;
-  const qualityA = (1 - v) * (quality[rowA + column] as number) + v * (quality[rowA + nextColumn] as number);
-  const qualityB = (1 - v) * (quality[rowB + column] as number) + v * (quality[rowB + nextColumn] as number);
-  const held = (1 - u) * qualityA + u * qualityB;
+  const { capacity, quality } = map;
+  const capacityA = between(capacity[rowA + column], capacity[rowA + nextColumn], v);
+  const capacityB = between(capacity[rowB + column], capacity[rowB + nextColumn], v);
+  const qualityA = between(quality[rowA + column], quality[rowA + nextColumn], v);
+  const qualityB = between(quality[rowB + column], quality[rowB + nextColumn], v);
+  const held = between(qualityA, qualityB, u);
 
-  let kW = (1 - u) * capacityA + u * capacityB;
+  let kW = between(capacityA, capacityB, u);
   if (outdoor < heldOutdoor) {
-    const slope = (capacityB - capacityA) / ((rows[1] as number) - (rows[0] as number));
-    const lost = (heldOutdoor - outdoor) * Math.max(slope, LEAST_COLD_SLOPE * capacityA);
-    kW = Math.max(capacityA - lost, COLD_CAPACITY_FLOOR * capacityA);
+    kW = capacityInCold(capacityA, coldSlope(rows, capacityA, capacityB), heldOutdoor - outdoor);
   }
 
   const lowestFlow = columns[0] as number;
   const kappaOutdoor = Math.min(outdoor, (rows[lastRow] as number) + WARMEST_BEYOND);
   let cop = held * carnotCop(kappaOutdoor, Math.max(flow, lowestFlow));
   if (map.linear) cop /= carnotCop(heldOutdoor, heldFlow);
-  if (flow < lowestFlow) cop *= 1 + LOW_FLOW_GAIN * Math.min(lowestFlow - flow, LOW_FLOW_REACH);
+  if (flow < lowestFlow) cop *= lowFlowGain(lowestFlow - flow);
   out[at] = kW;
   out[at + 1] = cop;
 }
 
-/** Index of the cell of a rising axis of at least two entries that holds `x`, which lies on the axis. */
-function cellOf(axis: Float64Array, x: number): number {
+/** Kilowatts lost per kelvin below the coldest row: the slope of the two coldest, at least 1 % of the capacity there. */
+export function coldSlope(rows: Float64Array, coldest: number, next: number): number {
+  return Math.max((next - coldest) / ((rows[1] as number) - (rows[0] as number)), LEAST_COLD_SLOPE * coldest);
+}
+
+/** Capacity so many kelvins below the coldest row, kW, from that at the row and the slope; at least 30 % of it. */
+export function capacityInCold(coldest: number, slope: number, kelvins: number): number {
+  return Math.max(coldest - kelvins * slope, COLD_CAPACITY_FLOOR * coldest);
+}
+
+/** Factor on the COP so many kelvins, 0 or above, below the lowest flow column. */
+export function lowFlowGain(kelvins: number): number {
+  return 1 + LOW_FLOW_GAIN * Math.min(kelvins, LOW_FLOW_REACH);
+}
+
+/** How far `x` lies in a cell of a rising axis: 0 at its beginning, 1 at its end. */
+export function shareInCell(axis: Float64Array, cell: number, x: number): number {
+  return (x - (axis[cell] as number)) / ((axis[cell + 1] as number) - (axis[cell] as number));
+}
+
+/** Value between two: the first at a share of 0, the second at 1. */
+export function between(first: number, second: number, share: number): number {
+  return (1 - share) * first + share * second;
+}
+
+/** Index of the cell of a rising axis of at least two entries that holds `x`; beyond the axis, the cell at its end. */
+export function cellOf(axis: Float64Array, x: number): number {
   let cell = 0;
   const last = axis.length - 2;
   while (cell < last && x >= (axis[cell + 1] as number)) cell++;

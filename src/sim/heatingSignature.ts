@@ -56,9 +56,9 @@ export interface HeatingSignature {
   /** kWh a degree day. */
   readonly slope: number;
   /** Standard error of the slope with the base temperature fitted beside it, kWh a degree day. */
-  readonly slopeError: number;
+  readonly slopeErrorWithBase: number;
   /** Standard error of the slope if the base temperature were known: that of the line alone. */
-  readonly slopeErrorAtBase: number;
+  readonly slopeError: number;
   /** Half the width of the 95 % interval of the slope, kWh a degree day. */
   readonly slopeMargin: number;
   readonly degreesOfFreedom: number;
@@ -101,13 +101,13 @@ export function heatingSignature(periods: readonly MeteredPeriod[]): SignatureRe
   const ownShare = shareNotExplained(x, coldShares, weight);
   if (ownShare < LEAST_OWN_SHARE) return { refused: 'alike' };
   const degreesOfFreedom = periods.length - PARAMETERS;
-  const slopeErrorAtBase = Math.sqrt(line.residualSum / degreesOfFreedom / line.spread);
-  const slopeError = slopeErrorAtBase / Math.sqrt(ownShare);
+  const slopeError = Math.sqrt(line.residualSum / degreesOfFreedom / line.spread);
+  const slopeErrorWithBase = slopeError / Math.sqrt(ownShare);
   const meanWeight = compensatedSum(weight) / weight.length;
   return {
     signature: {
-      ...{ baseTemperature: base, baseUse: line.intercept, slope: line.slope, slopeError, slopeErrorAtBase },
-      slopeMargin: studentT(CONFIDENCE, degreesOfFreedom) * slopeError,
+      ...{ baseTemperature: base, baseUse: line.intercept, slope: line.slope, slopeErrorWithBase, slopeError },
+      slopeMargin: studentT(CONFIDENCE, degreesOfFreedom) * slopeErrorWithBase,
       degreesOfFreedom,
       rSquared: 1 - line.residualSum / line.totalSum,
       cvRmse: Math.sqrt(line.residualSum / meanWeight / degreesOfFreedom) / line.meanY,
@@ -119,7 +119,10 @@ export function heatingSignature(periods: readonly MeteredPeriod[]): SignatureRe
 /** Heat loss by a signature, W/K. */
 export interface MeteredHeatLoss {
   readonly value: number;
+  /** By the slope's own standard error, as MODEL section 13 has it. */
   readonly standardError: number;
+  /** With the base temperature fitted beside the slope: the interval comes from this one. */
+  readonly standardErrorWithBase: number;
   /** Ends of the 95 % interval; the lower one may fall below 0 where the readings say next to nothing. */
   readonly low: number;
   readonly high: number;
@@ -131,18 +134,20 @@ export interface MeteredHeatLoss {
  * @param signature in kWh of fuel
  * @param efficiency of the boiler for space heat, above 0, on the calorific value of those kWh; 1 for electric heating
  * @returns W/K
- * @example heatLossOfSignature({ slope: 4.8, slopeError: 0.24, slopeMargin: 0.48 }, 0.9).value // 180
+ * @example heatLossOfSignature({ slope: 4.8, slopeError: 0.2, slopeErrorWithBase: 0.24, slopeMargin: 0.48 }, 0.9).value // 180
  *
  * Reference: MODEL section 13.
  */
 export function heatLossOfSignature(
-  { slope, slopeError, slopeMargin }: Pick<HeatingSignature, 'slope' | 'slopeError' | 'slopeMargin'>,
+  signature: Pick<HeatingSignature, 'slope' | 'slopeError' | 'slopeErrorWithBase' | 'slopeMargin'>,
   efficiency: number,
 ): MeteredHeatLoss {
+  const { slope, slopeError, slopeErrorWithBase, slopeMargin } = signature;
   const perSlope = (1000 * efficiency) / HOURS_PER_DAY;
   return {
     value: slope * perSlope,
     standardError: slopeError * perSlope,
+    standardErrorWithBase: slopeErrorWithBase * perSlope,
     low: (slope - slopeMargin) * perSlope,
     high: (slope + slopeMargin) * perSlope,
   };

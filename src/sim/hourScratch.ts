@@ -21,3 +21,25 @@ export const AT = {
   starts: 9,
   size: 10,
 } as const;
+
+/**
+ * Places of the scratch column of a cylinder: first the state that one hour hands to the next, then figures of the last
+ * hour in which it was reheated.
+ */
+export const CYLINDER = {
+  temperature: 0,
+  /** 1 while a reheat is under way, and while a hygiene run is pending. */
+  reheating: 1,
+  hygienePending: 2,
+  /** Capacity and COP of the map. */
+  mapCapacity: 3,
+  mapCop: 4,
+  /** Temperature wanted, how far the heat pump reaches, and the flow for it, °C. */
+  target: 5,
+  reach: 6,
+  flow: 7,
+  /** Capacity after frost loss, and COP after frost loss and in-use allowance. */
+  capacity: 8,
+  cop: 9,
+  size: 10,
+} as const;

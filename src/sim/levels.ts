@@ -20,19 +20,34 @@ export function readLevels(
   flow: number,
   hour: Float64Array,
 ): void {
-  const { unit, capacityLoss, copLoss, lossFollowsLevel } = onWeather;
-  readHour(onWeather.full, i, outdoor, flow, hour, AT.capacity);
-  const frostFree = hour[AT.capacity];
-  if (onWeather.lowest !== null) {
-    readHour(onWeather.lowest, i, outdoor, flow, hour, AT.lowestCapacity);
-  } else if (unit.lowest.given === 'share') {
-    hour[AT.lowestCapacity] = unit.lowest.capacity * frostFree;
-    hour[AT.lowestCop] = unit.lowest.cop * hour[AT.cop];
-  }
-  // at a lower level the coil is less cold, so `humidity` takes less there
-  const level = lossFollowsLevel ? hour[AT.lowestCapacity] / frostFree : 1;
-  hour[AT.capacity] = frostFree * (1 - capacityLoss[i]);
+  readFrostFree(onWeather, i, outdoor, flow, hour);
+  const { capacityLoss, copLoss } = onWeather;
+  const level = frostShareOfLowest(onWeather, hour);
+  hour[AT.capacity] *= 1 - capacityLoss[i];
   hour[AT.cop] *= 1 - copLoss[i];
   hour[AT.lowestCapacity] *= 1 - capacityLoss[i] * level;
   hour[AT.lowestCop] *= 1 - copLoss[i] * level;
+}
+
+/** The same without frost loss. */
+export function readFrostFree(
+  onWeather: UnitOnWeather,
+  i: number,
+  outdoor: number,
+  flow: number,
+  hour: Float64Array,
+): void {
+  const { unit } = onWeather;
+  readHour(onWeather.full, i, outdoor, flow, hour, AT.capacity);
+  if (onWeather.lowest !== null) {
+    readHour(onWeather.lowest, i, outdoor, flow, hour, AT.lowestCapacity);
+  } else if (unit.lowest.given === 'share') {
+    hour[AT.lowestCapacity] = unit.lowest.capacity * hour[AT.capacity];
+    hour[AT.lowestCop] = unit.lowest.cop * hour[AT.cop];
+  }
+}
+
+/** Share of the frost loss that the lowest level has: its coil is less cold, so `humidity` takes less there. */
+export function frostShareOfLowest(onWeather: UnitOnWeather, frostFree: Float64Array): number {
+  return onWeather.lossFollowsLevel ? frostFree[AT.lowestCapacity] / frostFree[AT.capacity] : 1;
 }

@@ -76,7 +76,7 @@ export function massParameters(
   const hAirSurface = (AIR_TO_SURFACE * surfaces) / 1000;
   const hSurfaceMass = (SURFACE_TO_MASS * massArea) / 1000;
   const scale = lossScale(parts, heatLoss, hAirSurface * 1000);
-  const opaque = (parts.opaque * scale) / 1000;
+  const opaque = scale === UNREACHABLE ? UNREACHABLE : (parts.opaque * scale) / 1000;
   if (!(opaque < hSurfaceMass)) {
     return { reason: 'too much through opaque elements', opaque: opaque * 1000, most: hSurfaceMass * 1000 };
   }
@@ -121,6 +121,9 @@ export function massParameters(
   };
 }
 
+/** Stands for a factor that does not exist: without ventilation the surfaces pass on at most H_is. */
+const UNREACHABLE = Number.POSITIVE_INFINITY;
+
 /**
  * Factor s for which ventilation v·s in parallel with air-to-surface H_is in series with (w + o)·s equals H: the
  * positive root of v·b·s² + (v·H_is + H_is·b − H·b)·s − H·H_is = 0 with b = w + o.
@@ -130,7 +133,7 @@ function lossScale(parts: HeatLossParts, heatLoss: number, hAirSurface: number):
   const b = parts.windows + parts.opaque;
   if (b === 0) return heatLoss / v;
   const linear = v * hAirSurface + hAirSurface * b - heatLoss * b;
-  if (v === 0) return linear > 0 ? (heatLoss * hAirSurface) / linear : Number.MAX_VALUE;
+  if (v === 0) return linear > 0 ? (heatLoss * hAirSurface) / linear : UNREACHABLE;
   const root = Math.sqrt(linear * linear + 4 * v * b * heatLoss * hAirSurface);
   // the form without cancellation, whichever sign the linear term has
   return linear >= 0 ? (2 * heatLoss * hAirSurface) / (linear + root) : (root - linear) / (2 * v * b);

@@ -2,7 +2,7 @@ import { MARK } from './columns.ts';
 import type { HeatPumpMap } from './heatPumpMap.ts';
 
 /** Points so near to the edge of the grid count as on it, K: rounding only. */
-const ON_THE_EDGE = 1e-9;
+export const ON_THE_EDGE = 1e-9;
 
 /**
  * How a point lies to the grid of a map.

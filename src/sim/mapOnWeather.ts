@@ -1,6 +1,6 @@
 import type { PreparedWeather } from '../weather/series.ts';
 import { CONDENSING_OFFSET, LEAST_LIFT, LIFT_OFFSET } from './carnot.ts';
-import { type HeatPumpMap, LOW_FLOW_GAIN, LOW_FLOW_REACH, readMap, WARMEST_BEYOND } from './heatPumpMap.ts';
+import { between, cellOf, type HeatPumpMap, lowFlowGain, readMap, shareInCell, WARMEST_BEYOND } from './heatPumpMap.ts';
 
 /**
  * A map laid on a weather series: the outdoor axis is read once an hour and for all flow columns, so that a run only
@@ -50,14 +50,13 @@ export function layMapOnWeather(map: HeatPumpMap, weather: PreparedWeather): Map
 /** Capacity and share of κ of all flow columns at an outdoor temperature on the axis. */
 function layHour(map: HeatPumpMap, outdoor: number, values: Float64Array, at: number): void {
   const { outdoor: rows, flow, capacity, quality } = map;
-  let row = 0;
-  while (row < rows.length - 2 && outdoor >= rows[row + 1]) row++;
-  const u = (outdoor - rows[row]) / (rows[row + 1] - rows[row]);
+  const row = cellOf(rows, outdoor);
+  const u = shareInCell(rows, row, outdoor);
   for (let column = 0; column < flow.length; column++) {
     const a = row * flow.length + column;
     const b = a + flow.length;
-    values[at + 2 * column] = (1 - u) * capacity[a] + u * capacity[b];
-    values[at + 2 * column + 1] = (1 - u) * quality[a] + u * quality[b];
+    values[at + 2 * column] = between(capacity[a], capacity[b], u);
+    values[at + 2 * column + 1] = between(quality[a], quality[b], u);
   }
 }
 
@@ -86,16 +85,19 @@ export function readHour(
     return;
   }
   const axis = laid.flow;
-  const last = axis.length - 2;
-  let cell = 0;
-  while (cell < last && flow >= axis[cell + 1]) cell++;
-  const v = Math.min(Math.max((flow - axis[cell]) * laid.perCell[cell], 0), 1);
+  const cell = cellOf(axis, flow);
+  const v = shareInFlowCell(laid, cell, flow);
   const values = laid.values;
-  const a = (i * (last + 2) + cell) * 2;
+  const a = (i * axis.length + cell) * 2;
   const lowest = axis[0];
   const kappaFlow = Math.max(flow, lowest);
   const kappa = (kappaFlow + CONDENSING_OFFSET) / Math.max(kappaFlow - laid.kappaOutdoor[i] + LIFT_OFFSET, LEAST_LIFT);
-  const gain = 1 + LOW_FLOW_GAIN * Math.min(kappaFlow - flow, LOW_FLOW_REACH);
-  out[at] = (1 - v) * values[a] + v * values[a + 2];
-  out[at + 1] = ((1 - v) * values[a + 1] + v * values[a + 3]) * kappa * gain;
+  const gain = lowFlowGain(kappaFlow - flow);
+  out[at] = between(values[a], values[a + 2], v);
+  out[at + 1] = between(values[a + 1], values[a + 3], v) * kappa * gain;
+}
+
+/** How far a flow lies in a cell of the flow axis, 0 … 1; held at its ends. */
+export function shareInFlowCell(laid: MapOnWeather, cell: number, flow: number): number {
+  return Math.min(Math.max((flow - laid.flow[cell]) * laid.perCell[cell], 0), 1);
 }

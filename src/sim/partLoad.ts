@@ -1,10 +1,11 @@
 import { WATER_HEAT_CAPACITY } from '../core/constants.ts';
 import { AT } from './hourScratch.ts';
+import type { Cycling } from './unit.ts';
 import type { YearPlan } from './yearPlan.ts';
 
 /** Swing of the water in a short run, K, and the most starts of an hour (MODEL section 9). */
-const CYCLE_SWING = 5;
-const MOST_STARTS = 6;
+export const CYCLE_SWING = 5;
+export const MOST_STARTS = 6;
 
 /**
  * Electricity and starts for heat given at a rate: linear COP between the lowest level and full load, cycling below.
@@ -19,26 +20,37 @@ const MOST_STARTS = 6;
  */
 export function priceRate(plan: YearPlan, given: number, share: number, hour: Float64Array): void {
   const { cycling } = plan.unitOnWeather.unit;
-  const full = hour[AT.capacity];
-  const singleSpeed = hour[AT.lowestCapacity] >= full;
-  const least = singleSpeed ? full : hour[AT.lowestCapacity];
-  const leastCop = singleSpeed ? hour[AT.cop] : hour[AT.lowestCop];
+  const least = leastCapacity(hour);
   const rate = given / share;
-  const inUse = 1 - plan.inUseAllowance;
-  if (rate >= least) {
-    const cop = singleSpeed ? leastCop : leastCop + ((hour[AT.cop] - leastCop) * (rate - least)) / (full - least);
-    hour[AT.electricity] = given / (cop * inUse);
-    hour[AT.starts] = 0;
-    return;
-  }
+  hour[AT.electricity] = given / (copAtRate(cycling, rate, hour) * (1 - plan.inUseAllowance));
+  hour[AT.starts] = 0;
+  if (rate >= least) return;
   const on = rate / least;
   hour[AT.starts] = Math.min(
     MOST_STARTS,
     (least * on * (1 - on) * share) / (plan.cycleWater * WATER_HEAT_CAPACITY * CYCLE_SWING),
   );
-  if (cycling.method === 'degradation') {
-    hour[AT.electricity] = given / (leastCop * (1 - cycling.coefficient * (1 - on)) * inUse);
-  } else {
-    hour[AT.electricity] = given / (leastCop * inUse) + cycling.power * (1 - on) * share;
+  if (cycling.method === 'offPower') hour[AT.electricity] += cycling.power * (1 - on) * share;
+}
+
+/** Lowest rate without cycling, kW: full capacity for a single-speed unit. */
+export function leastCapacity(hour: Float64Array): number {
+  return Math.min(hour[AT.lowestCapacity], hour[AT.capacity]);
+}
+
+/**
+ * COP at a rate, before the in-use allowance: linear between the levels, with degradation below the lowest.
+ *
+ * @param rate kW, above 0 and at most full capacity
+ * @param hour scratch with the hour's levels
+ */
+export function copAtRate(cycling: Cycling, rate: number, hour: Float64Array): number {
+  const full = hour[AT.capacity];
+  const singleSpeed = hour[AT.lowestCapacity] >= full;
+  const least = leastCapacity(hour);
+  const leastCop = singleSpeed ? hour[AT.cop] : hour[AT.lowestCop];
+  if (rate < least) {
+    return cycling.method === 'degradation' ? leastCop * (1 - cycling.coefficient * (1 - rate / least)) : leastCop;
   }
+  return singleSpeed ? leastCop : leastCop + ((hour[AT.cop] - leastCop) * (rate - least)) / (full - least);
 }

@@ -19,14 +19,18 @@ export function needOfRoom(
   massTemperature: number,
 ): number {
   if (plan.weather.trailingMeanTemperature[i] >= plan.house.heatingLimit) return 0;
-  const atRest = mass.airFromMass * massTemperature + onWeather.airAtRest[i];
+  const atRest = airAtRest(mass, onWeather, i, massTemperature);
   return Math.max(0, (plan.house.setPoint[i] - atRest) / mass.airPerHeat);
+}
+
+/** Air of a lumped house that is not heated in the hour, °C; the mass at the hour's beginning in °C. */
+export function airAtRest(mass: MassParameters, onWeather: MassOnWeather, i: number, massTemperature: number): number {
+  return mass.airFromMass * massTemperature + onWeather.airAtRest[i];
 }
 
 /**
  * Mass temperature at the hour's end for the heat that was really given; enters the indoor temperature.
  *
- * @param heat delivered into the air, kW
  * @returns °C
  */
 export function advanceRoom(
@@ -37,7 +41,7 @@ export function advanceRoom(
   massTemperature: number,
 ): number {
   const heat = c.heatPumpSpaceHeat[i] + c.backupSpaceHeat[i];
-  c.indoorTemperature[i] = mass.airFromMass * massTemperature + onWeather.airAtRest[i] + mass.airPerHeat * heat;
+  c.indoorTemperature[i] = airAtRest(mass, onWeather, i, massTemperature) + mass.airPerHeat * heat;
   return mass.keep * massTemperature + onWeather.massAtRest[i] + mass.massFromAirHeat * heat;
 }
 

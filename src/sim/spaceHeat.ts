@@ -7,7 +7,7 @@ import { priceRate } from './partLoad.ts';
 import type { YearPlan } from './yearPlan.ts';
 
 /** Heat may wait for at most so many hours of the design load (MODEL section 9). */
-const WAITING_HOURS = 2;
+export const WAITING_HOURS = 2;
 
 /**
  * Flow temperature of the hour.
@@ -63,7 +63,7 @@ export function giveSpaceHeat(plan: YearPlan, c: YearColumns, i: number, waiting
   let carried = need;
   if (flow > highest) {
     const back = returnTemperature(plan.flow, flow, hour[AT.load]);
-    carried = need * Math.min(Math.max((highest - back) / (flow - back), 0), 1);
+    carried = need * shareThroughLimit(highest, flow, back);
     if (need > 0) c.marks[i] |= MARK.flowAboveLimit;
   }
   const free = 1 - c.hotWaterShare[i];
@@ -74,8 +74,18 @@ export function giveSpaceHeat(plan: YearPlan, c: YearColumns, i: number, waiting
   hour[AT.topUp] = need - carried;
   hour[AT.asked] = asked;
   hour[AT.canGive] = canGive;
-  c.waitingHeat[i] = leftWaiting(plan, c, i, asked - given, waiting + full - canGive);
+  c.waitingHeat[i] = leftWaiting(plan, c, i, asked - given, displacedHeat(waiting, full, canGive));
   runAt(plan, c, i, given, hour);
+}
+
+/** Share of the need that a highest flow carries where a hotter one is asked; the three temperatures in °C. */
+export function shareThroughLimit(highest: number, flow: number, back: number): number {
+  return Math.min(Math.max((highest - back) / (flow - back), 0), 1);
+}
+
+/** Most that hot water and quiet hours can have displaced, kWh: what waited, and full capacity less what can be given. */
+export function displacedHeat(waiting: number, full: number, canGive: number): number {
+  return waiting + full - canGive;
 }
 
 /** Heat that waits: with degree hours for the next hour, with mass it is what the room waits for in this one. */
@@ -86,7 +96,7 @@ function leftWaiting(plan: YearPlan, c: YearColumns, i: number, lacking: number,
 }
 
 /**
- * Enters a rate of the heat pump into the columns: heat, electricity, starts and marks.
+ * Enters a rate of the heat pump into the columns: heat, electricity and starts.
  *
  * @param given heat of the hour, kWh
  */
@@ -96,10 +106,23 @@ export function runAt(plan: YearPlan, c: YearColumns, i: number, given: number, 
   c.starts[i] = 0;
   if (given <= 0) return;
   priceRate(plan, given, 1 - c.hotWaterShare[i], hour);
-  if (given / (1 - c.hotWaterShare[i]) < Math.min(hour[AT.lowestCapacity], hour[AT.capacity]))
-    c.marks[i] |= MARK.cycling;
   c.heatPumpSpaceElectricity[i] = hour[AT.electricity];
   c.starts[i] = hour[AT.starts];
+}
+
+/** A rate so little below the lowest level is the lowest level: rounding only. */
+export const ROUNDING = 1e-9;
+
+/**
+ * Marks the hour for the heat that the heat pump gives in the end, once it is settled what a cheaper boiler takes over.
+ *
+ * Reference: MODEL sections 6 (hours outside the grid) and 9 (cycling).
+ */
+export function markSpaceHeat(plan: YearPlan, c: YearColumns, i: number, hour: Float64Array): void {
+  const given = c.heatPumpSpaceHeat[i];
+  if (given <= 0) return;
+  const least = Math.min(hour[AT.lowestCapacity], hour[AT.capacity]);
+  if (given / (1 - c.hotWaterShare[i]) < least * (1 - ROUNDING)) c.marks[i] |= MARK.cycling;
   const flow = Math.min(c.flowTemperature[i], plan.unitOnWeather.highestFlow[i]);
   c.marks[i] |= marksOfPoint(plan.unitOnWeather.unit.full, plan.weather.temperature[i], flow);
 }

@@ -1,107 +1,90 @@
 import { countAuxiliaries } from './auxiliaries.ts';
-import { runBackup } from './backup.ts';
 import { newColumns, type YearColumns } from './columns.ts';
 import { degreeHourNeed } from './degreeHours.ts';
 import { heatHotWater } from './hotWater.ts';
-import { AT } from './hourScratch.ts';
-import type { MassParameters } from './lumpedHouse.ts';
-import type { MassOnWeather } from './massOnWeather.ts';
-import { advanceRoom, needOfRoom, needWithUnlimitedHeat, START_UP_HOURS } from './roomWithMass.ts';
-import { findCapacity, giveSpaceHeat, setFlow } from './spaceHeat.ts';
+import { runRoomsByStages } from './roomsByStages.ts';
+import { runRooms } from './roomsKernel.ts';
+import { needWithUnlimitedHeat, START_UP_HOURS } from './roomWithMass.ts';
+import { runHotWater } from './waterKernel.ts';
 import type { YearPlan } from './yearPlan.ts';
 
+/** How the hours of hot water and rooms are run; both ways leave the same columns, to the last bit. */
+interface Loops {
+  readonly hotWater: (plan: YearPlan, c: YearColumns, from: number, to: number) => void;
+  readonly rooms: (plan: YearPlan, c: YearColumns, from: number, to: number, massTemperature: number) => number;
+}
+
+/** Each in one loop with everything at hand. */
+const kernels: Loops = {
+  hotWater: (plan, c, from, to) => {
+    if (plan.hotWater !== null) runHotWater(plan, plan.hotWater, c, from, to);
+  },
+  rooms: runRooms,
+};
+
+/** Stage by stage, as MODEL lists them: the text to read, the mode `cheapest`, and what the loops are held against. */
+const stages: Loops = {
+  hotWater: (plan, c, from, to) => {
+    if (plan.hotWater !== null) heatHotWater(plan, plan.hotWater, c, from, to);
+  },
+  rooms: runRoomsByStages,
+};
+
 /**
- * Simulates one year, stage by stage as MODEL lists them: need (4), hot water first (8), flow temperature (5), map and
- * frost (6, 7), space heat (9), backup (10), auxiliaries (11).
+ * Simulates one year: need (MODEL section 4), hot water first (8), flow temperature (5), map and frost (6, 7), space heat
+ * (9), backup (10), auxiliaries (11).
  *
  * @param plan everything prepared, all columns of one length
  * @param columns receives the year; handed in, the columns of an earlier run of the same length are used again
  * @returns the columns
  */
 export function simulateYear(plan: YearPlan, columns: YearColumns = newColumns(plan.weather.hours)): YearColumns {
-  const { hours } = columns;
-  const { mass } = plan.house;
-  if (mass !== null && plan.massOnWeather !== null) {
-    needWithUnlimitedHeat(plan, mass, plan.massOnWeather, columns);
-    heatRoomsWithMass(plan, mass, plan.massOnWeather, columns);
-  } else {
-    columns.indoorTemperature.fill(0);
-    columns.unlimitedNeed.fill(0);
-    degreeHourNeed(plan.house, plan.weather, columns.spaceHeatNeed);
-    prepareHotWater(plan, columns, 0, hours);
-    heatRooms(plan, columns);
-  }
-  countAuxiliaries(plan, columns);
-  return columns;
+  return runYear(plan, columns, plan.sourcePrices === null ? kernels : stages);
 }
 
-function prepareHotWater(plan: YearPlan, c: YearColumns, from: number, to: number): void {
+/** The same year, stage by stage whatever the plan. */
+export function simulateByStages(plan: YearPlan, columns: YearColumns = newColumns(plan.weather.hours)): YearColumns {
+  return runYear(plan, columns, stages);
+}
+
+function runYear(plan: YearPlan, c: YearColumns, loops: Loops): YearColumns {
+  const { hours } = c;
+  const { mass } = plan.house;
   if (plan.hotWater === null) clearHotWater(c);
-  else heatHotWater(plan, plan.hotWater, c, from, to);
+  if (mass !== null && plan.massOnWeather !== null) {
+    needWithUnlimitedHeat(plan, mass, plan.massOnWeather, c);
+    const start = hours - START_UP_HOURS;
+    loops.hotWater(plan, c, start, hours);
+    const atMass = loops.rooms(plan, c, start, hours, plan.house.setPoint[start]);
+    c.marks.fill(0);
+    loops.hotWater(plan, c, 0, hours);
+    loops.rooms(plan, c, 0, hours, atMass);
+  } else {
+    clearMass(c);
+    degreeHourNeed(plan.house, plan.weather, c.spaceHeatNeed);
+    loops.hotWater(plan, c, 0, hours);
+    loops.rooms(plan, c, 0, hours, 0);
+  }
+  countAuxiliaries(plan, c);
+  return c;
 }
 
 /** Columns may come from a run that had hot water. */
 function clearHotWater(c: YearColumns): void {
-  for (const column of [
-    c.hotWaterShare,
-    c.heatPumpWaterHeat,
-    c.heatPumpWaterElectricity,
-    c.backupWaterHeat,
-    c.hotWaterServed,
-    c.hotWaterShort,
-    c.cylinderLoss,
-    c.cylinderTemperature,
-    c.marks,
-  ]) {
-    column.fill(0);
-  }
+  c.hotWaterShare.fill(0);
+  c.heatPumpWaterHeat.fill(0);
+  c.heatPumpWaterElectricity.fill(0);
+  c.backupWaterHeat.fill(0);
+  c.hotWaterServed.fill(0);
+  c.hotWaterShort.fill(0);
+  c.cylinderLoss.fill(0);
+  c.cylinderTemperature.fill(0);
+  c.marks.fill(0);
 }
 
-/** Degree hours: the need is known for every hour, and heat that was displaced waits for the next. */
-function heatRooms(plan: YearPlan, c: YearColumns): void {
-  const hour = new Float64Array(AT.size);
-  let waiting = 0;
-  for (let i = 0; i < c.hours; i++) {
-    if (c.spaceHeatNeed[i] === 0 && waiting === 0) restHour(c, i);
-    else heatHour(plan, c, i, waiting, hour);
-    waiting = c.waitingHeat[i];
-  }
-}
-
-/** Lumped house: the need of an hour follows from what was really delivered before it. */
-function heatRoomsWithMass(plan: YearPlan, mass: MassParameters, onWeather: MassOnWeather, c: YearColumns): void {
-  const hour = new Float64Array(AT.size);
-  const start = c.hours - START_UP_HOURS;
-  let temperature = plan.house.setPoint[start];
-  const run = (from: number, to: number) => {
-    prepareHotWater(plan, c, from, to);
-    for (let i = from; i < to; i++) {
-      c.spaceHeatNeed[i] = needOfRoom(plan, mass, onWeather, i, temperature);
-      if (c.spaceHeatNeed[i] === 0) restHour(c, i);
-      else heatHour(plan, c, i, 0, hour);
-      temperature = advanceRoom(mass, onWeather, c, i, temperature);
-    }
-  };
-  run(start, c.hours);
-  run(0, c.hours);
-}
-
-/** The stages of one hour with space heat asked. */
-function heatHour(plan: YearPlan, c: YearColumns, i: number, waiting: number, hour: Float64Array): void {
-  setFlow(plan, c, i, waiting, hour);
-  findCapacity(plan, c, i, hour);
-  giveSpaceHeat(plan, c, i, waiting, hour);
-  runBackup(plan, c, i, hour);
-}
-
-/** An hour in which no space heat is asked. */
-function restHour(c: YearColumns, i: number): void {
-  c.flowTemperature[i] = 0;
-  c.capacity[i] = 0;
-  c.heatPumpSpaceHeat[i] = 0;
-  c.heatPumpSpaceElectricity[i] = 0;
-  c.backupSpaceHeat[i] = 0;
-  c.unmetHeat[i] = 0;
-  c.waitingHeat[i] = 0;
-  c.starts[i] = 0;
+/** Columns may come from a house with mass. */
+function clearMass(c: YearColumns): void {
+  c.indoorTemperature.fill(0);
+  c.massTemperature.fill(0);
+  c.unlimitedNeed.fill(0);
 }

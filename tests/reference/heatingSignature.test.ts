@@ -4,6 +4,37 @@ import { linearRegression, linearRegressionLine, rSquared, sampleStandardDeviati
 import { describe, expect, it } from 'vitest';
 import { heatingSignature, heatLossOfSignature, type MeteredPeriod } from '../../src/sim/heatingSignature.ts';
 import { studentT } from '../../src/sim/studentT.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Heat loss from meter readings');
+const coverage = accuracy.comparison({
+  what: 'years in which the 95 % interval misses the true heat loss, beyond the five expected',
+  source: '100 invented years with noise, heat loss known',
+  unit: '%',
+  allowed: 5,
+  why: 'at least 90 of 100 years within',
+});
+const bias = accuracy.comparison({
+  what: 'mean of the heat losses found',
+  source: 'the same 100 years',
+  unit: '%',
+  allowed: 1.5,
+  why: 'three standard errors of a mean of 100',
+});
+const line = accuracy.comparison({
+  what: 'slope, base use and R² of the line at the base found',
+  source: 'library simple-statistics',
+  unit: '',
+  allowed: 1e-10,
+  why: 'the same sums in another order',
+});
+const quantiles = accuracy.comparison({
+  what: 'two-sided quantiles of Student’s t',
+  source: 'Abramowitz and Stegun 1964, table 26.10 (from memory)',
+  unit: '',
+  allowed: 0.0005001,
+  why: 'three printed decimals',
+});
 
 /** Normal draws by Box and Muller 1958; small seeds lie close together in the generator, so they are spread and warmed up. */
 function normalDraws(seed: number): () => number {
@@ -47,13 +78,14 @@ describe('the heat loss of an invented home of 190 W/K over 100 noisy years', ()
   it('lies within its own 95 % interval in at least 90 of them', () => {
     const within = years.filter(({ loss }) => loss.low <= home.heatLoss && home.heatLoss <= loss.high).length;
     expect(within).toBeGreaterThanOrEqual(90);
+    coverage.add(95 - within);
     // An interval that always holds it would say nothing: of 100 years some must miss. All 100 would be a chance of 0.6 %.
     expect(within).toBeLessThan(100);
   });
 
   it('would lie outside far more often if the search for the base temperature were not counted', () => {
     const within = years.filter(({ signature, loss }) => {
-      const margin = (loss.high - loss.value) * (signature.slopeErrorAtBase / signature.slopeError);
+      const margin = (loss.high - loss.value) * (signature.slopeError / signature.slopeErrorWithBase);
       return Math.abs(loss.value - home.heatLoss) <= margin;
     }).length;
     expect(within).toBeLessThan(90);
@@ -65,7 +97,8 @@ describe('the heat loss of an invented home of 190 W/K over 100 noisy years', ()
     const scatter = sampleStandardDeviation(losses);
     // Three standard errors of a mean of 100.
     expect(Math.abs(mean - home.heatLoss)).toBeLessThan((3 * scatter) / 10);
-    const told = Math.sqrt(years.reduce((sum, { loss }) => sum + loss.standardError ** 2, 0) / years.length);
+    bias.add(100 * (mean / home.heatLoss - 1));
+    const told = Math.sqrt(years.reduce((sum, { loss }) => sum + loss.standardErrorWithBase ** 2, 0) / years.length);
     // A standard deviation of 100 values is known to 7 %, that of 9 degrees of freedom each to less: 25 % is three of these.
     expect(Math.abs(told / scatter - 1)).toBeLessThan(0.25);
   });
@@ -87,6 +120,8 @@ describe('the line at the base temperature found', () => {
     expect(signature.slope).toBeCloseTo(m, 10);
     expect(signature.baseUse).toBeCloseTo(b, 10);
     expect(signature.rSquared).toBeCloseTo(rSquared(points, linearRegressionLine({ m, b })), 10);
+    for (const difference of [signature.slope - m, signature.baseUse - b]) line.add(difference);
+    line.add(signature.rSquared - rSquared(points, linearRegressionLine({ m, b })));
   });
 });
 
@@ -111,5 +146,6 @@ describe('Student’s t', () => {
   it.each(table)('that a share of %d with %d degrees of freedom stays within is %d', (share, degreesOfFreedom, t) => {
     // The tables round to three decimals.
     expect(Math.abs(studentT(share, degreesOfFreedom) - t)).toBeLessThan(0.0005001);
+    quantiles.add(studentT(share, degreesOfFreedom) - t);
   });
 });

@@ -52,7 +52,7 @@ export function toStandardTime(source: ClockSource): StandardTime | undefined {
   const shift = source.atEnd ? source.order.step : 0;
   const stated = settings.offset === undefined ? undefined : offsetMinutes(settings.offset);
   return {
-    minutes: stamps.minutes.map((minute) => minute - shift),
+    minutes: shift === 0 ? stamps.minutes : stamps.minutes.map((minute) => minute - shift),
     offsetMinutes: stated ?? source.headerOffset ?? source.defaultOffsetMinutes,
     offsetFrom: stated !== undefined ? 'settings' : source.headerOffset !== undefined ? 'header' : 'site',
     clock: 'standard',

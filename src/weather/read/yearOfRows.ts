@@ -89,10 +89,11 @@ export function hasYear(placed: PlacedRows, wanted: number, findings: Findings):
  * 28 February is written in a leap year.
  */
 export function hasLeapDay({ minuteOfLeapYear }: PlacedRows, rows: Int32Array): boolean {
-  return rows.some((row) => {
+  for (const row of rows) {
     const minute = minuteOfLeapYear[row] as number;
-    return minute > LEAP_DAY_BEGIN && minute < LEAP_DAY_END;
-  });
+    if (minute > LEAP_DAY_BEGIN && minute < LEAP_DAY_END) return true;
+  }
+  return false;
 }
 
 /** Minute of the year of 365 or 366 days; in the former 29 February counts as 1 March. */

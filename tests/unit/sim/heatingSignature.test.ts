@@ -37,8 +37,8 @@ describe('a house of four periods, worked by hand', () => {
     expect(signature.degreesOfFreedom).toBe(1);
     expect(signature.rSquared).toBeCloseTo(1 - 6 / 4074.75, 12);
     expect(signature.cvRmse).toBeCloseTo(Math.sqrt(6) / 49.25, 12);
-    expect(signature.slopeErrorAtBase).toBeCloseTo(Math.sqrt(6 / 162.75), 12);
-    expect(signature.slopeError).toBeCloseTo(Math.sqrt(6 / 72), 12);
+    expect(signature.slopeError).toBeCloseTo(Math.sqrt(6 / 162.75), 12);
+    expect(signature.slopeErrorWithBase).toBeCloseTo(Math.sqrt(6 / 72), 12);
     // t for 95 % and one degree of freedom is tan(0.95·π/2).
     expect(signature.slopeMargin).toBeCloseTo(Math.tan(0.475 * Math.PI) * Math.sqrt(6 / 72), 9);
   });
@@ -64,7 +64,7 @@ describe('the weights of a signature', () => {
     expect(one.slope).toBeCloseTo(two.slope, 12);
     expect(one.rSquared).toBeCloseTo(two.rSquared, 12);
     // Heavier by days, but no further reading: two degrees of freedom against one.
-    expect(one.slopeErrorAtBase).toBeCloseTo(two.slopeErrorAtBase * Math.SQRT2, 12);
+    expect(one.slopeError).toBeCloseTo(two.slopeError * Math.SQRT2, 12);
   });
 });
 
@@ -128,9 +128,10 @@ describe('a signature is refused', () => {
 describe('heatLossOfSignature', () => {
   it('turns kWh a degree day into W/K', () => {
     // 4.8 kWh/(K·d) · 0.9 / 24 h = 0.18 kW/K.
-    const loss = heatLossOfSignature({ slope: 4.8, slopeError: 0.24, slopeMargin: 0.48 }, 0.9);
+    const loss = heatLossOfSignature({ slope: 4.8, slopeError: 0.2, slopeErrorWithBase: 0.24, slopeMargin: 0.48 }, 0.9);
     expect(loss.value).toBeCloseTo(180, 9);
-    expect(loss.standardError).toBeCloseTo(9, 9);
+    expect(loss.standardError).toBeCloseTo(7.5, 9);
+    expect(loss.standardErrorWithBase).toBeCloseTo(9, 9);
     expect(loss.low).toBeCloseTo(162, 9);
     expect(loss.high).toBeCloseTo(198, 9);
   });
