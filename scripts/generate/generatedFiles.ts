@@ -1,13 +1,18 @@
 import { readFileSync } from 'node:fs';
 import type * as z from 'zod';
+import { batchManifestSchema } from '../../src/report/batchManifest.ts';
+import { explainSchema } from '../../src/report/explainSchema.ts';
 import { resultSchema } from '../../src/report/resultSchema.ts';
 import { seasonSchema } from '../../src/report/seasonSchema.ts';
+import { tariffRankingSchema } from '../../src/report/tariffRankingSchema.ts';
+import { planSchema } from '../../src/scenario/planSchema.ts';
 import { readSchema } from '../../src/scenario/readSchema.ts';
 import { scenarioSchema } from '../../src/scenario/scenarioSchema.ts';
 import { tariffSchema } from '../../src/scenario/tariffSchema.ts';
 import { unitSchema } from '../../src/scenario/unitSchema.ts';
 import { editorSchema } from './editorSchema.ts';
 import { keyTables } from './keyTables.ts';
+import { readmeWithAnswer } from './readmeAnswer.ts';
 
 /** The structured kinds of files, in the order of the docs. */
 const kinds: readonly { name: string; title: string; schema: z.ZodObject }[] = [
@@ -15,6 +20,7 @@ const kinds: readonly { name: string; title: string; schema: z.ZodObject }[] = [
   { name: 'unit', title: 'A heat-pump unit for Winterledger', schema: unitSchema },
   { name: 'tariff', title: 'An electricity tariff for Winterledger', schema: tariffSchema },
   { name: 'read', title: 'How Winterledger reads a weather file', schema: readSchema },
+  { name: 'plan', title: 'A plan of a Winterledger batch', schema: planSchema },
 ];
 
 /** Documents that the program writes as JSON. */
@@ -23,6 +29,17 @@ const documents: readonly { name: string; title: string; schema: z.ZodObject }[]
     name: 'result',
     title: 'The result of a Winterledger scenario, as simulate --json writes it',
     schema: resultSchema,
+  },
+  {
+    name: 'tariff-ranking',
+    title: 'A Winterledger ranking of tariffs, as tariffs --json writes it',
+    schema: tariffRankingSchema,
+  },
+  { name: 'explain', title: 'One hour of a Winterledger year, as explain --json writes it', schema: explainSchema },
+  {
+    name: 'batch-manifest',
+    title: 'The manifest beside the results of a Winterledger batch',
+    schema: batchManifestSchema,
   },
   { name: 'season', title: 'A Winterledger label check, as season --json writes it', schema: seasonSchema },
 ];
@@ -46,6 +63,7 @@ export function generatedFiles(): Map<string, string> {
     ...tables.map(prose),
   ];
   files.set('docs/formats.md', sections.join('\n'));
+  files.set('README.md', readmeWithAnswer());
   return files;
 }
 

@@ -57,7 +57,7 @@ function rowsBelow(field: Field, path: string): Row[] {
   }
   if (schema instanceof z.ZodArray) {
     const item = bare(schema.def.element);
-    return item.schema instanceof z.ZodObject ? rowsBelow(item, `${path}[]`) : [];
+    return rowsBelow(item, `${path}[]`);
   }
   if (schema instanceof z.ZodUnion) return schema.options.flatMap((form) => rowsBelow(bare(form), path));
   return [];

@@ -1,4 +1,5 @@
 import type { Bill } from '../tariffs/bill.ts';
+import { taxedEnergy } from '../tariffs/taxedEnergy.ts';
 import type { FuelCost } from './fuel.ts';
 
 /** What a year of heating costs at today's prices, by how each part drifts; money, taxes in. */
@@ -31,9 +32,6 @@ export function annualTotal({ electricity, fuel, service }: CostParts): number {
 /**
  * What a system's electricity costs: the bill with it less the bill of the household alone, on the same tariff.
  *
- * The taxes that come on top are shared within each month between energy, standing and demand charges; where two suppliers
- * with different taxes meet within a month, that month's share is their mean.
- *
  * @param all the bill of household and system
  * @param household the bill of the household alone
  * @returns the difference, and of it the energy with the taxes on it; money, may be negative
@@ -44,15 +42,8 @@ export function annualTotal({ electricity, fuel, service }: CostParts): number {
 export function electricityCost(all: Bill, household: Bill): Pick<AnnualCost, 'electricity' | 'electricityEnergy'> {
   return {
     electricity: all.total - household.total,
-    electricityEnergy: energyWithTaxes(all) - energyWithTaxes(household),
+    electricityEnergy: taxedEnergy(all) - taxedEnergy(household),
   };
-}
-
-function energyWithTaxes({ monthly }: Bill): number {
-  return monthly.reduce((sum, { energy, standing, demand, taxes }) => {
-    const charged = energy + standing + demand;
-    return sum + energy * (1 + (charged === 0 ? 0 : taxes / charged));
-  }, 0);
 }
 
 /**

@@ -35,7 +35,9 @@ export interface BoilerYear {
   readonly service: number;
   /** Electricity on the household's bill by hour, kWh: the pump, and the heat where it is made on that tariff. */
   readonly electricity: Float64Array;
-  /** The pump's part of it, kWh a year. */
+  /** The pump's part of it by hour, kWh. */
+  readonly pump: Float64Array;
+  /** The same in the year, kWh. */
   readonly pumpElectricity: number;
   /** The heat's part of it, kWh a year; 0 where the boiler has a fuel of its own price. */
   readonly heatElectricity: number;
@@ -60,11 +62,13 @@ export function boilerYear(boiler: Boiler, need: BoilerNeed): BoilerYear {
   const { hotWaterEfficiency, pumpPower } = boiler;
   const forRooms = spaceHeatInput(boiler.efficiency, need.spaceHeat);
   const roomInput = sumOf(forRooms);
-  const pump = need.spaceHeat.map((heat) => (heat > 0 ? pumpPower : 0));
+  const pump = new Float64Array(need.spaceHeat.length);
+  for (let i = 0; i < pump.length; i++) if (need.spaceHeat[i] > 0) pump[i] = pumpPower;
   const input = roomInput + (need.hotWater + need.cylinderLoss) / hotWaterEfficiency;
   const fuel = pricedFuel(boiler.fuel);
   const common = {
     service: boiler.servicePerYear,
+    pump,
     pumpElectricity: sumOf(pump),
     meanSpaceHeatEfficiency: roomInput > 0 ? sumOf(need.spaceHeat) / roomInput : ('no heat' as const),
   };

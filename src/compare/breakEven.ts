@@ -25,6 +25,26 @@ export type BreakEvenPrice = number | 'no electricity' | 'not even free';
 export type BreakEvenFactor = number | 'no electricity' | 'no heat' | 'no price' | 'at no factor';
 
 /**
+ * Present mean price of the heat pump's kWh, with taxes and what it adds to standing and demand charges.
+ *
+ * @returns money/kWh
+ * @example meanElectricityPrice({ cost: { electricity: 900, fuel: 0, service: 100 }, electricity: 3000, heat: 9000 }) // 0.3
+ */
+export function meanElectricityPrice({ cost, electricity }: HeatPumpYear): number | 'no electricity' {
+  return electricity < LEAST_ELECTRICITY ? 'no electricity' : cost.electricity / electricity;
+}
+
+/**
+ * Present heat over electricity, with which the break-even factor compares: H4 where no fuel is burnt beside.
+ *
+ * @example heatOverElectricity({ cost: { electricity: 900, fuel: 0, service: 100 }, electricity: 3000, heat: 9000 }) // 3
+ */
+export function heatOverElectricity({ electricity, heat }: HeatPumpYear): number | 'no electricity' | 'no heat' {
+  if (heat <= 0) return 'no heat';
+  return electricity < LEAST_ELECTRICITY ? 'no electricity' : heat / electricity;
+}
+
+/**
  * Mean price of the heat pump's kWh at which the annual costs are equal; the boiler's cost, that of its pump included, and
  * the heat pump's fuel and service stay as they are.
  *
@@ -54,12 +74,11 @@ export function breakEvenPrice(heatPump: HeatPumpYear, boiler: CostParts): Break
  * Reference: MODEL section 12.
  */
 export function breakEvenFactor(heatPump: HeatPumpYear, boiler: CostParts): BreakEvenFactor {
-  const { cost, electricity, heat } = heatPump;
+  const { heat } = heatPump;
   if (heat <= 0) return 'no heat';
-  if (electricity < LEAST_ELECTRICITY) return 'no electricity';
-  const meanPrice = cost.electricity / electricity;
-  if (meanPrice <= 0) return 'no price';
-  const left = leftForElectricity(cost, boiler);
+  const meanPrice = meanElectricityPrice(heatPump);
+  if (meanPrice === 'no electricity' || meanPrice <= 0) return meanPrice === 'no electricity' ? meanPrice : 'no price';
+  const left = leftForElectricity(heatPump.cost, boiler);
   const factor = (heat * meanPrice) / left;
   return left > 0 && Number.isFinite(factor) ? factor : 'at no factor';
 }

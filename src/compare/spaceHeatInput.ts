@@ -27,9 +27,12 @@ export type SpaceHeatEfficiency = number | CondensingEfficiency;
  * water) and 12.
  */
 export function spaceHeatInput(efficiency: SpaceHeatEfficiency, need: Float64Array): Float64Array {
-  if (typeof efficiency === 'number') return need.map((heat) => heat / efficiency);
-  const { overReturn, flow: setting, designLoad } = efficiency;
   const input = new Float64Array(need.length);
+  if (typeof efficiency === 'number') {
+    for (let i = 0; i < need.length; i++) input[i] = need[i] / efficiency;
+    return input;
+  }
+  const { overReturn, flow: setting, designLoad } = efficiency;
   for (let i = 0; i < need.length; i++) {
     if (need[i] <= 0) continue;
     const load = need[i] / designLoad;

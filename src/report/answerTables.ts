@@ -6,15 +6,10 @@ import type { Words } from './words.ts';
 
 type Cost = ResultDocument['costs'][0];
 
-/** The tariffs side by side: what the bill is made of, the heating's part of it, the boiler and what is saved. */
-export function tariffTable(costs: readonly Cost[], words: Words): string {
+/** The tariffs side by side: what the bill is made of. */
+export function billTable(costs: readonly Cost[], words: Words): string {
   const { columns } = words;
-  const sameCurrency = new Set(costs.map(({ currency }) => currency)).size === 1;
-  const named = (heading: string, of: (cost: Cost) => number | undefined): Column => ({
-    heading,
-    figures: true,
-    cells: costs.map((cost) => cellOf(of(cost), sameCurrency ? '' : ` ${cost.currency}`)),
-  });
+  const named = columnOf(costs);
   const taxed = costs.some(({ taxes }) => taxes !== 0);
   const shown = [
     named(columns.energy, ({ energy }) => energy),
@@ -32,6 +27,16 @@ export function tariffTable(costs: readonly Cost[], words: Words): string {
       costs.some(({ credits }) => credits !== 0),
     ),
     named(columns.bill, ({ total }) => total),
+  ];
+  return table([namesOf(costs, words), ...shown]);
+}
+
+/** The tariffs side by side: the household's part of the bill, the heating's, the boiler and what is saved. */
+export function heatingTable(costs: readonly Cost[], words: Words): string {
+  const { columns } = words;
+  const named = columnOf(costs);
+  const shown = [
+    named(columns.household, ({ household }) => household.total),
     named(columns.heating, ({ systemTotal }) => systemTotal),
     ...whereAny(
       named(columns.boiler, ({ boilerTotal }) => boilerTotal),
@@ -42,8 +47,21 @@ export function tariffTable(costs: readonly Cost[], words: Words): string {
       costs[0].saving !== undefined,
     ),
   ];
-  const names = { heading: columns.tariff, figures: false, cells: costs.map(({ tariff }) => visibleText(tariff)) };
-  return table([names, ...shown]);
+  return table([namesOf(costs, words), ...shown]);
+}
+
+function namesOf(costs: readonly Cost[], { columns }: Words): Column {
+  return { heading: columns.tariff, figures: false, cells: costs.map(({ tariff }) => visibleText(tariff)) };
+}
+
+/** Columns of money; the currency stands in each cell only where the tariffs differ in it. */
+function columnOf(costs: readonly Cost[]) {
+  const sameCurrency = new Set(costs.map(({ currency }) => currency)).size === 1;
+  return (heading: string, of: (cost: Cost) => number | undefined): Column => ({
+    heading,
+    figures: true,
+    cells: costs.map((cost) => cellOf(of(cost), sameCurrency ? '' : ` ${cost.currency}`)),
+  });
 }
 
 function whereAny(column: Column, shown: boolean): Column[] {

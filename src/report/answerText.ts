@@ -1,6 +1,7 @@
 import { visibleText } from '../core/problem.ts';
 import { answerSentences } from './answerSentences.ts';
-import { monthTable, tariffTable } from './answerTables.ts';
+import { billTable, heatingTable, monthTable } from './answerTables.ts';
+import { comparisonSection } from './comparisonSection.ts';
 import { factor, figure, kWh } from './figures.ts';
 import { heading, wrapped } from './layout.ts';
 import type { ResultDocument } from './resultSchema.ts';
@@ -23,6 +24,7 @@ export function answerText(document: ResultDocument, words: Words = english): st
     [heading(visibleText(document.scenario)), wrapped(`${words.of}: ${visibleText(document.heatPumpUnit)}`)],
     [wrapped(answerSentences(document, words).join(' '))],
     costSection(document, words),
+    comparisonSection(document, words),
     [heading(words.headings.months), monthTable(document, words)],
     figureSection(document, words),
     warningSection(document, words),
@@ -39,14 +41,17 @@ function costSection({ costs }: ResultDocument, words: Words): string[] {
   if (costs.length === 0) return [];
   const currencies = new Set(costs.map(({ currency }) => currency));
   const title = currencies.size === 1 ? `${words.headings.costs}, ${costs[0].currency}` : words.headings.costs;
-  return [heading(title), tariffTable(costs, words), wrapped(words.costsNote)];
+  const household = costs[0].household.kWh;
+  const note = household > 0 ? words.billNote(kWh(household)) : words.billNoteAlone;
+  return [heading(title), billTable(costs, words), wrapped(note), heatingTable(costs, words), wrapped(words.costsNote)];
 }
 
-function figureSection({ annual, house }: ResultDocument, words: Words): string[] {
+function figureSection({ annual, house, fieldStudies }: ResultDocument, words: Words): string[] {
   const { h2, h3, h4 } = annual.seasonalFactor;
   const { heatLossPerArea, heatLoss, designLoad } = house;
   const sentences = [
     words.factors({ h2: factor(h2), h3: factor(h3), h4: factor(h4) }),
+    ...(h4 === 'no heat' ? [] : [words.fieldStudies(listOf(fieldStudies, words))]),
     words.house({ heatLoss: `${figure(heatLoss, 0)} W/K`, designLoad: `${figure(designLoad, 1)} kW` }),
     ...(typeof heatLossPerArea === 'number' ? [words.housePerArea(`${figure(heatLossPerArea, 2)} W/(m²·K)`)] : []),
     words.starts(figure(10 * Math.round(annual.starts / 10), 0)),
@@ -58,6 +63,16 @@ function figureSection({ annual, house }: ResultDocument, words: Words): string[
     sentences.push(words.hotWater({ asked: kWh(asked), short: kWh(short), loss: kWh(loss) }));
   }
   return sentences.map((sentence) => wrapped(sentence));
+}
+
+/** Factors of each place as their sources state them, with no more digits. */
+function listOf(studies: ResultDocument['fieldStudies'], words: Words): string {
+  const places = [...new Set(studies.map(({ place }) => place))];
+  const shown = places.map((place) => {
+    const factors = studies.filter((study) => study.place === place).map(({ factor }) => String(factor));
+    return words.fieldStudy({ place, factors: factors.join(', ') });
+  });
+  return shown.join(', ');
 }
 
 /** What to look at before signing; nothing where there is nothing. */

@@ -29,3 +29,28 @@ export function money(value: number, currency: string): string {
 export function factor(value: number | 'no heat'): string {
   return value === 'no heat' ? '–' : figure(value, 2);
 }
+
+const SIGNIFICANT = 6;
+const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
+
+/**
+ * A number with six significant digits, or fewer where fewer are all it has: enough to check a sum by hand.
+ *
+ * @param value any finite number
+ * @returns the text without a unit and without groups; a trailing zero says that digits were left out
+ * @example significant(2 / 3) // '0.666667'
+ */
+export function significant(value: number): string {
+  const size = Math.abs(value);
+  const rounded = size.toPrecision(SIGNIFICANT);
+  const text = Number(rounded) === size ? String(size) : rounded;
+  const [digits, exponent] = text.split('e');
+  return `${value < 0 ? '−' : ''}${digits}${exponent === undefined ? '' : `·10${superscript(exponent)}`}`;
+}
+
+function superscript(exponent: string): string {
+  return exponent
+    .replace('+', '')
+    .replace('-', '⁻')
+    .replace(/\d/g, (digit) => SUPERSCRIPTS[Number(digit)]);
+}

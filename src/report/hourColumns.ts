@@ -38,7 +38,7 @@ function weatherColumns({ plan: { weather } }: Answer): HourColumn[] {
 function priceColumns({ loaded }: Answer): HourColumn[] {
   const first = loaded.tariffs[0];
   if (first === undefined) return [];
-  const currency = first.tariff.currency ?? loaded.scenario.currency;
+  const currency = first.currency ?? loaded.scenario.currency;
   return [{ name: 'price', unit: `${currency}/kWh`, values: first.prepared.price }];
 }
 
@@ -52,6 +52,7 @@ function roomColumns({ columns: c, plan }: Answer): HourColumn[] {
     ...need,
     { name: 'unlimitedNeed', unit: 'kWh', values: c.unlimitedNeed },
     { name: 'indoorTemperature', unit: '°C', values: c.indoorTemperature },
+    { name: 'massTemperature', unit: '°C', values: c.massTemperature },
   ];
 }
 
@@ -82,7 +83,8 @@ function hotWaterColumns({ columns: c, plan }: Answer): HourColumn[] {
   ];
 }
 
-function inputColumns({ columns: c, plan }: Answer): HourColumn[] {
+function inputColumns({ columns: c, plan, loaded }: Answer): HourColumn[] {
+  const household = { name: 'householdElectricity', unit: 'kWh', values: loaded.household };
   const water = { name: 'heatPumpWaterElectricity', unit: 'kWh', values: c.heatPumpWaterElectricity };
   return [
     { name: 'heatPumpSpaceElectricity', unit: 'kWh', values: c.heatPumpSpaceElectricity },
@@ -91,6 +93,7 @@ function inputColumns({ columns: c, plan }: Answer): HourColumn[] {
     { name: 'standbyElectricity', unit: 'kWh', values: c.standbyElectricity },
     { name: 'crankcaseElectricity', unit: 'kWh', values: c.crankcaseElectricity },
     { name: 'electricity', unit: 'kWh', values: c.electricity },
+    ...(loaded.scenario.household === undefined ? [] : [household]),
     ...(plan.backup.isBoiler ? [{ name: 'fuel', unit: 'kWh', values: c.fuel }] : []),
   ];
 }

@@ -34,7 +34,8 @@ export function civilStamps(clock: CivilClock): string[] {
   return stamps;
 }
 
-function stamp(instant: number, offsetMinutes: number): string {
+/** An instant in ms since 1970-01-01T00:00Z as ISO 8601 in minutes, on a clock so many minutes ahead of UTC. */
+export function stamp(instant: number, offsetMinutes: number): string {
   const local = new Date(instant + offsetMinutes * MILLIS_PER_MINUTE).toISOString().slice(0, 16);
   const size = Math.abs(offsetMinutes);
   const two = (value: number) => String(value).padStart(2, '0');

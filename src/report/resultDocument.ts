@@ -1,8 +1,10 @@
 import type { BoilerYear } from '../compare/boiler.ts';
 import type { Answer, TariffCost } from '../scenario/answer/answer.ts';
+import { fieldStudies } from '../scenario/answer/fieldStudies.ts';
 import { seasonalFactors } from '../sim/seasonalFactors.ts';
 import type { EnergyTotals } from '../sim/totals.ts';
 import type { BillSums } from '../tariffs/bill.ts';
+import { comparisonDocument } from './comparisonDocument.ts';
 import type { ResultDocument } from './resultSchema.ts';
 import { weatherLines } from './weatherLines.ts';
 
@@ -44,8 +46,10 @@ export function resultDocument(answer: Answer, version: string): ResultDocument 
       month: i + 1,
       ...energiesOf(answer, month, answer.degreeDays.monthly[i]),
     })),
+    fieldStudies: fieldStudies.map((study) => ({ ...study })),
     costs: answer.costs.map(costOf),
     ...(boiler === undefined ? {} : { boiler: boilerOf(boiler, answer.costs[0]) }),
+    ...comparisonDocument(answer.comparison),
     carbon: carbon ?? { heatPump: 'not asked', boiler: 'not asked' },
     house: {
       heatLoss: answer.heatLoss,
@@ -131,16 +135,21 @@ function hotWaterOf(sums: EnergyTotals): NonNullable<ResultDocument['annual']['h
 }
 
 function costOf(cost: TariffCost): ResultDocument['costs'][0] {
-  const { bill, boilerCost, saving } = cost;
+  const { bill, householdBill, heating, boilerCost, saving } = cost;
   return {
     tariff: cost.tariff,
     file: cost.file,
     currency: cost.currency,
     pricesStated: cost.pricesStated,
+    taxesStated: cost.taxes,
     ...sumsOf(bill),
     byRate: { ...bill.byRate },
     byTax: { ...bill.byTax },
     monthly: bill.monthly.map(sumsOf),
+    household: { ...sumsOf(householdBill), byRate: { ...householdBill.byRate } },
+    systemElectricity: heating.electricity,
+    systemFuel: heating.fuel,
+    systemService: heating.service,
     systemTotal: cost.heatingCost,
     ...(boilerCost === undefined ? {} : { boilerTotal: boilerCost }),
     ...(saving === undefined ? {} : { saving }),
@@ -154,8 +163,6 @@ function sumsOf(sums: BillSums): BillSums {
 
 function boilerOf(boiler: BoilerYear, first: TariffCost | undefined): NonNullable<ResultDocument['boiler']> {
   const { cost, service } = boiler;
-  const withoutPump = cost.total + service;
-  const total = first?.boilerCost ?? withoutPump;
   return {
     fuel: boiler.fuel,
     fuelCost: cost.energy,
@@ -163,7 +170,9 @@ function boilerOf(boiler: BoilerYear, first: TariffCost | undefined): NonNullabl
     taxes: cost.taxes,
     service,
     pumpElectricity: boiler.pumpElectricity,
-    pumpCost: first === undefined ? 'no tariff' : total - withoutPump,
-    total,
+    heatElectricity: boiler.heatElectricity,
+    electricityCost: first?.boiler?.electricity ?? 'no tariff',
+    meanSpaceHeatEfficiency: boiler.meanSpaceHeatEfficiency,
+    total: first?.boilerCost ?? cost.total + service,
   };
 }

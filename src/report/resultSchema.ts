@@ -1,4 +1,6 @@
 import * as z from 'zod';
+import { costSchema } from './billSchema.ts';
+import { breakEvenSchema, sensitivitySchema, wholeLifeResultSchema } from './comparisonSchema.ts';
 
 const quantity = (says: string) => z.number().describe(says);
 const count = (says: string) => z.int().min(0).describe(says);
@@ -78,51 +80,23 @@ const annual = z
 
 const monthly = z.strictObject({ month: z.int().min(1).max(12), ...energies });
 
-const billSums = {
-  kWh: quantity('Electricity on the bill.'),
-  energy: quantity('Rates, series and blocks.'),
-  standing: quantity('Standing charges.'),
-  demand: quantity('Charge for the highest power.'),
-  taxes: quantity('Taxes that come on top.'),
-  taxesInside: quantity('Taxes inside the prices as stated: a part of the sums before.'),
-  credits: quantity('Fixed credits, positive.'),
-  total: quantity('energy + standing + demand + taxes − credits.'),
-};
-
-const cost = z.strictObject({
-  tariff: words('Name of the tariff.'),
-  file: words('Its file.'),
-  currency: words('Currency of all its sums.'),
-  pricesStated: z.enum(['withTax', 'withoutTax']).describe('Whether the prices of the file hold the taxes.'),
-  ...billSums,
-  byRate: z
-    .record(
-      z.string(),
-      z.strictObject({
-        kWh: quantity('Electricity in this rate.'),
-        hours: quantity('Hours of the year in which it holds.'),
-        cost: quantity('Energy cost, before taxes that come on top.'),
-      }),
-    )
-    .describe('By name of the rate; the costs add up to energy.'),
-  byTax: z.record(z.string(), z.number()).describe('Taxes by name.'),
-  monthly: z.array(z.strictObject(billSums)).length(12).describe('The same by civil month.'),
-  systemTotal: quantity('Running cost of the heating: bill less that of the household alone, and a hybrid’s fuel.'),
-  boilerTotal: quantity('Running cost of the boiler on this tariff; there only with a boiler.').optional(),
-  saving: quantity('boilerTotal − systemTotal; there only with a boiler.').optional(),
-});
-
 const boiler = z
   .strictObject({
-    fuel: quantity('Fuel for the same need, kWh on its calorific value.'),
+    fuel: quantity('Fuel for the same need, kWh on its calorific value; 0 where it heats by electricity of the bill.'),
     fuelCost: quantity('Its price, before taxes.'),
     standing: quantity('Standing charge of the fuel, before taxes.'),
     taxes: quantity('Taxes on both.'),
     service: quantity('Service.'),
     pumpElectricity: quantity('Electricity of its pump, kWh.'),
-    pumpCost: z
+    heatElectricity: quantity(
+      'Electricity of its heat where that is on the bill, kWh; 0 with a fuel of its own price.',
+    ),
+    electricityCost: z
       .union([z.number(), z.literal('no tariff')])
-      .describe('What its pump adds to the bill of the first tariff.'),
+      .describe('What pump and heat add to the household’s bill on the first tariff.'),
+    meanSpaceHeatEfficiency: z
+      .union([z.number(), z.literal('no heat')])
+      .describe('Space heat over what was taken for it, of the year.'),
     total: quantity('All of the above, in money.'),
   })
   .describe('The boiler that meets the whole need instead; there only when the scenario has one.');
@@ -138,8 +112,21 @@ export const resultSchema = z.strictObject({
   units: z.record(z.string(), z.string()).describe('Unit of every kind of figure in this document.'),
   annual,
   monthly: z.array(monthly).length(12).describe('Twelve months of standard time; energies in kWh.'),
-  costs: z.array(cost).describe('One entry a tariff, in the order of the scenario.'),
+  fieldStudies: z
+    .array(
+      z.strictObject({
+        place: words('Country of the homes.'),
+        factor: quantity('Seasonal factor that they showed.'),
+        what: words('Which homes, and which figure of them.'),
+        source: words('Where it is from.'),
+      }),
+    )
+    .describe('What homes have shown, to be set beside H4: ranges to think with, not targets.'),
+  costs: z.array(costSchema).describe('One entry a tariff, in the order of the scenario.'),
   boiler: boiler.optional(),
+  breakEven: breakEvenSchema.optional(),
+  sensitivity: sensitivitySchema.optional(),
+  wholeLife: wholeLifeResultSchema.optional(),
   carbon: z.strictObject({ heatPump: carbonMass, boiler: carbonMass }).describe('Carbon dioxide of the year, kg.'),
   house: z
     .strictObject({

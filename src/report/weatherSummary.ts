@@ -1,5 +1,5 @@
 import { visibleText } from '../core/problem.ts';
-import { offsetText } from '../weather/read/civilDays.ts';
+import { offsetText } from '../core/stampText.ts';
 import { figure } from './figures.ts';
 import { wrapped } from './layout.ts';
 import type { ResultDocument } from './resultSchema.ts';

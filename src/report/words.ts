@@ -13,6 +13,7 @@ export const english = {
   year: 'Year',
   headings: {
     costs: 'Cost of a year on each tariff',
+    comparison: (tariff: string) => `Against the boiler, on ${tariff}`,
     months: 'Month by month, kWh',
     warnings: 'Look at this before you sign',
     assumptions: 'Assumed, because no file says otherwise',
@@ -27,6 +28,7 @@ export const english = {
     taxes: 'Taxes',
     credits: 'Credits',
     bill: 'Bill',
+    household: 'Household alone',
     heating: 'Heating',
     boiler: 'Boiler',
     saving: 'Saved',
@@ -37,8 +39,10 @@ export const english = {
     electricity: 'Electricity',
     factor: 'H4',
   },
+  billNote: (household: string) => `The bill is that of the heating and of ${household} of the household together.`,
+  billNoteAlone: 'The bill is that of the heating alone: no electricity of a household is entered.',
   costsNote:
-    'Heating is the bill less what the household would pay on this tariff without it, with the fuel of a hybrid.',
+    'Heating is the bill less that of the household alone, with the fuel of a hybrid and the service entered for it.',
 
   use: ({ electricity, heat, factor }: Said) =>
     `In a year the heat pump and its backup would use ${electricity} for ${heat} of heat: a seasonal factor H4 of ${factor}, so each kWh bought gives ${factor} kWh of heat.`,
@@ -64,6 +68,26 @@ export const english = {
   dearer: ({ saving, tariff }: Said) => `, so on ${tariff} the heat pump costs ${saving} more.`,
   boilerAlone: (cost: string) => `The boiler for the same house would cost ${cost} a year.`,
 
+  breakEvenPrice: ({ price, now }: Said) =>
+    `A year costs the same on both where the heat pump’s electricity costs ${price} on the mean (now ${now})`,
+  breakEvenFactor: ({ factor, now }: Said) =>
+    `, or where each kWh of electricity gives ${factor} kWh of heat (now ${now}).`,
+  noBreakEvenFactor: '.',
+  notEvenFree: 'Even with free electricity a year with the heat pump would cost more than with the boiler.',
+  noElectricity: 'The heat pump takes no electricity, so no price of it would make both cost the same.',
+  wholeLife: ({ years, rate, capital, value }: Said) =>
+    `Over ${years} years at ${rate} a year: net capital ${capital}, net present value ${value}.`,
+  payback: ({ simple, discounted }: Said) => `Payback: simple ${simple}; discounted ${discounted}.`,
+  paybackYears: (years: string) => `after ${years} years`,
+  paybackAtOnce: 'at once, for there is no capital to be paid back',
+  paybackNever: { simple: 'never', discounted: (years: string) => `never within ${years} years` },
+  sensitivity: 'Saved in a year where a kWh costs more or less than now:',
+  sensitivityOverLife:
+    'Saved in a year where a kWh costs more or less than now, and behind the stroke the net present value:',
+  electricityAt: (change: string) => `electricity ${change}`,
+  fuelAt: (change: string) => `fuel ${change}`,
+  asNow: 'as now',
+
   carbon: (mass: string) => `It would emit ${mass} of carbon dioxide`,
   carbonOfBoiler: (mass: string) => `, the boiler ${mass}`,
   noCarbonFactor: 'Its carbon dioxide is not known: a carbon factor of the fuel is missing.',
@@ -76,6 +100,9 @@ export const english = {
     `Hot water: ${asked} asked, ${short} of it not delivered; the cylinder loses ${loss}.`,
   factors: ({ h2, h3, h4 }: Said) =>
     `Seasonal factors: H2 ${h2} (unit alone), H3 ${h3} (with backup), H4 ${h4} (with pump).`,
+  fieldStudies: (list: string) =>
+    `Field studies of homes found ${list}: ranges to think with, not targets. heatPump.inUseAllowance takes an allowance.`,
+  fieldStudy: ({ factors, place }: Said) => `${factors} (${place})`,
 
   degreeDays: {
     title: ({ base, method }: Said) =>

@@ -10,6 +10,7 @@ import { type LoadedScenario, scenarioOf } from './loadScenario.ts';
 import { tariffOf } from './loadTariff.ts';
 import { unitOf } from './loadUnit.ts';
 import { weatherFrom } from './loadWeather.ts';
+import { planSchema } from './planSchema.ts';
 import { readSchema } from './readSchema.ts';
 import { type FileKind, recogniseKind } from './recogniseKind.ts';
 import { textOf } from './yaml/textOf.ts';
@@ -79,6 +80,16 @@ const look: Record<FileKind, (file: { input: InputBytes; text: string; files: In
     const { entries, problems } = readEntries(input, readSchema);
     return { about: entries === undefined ? [] : ['settings for reading a weather file'], problems };
   },
+  plan: ({ input, files }) => {
+    const { yaml, entries, problems } = readEntries(input, planSchema);
+    if (yaml === undefined || entries === undefined) return { about: [], problems };
+    const { name, scenario, axes, homes } = entries.value;
+    const base = files.readNamed(scenario, 'scenario', { yaml, path: ['scenario'] });
+    const table = homes && files.readNamed(homes.file, 'homes', { yaml, path: ['homes', 'file'] });
+    const varied = axes.map((axis) => shown(axis.name)).join(', ');
+    const about = [`plan ${shown(name)}`, ...(varied === '' ? [] : [`varied: ${varied}`])];
+    return { about, problems: [...problems, ...base.problems, ...(table?.problems ?? [])] };
+  },
   weather: ({ input }) => {
     const { recognised, problems } = weatherFrom(input, {}, {});
     return { about: [...(recognised?.lines ?? [])], problems };
@@ -96,7 +107,7 @@ function aboutScenario(loaded: LoadedScenario): string[] {
   return [
     `scenario ${shown(scenario.name)}`,
     `unit ${shown(unit.unit.name)} in ${shown(unit.file)}`,
-    ...tariffs.map(({ file, tariff }) => `tariff ${shown(tariff.name)} in ${shown(file)}`),
+    ...tariffs.map(({ file, name }) => `tariff ${shown(name)} in ${shown(file)}`),
     ...weather.recognised.lines.map((line) => `${shown(weather.file)}: ${line}`),
     ...aboutDefaults(defaults),
   ];

@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { WEEKDAY_NAMES } from '../tariffs/civilDate.ts';
+import { WEEKDAY_NAMES } from '../core/civilDate.ts';
 
 /** Unit, usual range and a sentence of every number a file may hold, as the schemas, the docs and the page show them. */
 interface FieldText {

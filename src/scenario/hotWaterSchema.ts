@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { WEEKDAY_NAMES } from '../tariffs/civilDate.ts';
+import { WEEKDAY_NAMES } from '../core/civilDate.ts';
 import { number, temperature, timeOfDay, weekdays } from './fields.ts';
 
 const shares = z

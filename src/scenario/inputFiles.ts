@@ -1,10 +1,13 @@
 import type { Problem } from '../core/problem.ts';
 import { type EntryPath, pathText } from './entries/pathText.ts';
 import { type FileSource, type InputBytes, isProblem } from './fileSource.ts';
+import type { Kept } from './kept.ts';
 import type { YamlFile } from './yaml/yamlFile.ts';
 
 /** What an input file is for. */
-export type InputRole = 'scenario' | 'unit' | 'table' | 'weather' | 'tariff' | 'priceSeries' | 'read' | 'readings';
+export type InputRole =
+  | ('plan' | 'homes' | 'scenario' | 'unit' | 'table' | 'weather' | 'read' | 'readings')
+  | ('tariff' | 'priceSeries' | 'meter' | 'carbonFactors');
 
 /** A file that a result rests on. */
 export interface InputRecord {
@@ -16,11 +19,14 @@ export interface InputRecord {
 
 /** Reads the input files of one task and keeps the record of them. */
 export class InputFiles {
+  /** Where the scenarios of one batch keep what they have in common; absent for a scenario on its own. */
+  readonly kept: Kept | undefined;
   readonly #source: FileSource;
   readonly #records: InputRecord[] = [];
 
-  constructor(source: FileSource) {
+  constructor(source: FileSource, kept?: Kept) {
     this.#source = source;
+    this.kept = kept;
   }
 
   /** The files read so far, each once for every role. */
@@ -39,9 +45,10 @@ export class InputFiles {
     role: InputRole,
     by: { yaml: YamlFile; path: EntryPath },
   ): { input?: InputBytes; problems: Problem[] } {
-    const result = this.#source.read(name, by.yaml.file);
+    const owner = by.yaml.owner(by.path);
+    const result = this.#source.read(name, owner);
     if (!isProblem(result)) return this.#kept(result, role);
-    const hint = `named in ${by.yaml.file} under ${pathText(by.path)}`;
+    const hint = `named in ${owner} under ${pathText(by.path)}`;
     return { problems: [{ ...result, ...by.yaml.place(by.path), path: pathText(by.path), hint }] };
   }
 

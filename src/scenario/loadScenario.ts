@@ -1,22 +1,22 @@
 import { hasErrors, type Problem } from '../core/problem.ts';
 import { type CivilClock, civilClock } from '../tariffs/civilClock.ts';
-import type { PreparedTariff } from '../tariffs/preparedTariff.ts';
-import type { Tariff } from '../tariffs/tariff.ts';
 import type { Recognised } from '../weather/read/readWeather.ts';
 import type { WeatherSeries } from '../weather/series.ts';
 import { checkHouse } from './checks/checkHouse.ts';
 import { checkPlant } from './checks/checkPlant.ts';
-import { checkPrices } from './checks/checkPrices.ts';
 import { checkSchedules } from './checks/checkSchedules.ts';
 import { explainSetBack } from './checks/setBackNeedsMass.ts';
 import type { DefaultUsed } from './entries/defaultsUsed.ts';
 import { pathText } from './entries/pathText.ts';
-import { readEntries } from './entries/readEntries.ts';
+import { type EntriesResult, readEntries } from './entries/readEntries.ts';
 import type { FileSource, InputBytes } from './fileSource.ts';
 import { inFileOrder } from './inFileOrder.ts';
 import { InputFiles, type InputRecord } from './inputFiles.ts';
-import { prepared, type ReadTariff, tariffOf } from './loadTariff.ts';
-import { type LoadedUnit, unitOf } from './loadUnit.ts';
+import { KeptKind } from './kept.ts';
+import type { ElectricityCarbon } from './loadCarbon.ts';
+import { moneyOf } from './loadMoney.ts';
+import type { LoadedTariff } from './loadTariffs.ts';
+import { type LoadedUnit, type UnitResult, unitOf } from './loadUnit.ts';
 import { weatherOf } from './loadWeather.ts';
 import { type Scenario, scenarioSchema } from './scenarioSchema.ts';
 import type { YamlFile } from './yaml/yamlFile.ts';
@@ -29,7 +29,11 @@ export interface LoadedScenario {
   readonly weather: { readonly file: string; readonly series: WeatherSeries; readonly recognised: Recognised };
   readonly clock: CivilClock;
   /** In the order of the scenario; the first is the present one. */
-  readonly tariffs: readonly { readonly file: string; readonly tariff: Tariff; readonly prepared: PreparedTariff }[];
+  readonly tariffs: readonly LoadedTariff[];
+  /** Electricity of the household without the heating, kWh a step. */
+  readonly household: Float64Array;
+  /** Absent where no carbon factor of electricity is entered. */
+  readonly carbon?: ElectricityCarbon;
   readonly defaults: readonly DefaultUsed[];
   readonly inputs: readonly InputRecord[];
 }
@@ -39,57 +43,71 @@ export interface LoadedScenario {
  *
  * @param name of the scenario file, as the user gives it
  * @param source where files come from
+ * @param further tariff files to compare beside those of the scenario, as the user gives them
  * @returns the scenario, unless a problem is an error; warnings come beside it
  */
-export function loadScenario(name: string, source: FileSource): { loaded?: LoadedScenario; problems: Problem[] } {
+export function loadScenario(
+  name: string,
+  source: FileSource,
+  further: readonly string[] = [],
+): { loaded?: LoadedScenario; problems: Problem[] } {
   const files = new InputFiles(source);
   const read = files.read(name, 'scenario');
   if (read.input === undefined) return { problems: read.problems };
-  const result = scenarioOf(read.input, files);
+  const result = scenarioOf(read.input, files, further);
   return { ...result, problems: inFileOrder(result.problems) };
 }
 
 /** Loads a scenario from its bytes. */
-export function scenarioOf(input: InputBytes, files: InputFiles): { loaded?: LoadedScenario; problems: Problem[] } {
-  const own = readEntries(input, scenarioSchema);
+export function scenarioOf(
+  input: InputBytes,
+  files: InputFiles,
+  further: readonly string[] = [],
+): { loaded?: LoadedScenario; problems: Problem[] } {
+  return scenarioFrom(readEntries(input, scenarioSchema), files, further);
+}
+
+/** Loads a scenario that is held against its schema already, whatever its values were made of. */
+export function scenarioFrom(
+  own: EntriesResult<Scenario>,
+  files: InputFiles,
+  further: readonly string[] = [],
+): { loaded?: LoadedScenario; problems: Problem[] } {
   if (own.yaml === undefined) return { problems: own.problems };
   const { yaml } = own;
   if (own.entries === undefined) return { problems: explainSetBack(yaml, own.problems) };
   const scenario = own.entries.value;
   const weather = weatherOf(yaml, scenario, files);
   const unit = namedUnit(yaml, scenario, files);
-  const tariffs = namedTariffs(yaml, scenario, files);
-  const present = tariffs.read[0];
-  const clock = clockOf(yaml, scenario, weather.read?.series);
-  const laid = clock.clock === undefined ? [] : layTariffs(tariffs.read, clock.clock);
+  const clock = clockOf(yaml, scenario, weather.read?.series, files);
+  const money = moneyOf(yaml, scenario, files, { clock: clock.clock, further });
   const problems = [
     ...own.problems,
     ...checkHouse(yaml, scenario.house),
     ...checkPlant(yaml, scenario),
-    ...checkSchedules(yaml, scenario, present?.tariff),
-    ...checkPrices(yaml, scenario, tariffs.read, laid[0]?.prepared),
+    ...checkSchedules(yaml, scenario, money.presentRates),
     ...unit.problems,
     ...weather.problems,
     ...sunWithoutRadiation(yaml, scenario, weather.read),
     ...clock.problems,
-    ...tariffs.problems,
-    ...laid.flatMap((each) => each.problems),
+    ...money.problems,
   ];
-  if (hasErrors(problems) || unit.loaded === undefined || weather.read === undefined || clock.clock === undefined) {
-    return { problems };
-  }
+  if (hasErrors(problems) || unit.loaded === undefined || weather.read === undefined) return { problems };
+  if (clock.clock === undefined || money.household === undefined) return { problems };
   const loaded: LoadedScenario = {
-    file: input.name,
+    file: yaml.file,
     scenario,
     unit: unit.loaded,
     weather: weather.read,
     clock: clock.clock,
-    tariffs: laid.flatMap(({ file, tariff, prepared: made }) => (made ? [{ file, tariff, prepared: made }] : [])),
+    tariffs: money.tariffs,
+    household: money.household,
+    ...(money.carbon === undefined ? {} : { carbon: money.carbon }),
     // the label is held against the map by a command of its own; no simulated year rests on it
     defaults: [
       ...usedBeside(own.entries.defaults, weather.read.series),
       ...unit.defaults.filter(({ path }) => !path.startsWith('label.')),
-      ...tariffs.defaults,
+      ...money.defaults,
     ],
     inputs: files.records,
   };
@@ -105,41 +123,26 @@ function usedBeside(defaults: readonly DefaultUsed[], series: WeatherSeries): De
   return defaults.filter(({ path }) => !idle.has(path));
 }
 
+/** Units and civil clocks of a batch: more than these in turn are rare, and each unit holds its tables. */
+const units = new KeptKind<UnitResult>(64);
+const clocks = new KeptKind<ReturnType<typeof civilClock>>(16);
+
 function namedUnit(yaml: YamlFile, scenario: Scenario, files: InputFiles) {
   const read = files.readNamed(scenario.heatPump.unit, 'unit', { yaml, path: ['heatPump', 'unit'] });
   if (read.input === undefined) return { loaded: undefined, defaults: [], problems: read.problems };
-  return { loaded: undefined, ...unitOf(read.input, files) };
-}
-
-function namedTariffs(yaml: YamlFile, scenario: Scenario, files: InputFiles) {
-  const results = scenario.tariffs.map((name, i) => {
-    const named = files.readNamed(name, 'tariff', { yaml, path: ['tariffs', i] });
-    if (named.input === undefined) return { defaults: [], problems: named.problems };
-    return tariffOf(named.input, scenario.site.zone, files);
-  });
-  return {
-    /** In the scenario's order, those with errors left out as undefined. */
-    read: results.map((result) => ('read' in result ? result.read : undefined)),
-    defaults: results.flatMap((result) => result.defaults),
-    problems: results.flatMap((result) => result.problems),
-  };
-}
-
-function layTariffs(tariffs: readonly (ReadTariff | undefined)[], clock: CivilClock) {
-  return tariffs.flatMap((read) => {
-    if (read === undefined) return [];
-    return [{ file: read.yaml.file, tariff: read.tariff, ...prepared(read, clock) }];
-  });
+  const { input } = read;
+  return { loaded: undefined, ...units.of(files.kept, input.name, () => unitOf(input, files)) };
 }
 
 /** Civil time of the year; without the weather, that of 8760 hours in UTC, so that zone and tariffs are checked all the same. */
-function clockOf(yaml: YamlFile, scenario: Scenario, series: WeatherSeries | undefined) {
+function clockOf(yaml: YamlFile, scenario: Scenario, series: WeatherSeries | undefined, files: InputFiles) {
   const { zone, calendarYear } = scenario.site;
   const { hours, offsetMinutes } = series ?? { hours: 8760, offsetMinutes: 0 };
-  const { clock, problem } = civilClock({ hours, offsetMinutes, zone, calendarYear });
+  const asked = { hours, offsetMinutes, zone, calendarYear };
+  const { clock, problem } = clocks.of(files.kept, JSON.stringify(asked), () => civilClock(asked));
   if (problem === undefined) return { clock, problems: [] };
   const path = ['site', problem.path === 'zone' ? 'zone' : 'calendarYear'];
-  const place = { file: yaml.file, ...yaml.place(path), path: pathText(path) };
+  const place = { file: yaml.owner(path), ...yaml.place(path), path: pathText(path) };
   return { clock: undefined, problems: [{ ...problem, ...place }] };
 }
 

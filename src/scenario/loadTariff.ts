@@ -18,6 +18,8 @@ export interface ReadTariff {
   readonly yaml: YamlFile;
   readonly tariff: Tariff;
   readonly series?: PriceSeries;
+  /** SHA-256 of its bytes and of its series': two tariffs of one fingerprint are the same. */
+  readonly fingerprint: string;
 }
 
 /** A tariff unless a problem is an error, and the defaults used in it. */
@@ -39,7 +41,7 @@ export function tariffOf(input: InputBytes, zone: string, files: InputFiles): Ta
   if (yaml === undefined || entries === undefined) return { defaults: [], problems };
   const tariff: Tariff = entries.value;
   const { defaults } = entries;
-  if (tariff.series === undefined) return { read: { yaml, tariff }, defaults, problems };
+  if (tariff.series === undefined) return { read: { yaml, tariff, fingerprint: input.sha256 }, defaults, problems };
   const named = files.readNamed(tariff.series.file, 'priceSeries', { yaml, path: ['series', 'file'] });
   if (named.input === undefined) return { defaults, problems: [...problems, ...named.problems] };
   const { text, problems: textProblems } = textOf(named.input);
@@ -47,7 +49,8 @@ export function tariffOf(input: InputBytes, zone: string, files: InputFiles): Ta
   const made = readPriceSeries({ text, file: named.input.name, settings: tariff.series, zone });
   const found = [...problems, ...made.problems];
   if (made.series === undefined || hasErrors(found)) return { defaults, problems: found };
-  return { read: { yaml, tariff, series: made.series }, defaults, problems: found };
+  const fingerprint = `${input.sha256} ${named.input.sha256}`;
+  return { read: { yaml, tariff, series: made.series, fingerprint }, defaults, problems: found };
 }
 
 /** Lays a tariff on a year; problems get the places of its file. */

@@ -1,6 +1,6 @@
+import { dayNumber, MINUTES_PER_DAY } from '../core/civilDate.ts';
 import type { Problem } from '../core/problem.ts';
-import { dayNumber } from '../tariffs/civilDate.ts';
-import { zoneOffsets } from '../tariffs/zoneOffsets.ts';
+import { zoneOffsets } from '../core/zoneOffsets.ts';
 import { type Recognised, readWeather } from '../weather/read/readWeather.ts';
 import type { ReadSettings } from '../weather/readSettings.ts';
 import type { WeatherSeries } from '../weather/series.ts';
@@ -8,12 +8,11 @@ import type { DefaultUsed } from './entries/defaultsUsed.ts';
 import { readEntries } from './entries/readEntries.ts';
 import type { FileSource, InputBytes } from './fileSource.ts';
 import { InputFiles } from './inputFiles.ts';
+import { KeptKind } from './kept.ts';
 import { readSchema } from './readSchema.ts';
 import type { Scenario } from './scenarioSchema.ts';
 import { textOf } from './yaml/textOf.ts';
 import type { YamlFile } from './yaml/yamlFile.ts';
-
-const MINUTES_PER_DAY = 1440;
 
 /** A weather file read, and how it was understood. */
 export interface ReadWeather {
@@ -55,16 +54,26 @@ export function weatherFrom(
   return { read: { file: input.name, series, recognised }, recognised, problems };
 }
 
+/** What came of reading a weather file. */
+export type WeatherResult = ReturnType<typeof weatherFrom>;
+
+/** Weather files of a batch; each holds a year in a few columns. */
+export const weathers = new KeptKind<WeatherResult>(64);
+
 /** Reads the weather file that a scenario names. */
 export function weatherOf(
   yaml: YamlFile,
   scenario: Scenario,
   files: InputFiles,
 ): { read?: ReadWeather; problems: Problem[] } {
-  const { weather, site } = scenario;
+  const { weather } = scenario;
+  const { zone, altitude, calendarYear } = scenario.site;
+  const site = { zone, altitude, calendarYear };
   const named = files.readNamed(weather.file, 'weather', { yaml, path: ['weather', 'file'] });
   if (named.input === undefined) return { problems: named.problems };
-  return weatherFrom(named.input, weather.read ?? {}, site);
+  const { input } = named;
+  const key = JSON.stringify([input.name, weather.read, site]);
+  return weathers.of(files.kept, key, () => weatherFrom(input, weather.read ?? {}, site));
 }
 
 /** Offset of a zone's standard time from UTC, minutes: the least of a year, summer time lying ahead of it. */

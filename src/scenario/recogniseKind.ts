@@ -1,17 +1,19 @@
 import type * as z from 'zod';
+import { planSchema } from './planSchema.ts';
 import { readSchema } from './readSchema.ts';
 import { scenarioSchema } from './scenarioSchema.ts';
 import { tariffSchema } from './tariffSchema.ts';
 import { unitSchema } from './unitSchema.ts';
 
 /** Kinds of input files. */
-export type FileKind = 'scenario' | 'unit' | 'tariff' | 'read' | 'weather' | 'priceSeries';
+export type FileKind = 'scenario' | 'unit' | 'tariff' | 'read' | 'plan' | 'weather' | 'priceSeries';
 
 const structured: readonly { kind: FileKind; schema: z.ZodObject }[] = [
   { kind: 'scenario', schema: scenarioSchema },
   { kind: 'unit', schema: unitSchema },
   { kind: 'tariff', schema: tariffSchema },
   { kind: 'read', schema: readSchema },
+  { kind: 'plan', schema: planSchema },
 ];
 
 /** Words in the header of a table of prices, in the languages of most such files. */

@@ -1,12 +1,16 @@
 import * as z from 'zod';
 import { backupSchema } from './backupSchema.ts';
 import { boilerSchema } from './boilerSchema.ts';
+import { carbonSchema } from './carbonSchema.ts';
 import { fileName, number, text } from './fields.ts';
 import { readingsSchema } from './fitSchema.ts';
 import { hotWaterSchema } from './hotWaterSchema.ts';
+import { householdSchema } from './householdSchema.ts';
 import { houseSchema } from './houseSchema.ts';
 import { circulationSchema, flowTemperatureSchema, heatPumpSchema } from './plantSchema.ts';
 import { readSchema } from './readSchema.ts';
+import { tariffListSchema } from './tariffListSchema.ts';
+import { wholeLifeSchema } from './wholeLifeSchema.ts';
 
 const site = z.strictObject({
   zone: text('Civil time zone of the house, a name of the IANA database such as Europe/Berlin.', 60),
@@ -27,12 +31,6 @@ const weather = z.strictObject({
   relativeHumidity: number(0, 100, { says: 'Constant used where the file has no humidity.', unit: '%' }).default(85),
 });
 
-const carbon = z
-  .strictObject({
-    electricity: number(0, 5, { says: 'Carbon of one kWh of electricity.', unit: 'kg/kWh', usual: '0.02–0.6' }),
-  })
-  .describe('Carbon factors; leave the section out to have none computed.');
-
 /** One house: the file an assessor writes. */
 export const scenarioSchema = z.strictObject({
   name: text('Name of the house or of the option.'),
@@ -51,13 +49,11 @@ export const scenarioSchema = z.strictObject({
   heatPump: heatPumpSchema.describe('The heat pump, and how it may run.'),
   backup: backupSchema.optional(),
   hotWater: hotWaterSchema.describe('Hot water from the same unit.').optional(),
-  tariffs: z
-    .array(fileName('A tariff file.'))
-    .max(50)
-    .describe('Electricity tariffs to compare; the first is the present one.')
-    .default([]),
+  household: householdSchema.optional(),
+  tariffs: tariffListSchema,
   boiler: boilerSchema.describe('The boiler that would be kept or bought instead.').optional(),
-  carbon: carbon.optional(),
+  carbon: carbonSchema.optional(),
+  wholeLife: wholeLifeSchema.optional(),
   readings: readingsSchema.optional(),
 });
 

@@ -1,7 +1,7 @@
+import { DAYS_OF_MONTH, dayNumber, isLeapYear, MINUTES_PER_DAY, weekdayOf } from '../core/civilDate.ts';
 import { HOURS_OF_COMMON_YEAR, HOURS_OF_LEAP_YEAR, HOURS_PER_DAY } from '../core/constants.ts';
 import { type Problem, shown } from '../core/problem.ts';
-import { DAYS_OF_MONTH, dayNumber, isLeapYear, weekdayOf } from './civilDate.ts';
-import { type OffsetSpan, zoneOffsets } from './zoneOffsets.ts';
+import { type OffsetSpan, zoneOffsets } from '../core/zoneOffsets.ts';
 
 /**
  * Minutes of one civil date that follow one another without a change of the clocks. Minutes are counted in the series:
@@ -63,7 +63,6 @@ export interface CivilClockInput {
   readonly calendarYear: number;
 }
 
-const MINUTES_PER_DAY = 1440;
 const MILLIS_PER_MINUTE = 60_000;
 const FIRST_YEAR = 1970;
 const LAST_YEAR = 2100;

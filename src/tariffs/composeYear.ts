@@ -1,6 +1,6 @@
+import { writtenDate } from '../core/civilDate.ts';
 import { hasErrors, type Problem, shown } from '../core/problem.ts';
 import { type CivilClock, daysOfYear } from './civilClock.ts';
-import { writtenDate } from './civilDate.ts';
 import type { PreparedTariff } from './preparedTariff.ts';
 import { type PricedTariff, prepareParts } from './prepareTariff.ts';
 

@@ -28,7 +28,7 @@ export function dayShares(clock: CivilClock, days: DayRange): DayShares {
  * month and the charge per year are shared out by days.
  *
  * @returns 12 sums of money, before tax
- * @example 365 days at 0.50 a day, 10 a month and 24 a year: 182.50 + 120 + 24 = 326.50 in all
+ * @example standingOfMonths({ perDay: 0.5, perMonth: 10, perYear: 24 }, { daysOfMonth: Float64Array.of(31), shareOfMonth: Float64Array.of(1), shareOfYear: 31 / 365 }, 365)[0] // 31·0.50 + 10 + 24·31/365 = 27.538
  */
 export function standingOfMonths(standing: Tariff['standing'], shares: DayShares, yearDays: number): Float64Array {
   const { perDay = 0, perMonth = 0, perYear = 0 } = standing ?? {};

@@ -1,13 +1,15 @@
+import { MINUTES_PER_DAY } from '../core/civilDate.ts';
 import { hasErrors, type Problem } from '../core/problem.ts';
 import { blockProblems } from './blockPrices.ts';
 import { type CivilClock, daysOfYear } from './civilClock.ts';
-import { dateText, timeText } from './civilDate.ts';
 import { creditsOfMonths, dayShares, standingOfMonths } from './fixedCharges.ts';
 import type { PreparedPart, PreparedTariff } from './preparedTariff.ts';
 import { layPrices, type PriceColumns } from './priceLayout.ts';
 import { holidayNumbers, type RateRule, rateRules } from './rateRules.ts';
 import { type DayRange, type RateSlice, rateSlices } from './rateSlices.ts';
-import { type SeriesPrices, seriesPrices } from './seriesPrices.ts';
+import { PRICES } from './readPriceSeries.ts';
+import { type SeriesMeans, seriesMeans } from './seriesMeans.ts';
+import { seriesReach } from './seriesReach.ts';
 import type { PriceSeries, Tariff } from './tariff.ts';
 
 /** A tariff with its price series, where it has one. */
@@ -19,10 +21,6 @@ export interface PricedTariff {
   /** What `tariff.series` names, read. */
   readonly series?: PriceSeries | undefined;
 }
-
-/** Hours that the offset of the weather may differ from the zone's before a borrowed price tells of a wrong year. */
-const BORROWED_HOURS_WITHOUT_WARNING = 24;
-const MINUTES_PER_DAY = 1440;
 
 /**
  * Lays a tariff on a year: prices as means over the minutes of each step, and the charges of each civil month
@@ -57,9 +55,11 @@ export function prepareParts(
     hoursOfRate: new Float64Array(rateNames.length),
   };
   const made = parts.map((part, i) => {
-    const series = part.tariff.series && part.series && seriesPrices(clock, part.series);
-    const prepared = partOf({ ...part, ...laid[i], seriesPrices: series, rateNames }, clock, columns);
-    if (part.series && series) problems.push(...seriesProblems(part.series, series));
+    const read = part.tariff.series && part.series;
+    const series = read && { ...read, values: read.prices };
+    const means = series && seriesMeans(clock, series);
+    const prepared = partOf({ ...part, ...laid[i], seriesPrices: means, rateNames }, clock, columns);
+    if (series && means) problems.push(...seriesReach(series, means, PRICES));
     return prepared;
   });
   if (hasErrors(problems)) return { problems };
@@ -114,7 +114,7 @@ interface PartInput extends PricedTariff {
   readonly days: DayRange;
   readonly rules: readonly RateRule[];
   readonly slices: readonly RateSlice[];
-  readonly seriesPrices: SeriesPrices | undefined;
+  readonly seriesPrices: SeriesMeans | undefined;
   readonly rateNames: readonly string[];
 }
 
@@ -139,24 +139,4 @@ function partOf(input: PartInput, clock: CivilClock, columns: PriceColumns): Pre
     credits: creditsOfMonths(tariff.credits, shares, daysOfYear(clock)),
     demandPrice: tariff.demand?.perKW ?? 0,
   };
-}
-
-function seriesProblems(series: PriceSeries, prices: SeriesPrices): Problem[] {
-  const { file } = series;
-  const missing = prices.firstMissing();
-  if (missing !== undefined) {
-    return [{ code: 'tariff.series-short', severity: 'error', file, found: utcText(missing) }];
-  }
-  const hours = prices.borrowedMinutes() / 60;
-  if (hours <= BORROWED_HOURS_WITHOUT_WARNING) return [];
-  const end = series.startMinute + series.prices.length * series.stepMinutes;
-  const allowed = `${utcText(series.startMinute)} to ${utcText(end)}`;
-  return [{ code: 'tariff.series-of-other-year', severity: 'warning', file, found: String(hours), allowed }];
-}
-
-/** An instant as a stamp in UTC. */
-function utcText(minute: number): string {
-  const date = new Date(minute * 60_000);
-  const day = dateText(date.getUTCFullYear(), date.getUTCMonth() + 1, date.getUTCDate());
-  return `${day}T${timeText(date.getUTCHours() * 60 + date.getUTCMinutes())}Z`;
 }

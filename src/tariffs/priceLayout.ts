@@ -1,6 +1,6 @@
 import type { PreparedPart } from './preparedTariff.ts';
 import type { RateSlice } from './rateSlices.ts';
-import type { SeriesPrices } from './seriesPrices.ts';
+import type { SeriesMeans } from './seriesMeans.ts';
 
 /** Columns of the year that the parts of a tariff fill together. */
 export interface PriceColumns {
@@ -15,7 +15,7 @@ export interface LayoutInput {
   /** Money per kWh, and the rate, of each rule. */
   readonly rulePrice: Float64Array;
   readonly rateOfRule: Uint8Array;
-  readonly series?: SeriesPrices | undefined;
+  readonly series?: SeriesMeans | undefined;
   /** What taxes on top make of a price: 1 + their shares. */
   readonly taxFactor: number;
 }

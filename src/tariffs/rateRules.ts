@@ -1,6 +1,6 @@
+import { dayNumber, MINUTES_PER_DAY, minuteOfDay, WEEKDAY_NAMES, writtenDate } from '../core/civilDate.ts';
 import { type Problem, shown } from '../core/problem.ts';
 import type { CivilClock, DayStretch } from './civilClock.ts';
-import { dayNumber, minuteOfDay, WEEKDAY_NAMES, writtenDate } from './civilDate.ts';
 import type { Rate, Tariff } from './tariff.ts';
 
 /** A rate made ready for comparing. */
@@ -18,8 +18,6 @@ export interface RateRule {
   readonly season?: { readonly from: number; readonly to: number };
   readonly holidays?: Rate['holidays'];
 }
-
-const MINUTES_PER_DAY = 1440;
 
 /**
  * Makes the rates of a tariff ready, and says what is wrong with their times and dates.

@@ -1,5 +1,6 @@
+import { dayNumber, MINUTES_PER_DAY, WEEKDAY_NAMES } from '../core/civilDate.ts';
+import { dateText, timeText } from '../core/stampText.ts';
 import type { CivilClock, DayStretch } from './civilClock.ts';
-import { dateText, dayNumber, timeText, WEEKDAY_NAMES } from './civilDate.ts';
 import { holdsOnDay, type RateRule } from './rateRules.ts';
 
 /** Minutes that follow one another in the series and have one month and one rule. */
@@ -25,7 +26,6 @@ export interface RateSlices {
   readonly unpriced?: { readonly first: string; readonly minutes: number };
 }
 
-const MINUTES_PER_DAY = 1440;
 const NO_RULE = -1;
 
 /**

@@ -9,7 +9,7 @@ export interface SeriesFaults {
   list(): Problem[];
 }
 
-/** Collects the faults of a price file; a fault in every line must not fill the screen, so only twenty are shown. */
+/** Collects the faults of a file of values over time; a fault in every line must not fill the screen, so only twenty are shown. */
 export function seriesFaults(file: string): SeriesFaults {
   const shownFaults: Problem[] = [];
   let further = 0;
@@ -20,7 +20,7 @@ export function seriesFaults(file: string): SeriesFaults {
     },
     list() {
       if (further === 0) return shownFaults;
-      return [...shownFaults, { code: 'tariff.series-more', severity: 'error', file, found: String(further) }];
+      return [...shownFaults, { code: 'series.more', severity: 'error', file, found: String(further) }];
     },
   };
 }

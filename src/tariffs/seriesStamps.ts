@@ -1,5 +1,5 @@
-import { dayNumber, writtenDate } from './civilDate.ts';
-import type { OffsetSpan } from './zoneOffsets.ts';
+import { dayNumber, writtenDate } from '../core/civilDate.ts';
+import type { OffsetSpan } from '../core/zoneOffsets.ts';
 
 /** A stamp as written. */
 export interface Stamp {

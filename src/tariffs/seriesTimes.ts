@@ -1,11 +1,11 @@
+import { MINUTES_PER_DAY } from '../core/civilDate.ts';
 import { shown } from '../core/problem.ts';
+import { type OffsetSpan, zoneOffsets } from '../core/zoneOffsets.ts';
 import type { SeriesFaults } from './seriesFaults.ts';
 import { instantsOf, readStamp, type Stamp } from './seriesStamps.ts';
 import type { SeriesTable } from './seriesTable.ts';
-import type { PriceSeriesSettings } from './tariff.ts';
-import { type OffsetSpan, zoneOffsets } from './zoneOffsets.ts';
+import type { SeriesKind, SeriesSettings } from './timeSeries.ts';
 
-const MINUTES_PER_DAY = 1440;
 const LONGEST_STEP = 60;
 
 const ALLOWED_STAMP = {
@@ -15,7 +15,7 @@ const ALLOWED_STAMP = {
 } as const;
 
 /**
- * The instants of a price file's rows. In local time the clock that is put back shows an hour twice: the first row of
+ * The instants of the rows of a file. In local time the clock that is put back shows an hour twice: the first row of
  * that hour is taken for its first pass, and a row that would not be later than the one before for its second.
  *
  * @param faults takes the stamps that cannot be read
@@ -23,7 +23,7 @@ const ALLOWED_STAMP = {
  */
 export function instantsOfRows(
   table: SeriesTable,
-  { stamps: kind }: PriceSeriesSettings,
+  { stamps: kind }: SeriesSettings,
   zone: string,
   faults: SeriesFaults,
 ): (number | undefined)[] {
@@ -34,7 +34,7 @@ export function instantsOfRows(
     const row = table.rows[i];
     const place = () => ({ ...table.placeOf(row, 'time'), found: shown(row.time === '' ? 'an empty cell' : row.time) });
     if (!stamp || (stamp.offsetMinutes === undefined && kind === 'withOffset')) {
-      faults.add({ code: 'tariff.series-stamp', ...place(), allowed: ALLOWED_STAMP[kind] });
+      faults.add({ code: 'series.stamp', ...place(), allowed: ALLOWED_STAMP[kind] });
       return undefined;
     }
     if (stamp.offsetMinutes !== undefined || kind !== 'local') {
@@ -43,7 +43,7 @@ export function instantsOfRows(
     }
     const instants = instantsOf(stamp.clockMinute, spans);
     if (instants.length === 0) {
-      faults.add({ code: 'tariff.series-no-such-time', ...place(), allowed: zone });
+      faults.add({ code: 'series.no-such-time', ...place(), allowed: zone });
       return undefined;
     }
     before = instants.find((instant) => instant > before) ?? instants[0];
@@ -73,13 +73,14 @@ function spansAround(stamps: readonly (Stamp | undefined)[], zone: string): Offs
  */
 export function stepOfRows(
   instants: readonly (number | undefined)[],
-  table: SeriesTable,
+  { table, kind }: { readonly table: SeriesTable; readonly kind: SeriesKind },
   faults: SeriesFaults,
 ): number | undefined {
+  const unit = kind.many;
   const step = commonDistance(instants) ?? LONGEST_STEP;
   if (step > LONGEST_STEP) {
     const place = table.placeOf(table.rows[0], 'time');
-    faults.add({ code: 'tariff.series-step', ...place, found: `${step} minutes`, allowed: 'at most 60 minutes' });
+    faults.add({ code: 'series.step', ...place, found: `${step} minutes`, allowed: 'at most 60 minutes', unit });
     return undefined;
   }
   for (let i = 1; i < instants.length; i++) {
@@ -88,11 +89,11 @@ export function stepOfRows(
     const row = table.rows[i];
     const place = { ...table.placeOf(row, 'time'), found: shown(row.time) };
     const distance = at - before;
-    if (distance === 0) faults.add({ code: 'tariff.series-repeat', ...place });
-    else if (distance < 0) faults.add({ code: 'tariff.series-disorder', ...place });
+    if (distance === 0) faults.add({ code: 'series.repeat', ...place, unit: kind.one });
+    else if (distance < 0) faults.add({ code: 'series.disorder', ...place });
     else if (distance % step !== 0) {
-      faults.add({ code: 'tariff.series-irregular', ...place, allowed: `${step} minutes` });
-    } else faults.add({ code: 'tariff.series-gap', ...place, allowed: `${distance / step - 1} of ${step} minutes` });
+      faults.add({ code: 'series.irregular', ...place, allowed: `${step} minutes`, unit });
+    } else faults.add({ code: 'series.gap', ...place, allowed: `${distance / step - 1} of ${step} minutes`, unit });
   }
   return step;
 }

@@ -1,4 +1,4 @@
-import type { WEEKDAY_NAMES } from './civilDate.ts';
+import type { WEEKDAY_NAMES } from '../core/civilDate.ts';
 
 export type Weekday = (typeof WEEKDAY_NAMES)[number];
 

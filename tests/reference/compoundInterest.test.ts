@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { type WholeLifeTerms, wholeLife } from '../../src/compare/wholeLife.ts';
+import { accuracySection } from './accuracyRecord.ts';
 
 // Sources. Factors: the compound-interest tables that stand at the back of texts on engineering economy, such as
 // L. Blank and A. Tarquin, Engineering Economy: P/F and P/A with four decimals, A/P with five (from memory). The present-
@@ -25,6 +26,43 @@ const FOUR_DECIMALS = 0.00005;
 /** Closed forms of some tens of terms. */
 const ROUNDING = 1e-12;
 
+const accuracy = accuracySection(import.meta.url, 'Money over the years');
+const presentWorth = accuracy.comparison({
+  what: 'present worth of a saving of one a year, P/A',
+  source: 'compound-interest tables of engineering economy (from memory)',
+  unit: '',
+  allowed: FOUR_DECIMALS,
+  why: 'the last of four printed decimals',
+});
+const singleWorth = accuracy.comparison({
+  what: 'present worth of a saving in one year, P/F',
+  source: 'the same tables (from memory)',
+  unit: '',
+  allowed: FOUR_DECIMALS,
+  why: 'the last of four printed decimals',
+});
+const recovery = accuracy.comparison({
+  what: 'years until a capital is paid back by A/P',
+  source: 'the same tables (from memory)',
+  unit: 'a',
+  allowed: 0.0022,
+  why: 'half a unit of the fifth decimal, at the pace of the year that follows',
+});
+const gradients = accuracy.comparison({
+  what: 'present worth of a drifting saving',
+  source: 'closed form of the geometric gradient (from memory)',
+  unit: '',
+  allowed: 1e-8,
+  why: 'tens of terms in floating point',
+});
+const byHand = accuracy.comparison({
+  what: 'payback of 1000 by 300 a year at 10 %',
+  source: 'worked by hand',
+  unit: 'a',
+  allowed: 1e-11,
+  why: 'floating point',
+});
+
 describe('a saving of one money a year', () => {
   test.each([
     [0.01, 20, 18.0456],
@@ -43,7 +81,9 @@ describe('a saving of one money a year', () => {
     [0.1, 10, 6.1446],
     [0.1, 20, 8.5136],
   ])('at %f over %i years is worth the table’s P/A = %f', (discountRate, years, factor) => {
-    near(wholeLife(nothing, saves(1), { ...terms, discountRate, years }).netPresentValue, factor, FOUR_DECIMALS);
+    const { netPresentValue } = wholeLife(nothing, saves(1), { ...terms, discountRate, years });
+    near(netPresentValue, factor, FOUR_DECIMALS);
+    presentWorth.add(netPresentValue - factor);
   });
 
   test.each([
@@ -56,6 +96,7 @@ describe('a saving of one money a year', () => {
   ])('at %f in year %i alone is worth the table’s P/F = %f', (discountRate, years, factor) => {
     const last = wholeLife(nothing, saves(1), { ...terms, discountRate, years }).years.at(-1);
     near(last?.presentValue ?? Number.NaN, factor, FOUR_DECIMALS);
+    singleWorth.add((last?.presentValue ?? Number.NaN) - factor);
   });
 });
 
@@ -71,6 +112,7 @@ test.each([
     // pace of the year that follows.
     const pace = factor / (1 + discountRate) ** (years + 1);
     near(life.discountedPayback, years, 0.000005 / factor / pace);
+    recovery.add(Number(life.discountedPayback) - years);
   },
 );
 
@@ -85,6 +127,7 @@ describe('a saving that drifts', () => {
   ])('by %f at %f over %i years is worth the geometric gradient', (fuelDrift, discountRate, years) => {
     const life = wholeLife(nothing, saves(1), { ...terms, fuelDrift, discountRate, years });
     near(life.netPresentValue, gradient(fuelDrift, discountRate, years), 100 * ROUNDING);
+    gradients.add(life.netPresentValue - gradient(fuelDrift, discountRate, years));
   });
 
   test('as fast as the discount is worth n/(1 + i)', () => {
@@ -99,6 +142,7 @@ describe('a saving that drifts', () => {
     const life = wholeLife(heatPump, boiler, { ...terms, ...drifts, capital: 11_000, grant: 3000, years: 18 });
     const worth = 1500 * gradient(0.025, 0.04, 18) - 900 * gradient(0.01, 0.04, 18) + 70 * gradient(0, 0.04, 18);
     near(life.netPresentValue, worth - 8000, 1e-8);
+    gradients.add(life.netPresentValue - (worth - 8000));
   });
 });
 
@@ -108,5 +152,6 @@ test('1000 paid back by 300 a year at 10 % takes 4.2633 years, worked by hand an
   // (1000·1.61051/300 − (1.61051 − 1.1)/0.1) = 5.36836667 − 5.1051 = 0.26326667.
   const life = wholeLife(nothing, saves(300), { ...terms, capital: 1000, discountRate: 0.1, years: 10 });
   near(life.discountedPayback, 4 + (1000 * 1.61051) / 300 - 5.1051, 1e-11);
+  byHand.add(Number(life.discountedPayback) - (4 + (1000 * 1.61051) / 300 - 5.1051));
   near(life.simplePayback, 10 / 3, ROUNDING);
 });

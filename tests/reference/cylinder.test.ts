@@ -4,7 +4,23 @@
  */
 import { describe, expect, test } from 'vitest';
 import { simulateYear } from '../../src/sim/year.ts';
-import { column, expectNear, type PlanParts, planOf } from '../unit/sim/planBuilder.ts';
+import { column, expectNear as holdNear, type PlanParts, planOf } from '../unit/sim/planBuilder.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Cylinder of hot water');
+const figures = accuracy.comparison({
+  what: 'temperatures, heat and electricity of a cylinder, hour by hour',
+  source: 'worked by hand from the model, twelve digits',
+  unit: '%',
+  allowed: 1e-7,
+  why: 'figures of eleven digits or more',
+});
+
+/** Holds a figure to a worked one, and records how far off it is. */
+function expectNear(actual: number | undefined, worked: number): void {
+  holdNear(actual, worked);
+  figures.add((100 * ((actual ?? Number.NaN) - worked)) / Math.max(Math.abs(worked), 1e-3));
+}
 
 /** A house that needs no heat, with a cylinder. */
 const simulate = (parts: PlanParts) => simulateYear(planOf({ house: { setPoint: -40 }, ...parts }));

@@ -7,7 +7,23 @@ import { expect, test } from 'vitest';
 import type { YearColumns } from '../../src/sim/columns.ts';
 import { MARK } from '../../src/sim/columns.ts';
 import { simulateYear } from '../../src/sim/year.ts';
-import { column, expectNear, HOURS, type PlanParts, planOf } from '../unit/sim/planBuilder.ts';
+import { column, HOURS, expectNear as holdNear, type PlanParts, planOf } from '../unit/sim/planBuilder.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Hours that hand heat to the next');
+const figures = accuracy.comparison({
+  what: 'hot water beside rooms, quiet hours, waiting heat, hybrids',
+  source: 'worked by hand from the model, twelve digits',
+  unit: '%',
+  allowed: 1e-7,
+  why: 'figures of eleven digits or more',
+});
+
+/** Holds a figure to a worked one, and records how far off it is. */
+function expectNear(actual: number | undefined, worked: number): void {
+  holdNear(actual, worked);
+  figures.add((100 * ((actual ?? Number.NaN) - worked)) / Math.max(Math.abs(worked), 1e-3));
+}
 
 /** −10 °C, 35 °C flow, Q = 0.15·30 = 4.5 kW, Q_d = 4.8 kW. */
 const cold: PlanParts = { temperature: -10, house: { heatLoss: 0.15, designLoad: 4.8 } };

@@ -13,7 +13,23 @@
 import { expect, test } from 'vitest';
 import { MARK } from '../../src/sim/columns.ts';
 import { simulateYear } from '../../src/sim/year.ts';
-import { expectNear, planOf } from '../unit/sim/planBuilder.ts';
+import { expectNear as holdNear, planOf } from '../unit/sim/planBuilder.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Hours of the whole chain');
+const figures = accuracy.comparison({
+  what: 'need, flow, map, frost, part load, backup in single hours',
+  source: 'worked by hand from the model, twelve digits',
+  unit: '%',
+  allowed: 1e-7,
+  why: 'figures of eleven digits or more',
+});
+
+/** Holds a figure to a worked one, and records how far off it is. */
+function expectNear(actual: number | undefined, worked: number): void {
+  holdNear(actual, worked);
+  figures.add((100 * ((actual ?? Number.NaN) - worked)) / Math.max(Math.abs(worked), 1e-3));
+}
 
 /** Any hour far from the ends of the year: the weather of these plans is the same in every hour. */
 const HOUR = 4000;

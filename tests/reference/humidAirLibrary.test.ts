@@ -11,7 +11,52 @@ import {
 } from '../../src/weather/humidAir/saturationPressure.ts';
 import { standardPressure } from '../../src/weather/humidAir/standardPressure.ts';
 import { humidityRatioFromWetBulb } from '../../src/weather/humidAir/wetBulb.ts';
+import { accuracySection } from './accuracyRecord.ts';
 import { psychrometricsLibrary as library } from './psychrometricsLibrary.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Humid air beside a library');
+const saturation = accuracy.comparison({
+  what: 'saturation pressure over ice and water, −60 … 100 °C',
+  source: 'library psychrolib 1.1.1',
+  unit: '%',
+  allowed: 1e-9,
+  why: 'the same equations',
+});
+const ratios = accuracy.comparison({
+  what: 'humidity ratio from vapour pressure, relative humidity and dew point, 75 … 104 kPa',
+  source: 'library psychrolib 1.1.1',
+  unit: '%',
+  allowed: 1e-9,
+  why: 'the same equations',
+});
+const wetBulbs = accuracy.comparison({
+  what: 'humidity ratio from the wet bulb, on ice and on water',
+  source: 'library psychrolib 1.1.1',
+  unit: '%',
+  allowed: 1e-7,
+  why: 'near-dry air is the difference of larger numbers',
+});
+const back = accuracy.comparison({
+  what: 'humidity from the dew point and wet bulb that the library finds',
+  source: 'library psychrolib 1.1.1',
+  unit: '%',
+  allowed: 0.03,
+  why: 'the library stops its search within 0.001 K',
+});
+const altitudes = accuracy.comparison({
+  what: 'pressure of the standard atmosphere, −400 … 4000 m',
+  source: 'library psychrolib 1.1.1',
+  unit: '%',
+  allowed: 2e-4,
+  why: 'the library writes the exponent as 5.2559',
+});
+const frost = accuracy.comparison({
+  what: 'frost index, −24.75 … 7.75 °C, at two altitudes',
+  source: 'the same index put together from the library',
+  unit: '',
+  allowed: 1e-10,
+  why: 'a difference of nearby ratios',
+});
 
 // Source of every expected value here: the published library psychrolib 1.1.1, which implements the ASHRAE Handbook
 // Fundamentals 2017, chapter 1, in SI units. It changes from ice to water at the triple point, 0.01 °C.
@@ -35,6 +80,7 @@ describe('against the psychrometrics library', () => {
   test('saturation pressure agrees over ice and over water', () => {
     const ice = compare(grid(-60, 0, 0.5).map((t) => [saturationPressureOverIce(t), library.GetSatVapPres(t)]));
     const water = compare(grid(0.5, 100, 0.5).map((t) => [saturationPressureOverWater(t), library.GetSatVapPres(t)]));
+    for (const { worst, rows } of [ice, water]) saturation.add(100 * worst, rows);
     expect(ice.rows).toBe(121);
     expect(water.rows).toBe(200);
     expect(ice.worst).toBeLessThan(SAME_EQUATION);
@@ -58,6 +104,7 @@ describe('against the psychrometrics library', () => {
         (td) => [humidityRatioFromDewPoint(td + 5, td, p), library.GetHumRatioFromTDewPoint(td, p)] as const,
       ),
     );
+    for (const { worst, rows } of [vapour, relative, dewPoint].map(compare)) ratios.add(100 * worst, rows);
     expect([compare(vapour).rows, compare(relative).rows, compare(dewPoint).rows]).toEqual([400, 6400, 240]);
     expect(compare(vapour).worst).toBeLessThan(SAME_EQUATION);
     expect(compare(relative).worst).toBeLessThan(SAME_EQUATION);
@@ -80,6 +127,7 @@ describe('against the psychrometrics library', () => {
     expect(pairs.filter(([ours, theirs]) => theirs <= 1e-6 && ours > 1e-6)).toEqual([]);
     // Near-dry air is the difference of two larger numbers, which costs two more digits.
     expect(compare(moist).worst).toBeLessThan(100 * SAME_EQUATION);
+    wetBulbs.add(100 * compare(moist).worst, moist.length);
   });
 
   test('a dew point and a wet bulb found by the library lead back to the humidity they came from', () => {
@@ -93,6 +141,8 @@ describe('against the psychrometrics library', () => {
       // the psychrometer's slope of 0.0008 per K on a ratio of 0.004, 0.02 % at a wet bulb.
       expect(Math.abs(humidityRatioFromDewPoint(t, dewPoint, 101_325) / ratio - 1)).toBeLessThan(3e-4);
       expect(Math.abs(humidityRatioFromWetBulb(t, wetBulb, 101_325) / ratio - 1)).toBeLessThan(3e-4);
+      back.add(100 * (humidityRatioFromDewPoint(t, dewPoint, 101_325) / ratio - 1));
+      back.add(100 * (humidityRatioFromWetBulb(t, wetBulb, 101_325) / ratio - 1));
     }
     expect(cases).toHaveLength(45);
   });
@@ -102,6 +152,7 @@ describe('against the psychrometrics library', () => {
     expect(compare(pairs).rows).toBe(45);
     // The library writes the exponent as 5.2559 instead of 5.25588: 2e-5 · ln(1 − 0.0902) = 1.9e-6 at 4000 m.
     expect(compare(pairs).worst).toBeLessThan(2e-6);
+    altitudes.add(100 * compare(pairs).worst, pairs.length);
   });
 
   test('the frost index agrees with the same index put together from the library', () => {
@@ -120,5 +171,6 @@ describe('against the psychrometrics library', () => {
     expect(humid.filter(({ theirs }) => theirs > 0 && theirs < 1.5).length).toBeGreaterThan(400);
     // The index is a difference of nearby ratios: rounding of 1e-11 counts in full, not as a share.
     for (const { ours, theirs } of humid) expect(Math.abs(ours - theirs)).toBeLessThan(1e-10);
+    for (const { ours, theirs } of humid) frost.add(ours - theirs);
   });
 });

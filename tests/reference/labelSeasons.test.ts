@@ -1,6 +1,44 @@
 import { describe, expect, test } from 'vitest';
 import type { SeasonEntry } from '../../src/report/seasonSchema.ts';
 import { checkedLabel, labelFile, type WrittenLabel, type WrittenSeason } from '../unit/scenario/season/labelFiles.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Seasons of the energy label');
+const scops = accuracy.comparison({
+  what: 'SCOP of certified units from their declared points',
+  source: 'Heat Pump KEYMARK certificate records, a public certification database, as copied records',
+  unit: '%',
+  allowed: 0.2,
+  why: 'published SCOP and COPs are printed to 0.01',
+});
+const electricities = accuracy.comparison({
+  what: 'annual electricity of the same',
+  source: 'Heat Pump KEYMARK certificate records, a public certification database, as copied records',
+  unit: '%',
+  allowed: 0.3,
+  why: 'the design load is printed to 0.01 kW as well',
+});
+const efficiencies = accuracy.comparison({
+  what: 'seasonal efficiency η_s of the same',
+  source: 'Heat Pump KEYMARK certificate records, a public certification database, as copied records',
+  unit: 'points',
+  allowed: 1,
+  why: 'printed whole',
+});
+const withoutRule = accuracy.comparison({
+  what: 'SCOP of one of them without the ±10 % rule',
+  source: 'computed apart from this project',
+  unit: '',
+  allowed: 0.00005,
+  why: 'half of the last digit',
+});
+const twoWays = accuracy.comparison({
+  what: 'SCOP from a map beside that from the points it was built of',
+  source: 'the two ways of this program',
+  unit: '%',
+  allowed: 1e-7,
+  why: 'two computations of the same sum',
+});
 
 // Four results of certified reversible air-to-water units, average climate. Source: Heat Pump KEYMARK certificate records, a
 // public certification database, as copied records; the figures of a season are capacity kW / COP as printed, T_biv and the
@@ -88,6 +126,9 @@ describe('certified units, from their declared points', () => {
     expect(Math.abs(scop / published.scop - 1)).toBeLessThan(0.002);
     expect(Math.abs(electricity / published.electricity - 1)).toBeLessThan(0.003);
     expect(Math.abs(efficiency - published.efficiency)).toBeLessThan(1);
+    scops.add(100 * (scop / published.scop - 1));
+    electricities.add(100 * (electricity / published.electricity - 1));
+    efficiencies.add(efficiency - published.efficiency);
   });
 
   test('all four published results were compared, each with the six points as printed', () => {
@@ -108,6 +149,7 @@ describe('certified units, from their declared points', () => {
     const { scop } = ratedFromPoints({ ...b, season: { ...b.season, points: changed } });
     // 4.6955 was computed apart from this project; half of its last digit.
     expect(Math.abs(scop - 4.6955)).toBeLessThanOrEqual(0.00005);
+    withoutRule.add(scop - 4.6955);
     expect(Math.abs(scop / b.published.scop - 1)).toBeGreaterThan(0.002);
   });
 
@@ -181,6 +223,7 @@ describe('a map that is built from the declared points', () => {
     const [fromMap, fromPoints] = scopsOf(bothWays('linear', [...cops, warmest]));
     // Two computations of the same sum: rounding alone parts them.
     expect(Math.abs(fromMap / fromPoints - 1)).toBeLessThan(1e-9);
+    twoWays.add(100 * (fromMap / fromPoints - 1));
   });
 
   test('with the usual map the two ways part by what lies between and beyond the points', () => {

@@ -5,7 +5,23 @@
 import { describe, expect, test } from 'vitest';
 import { type MassParameters, massParameters } from '../../src/sim/lumpedHouse.ts';
 import { simulateYear } from '../../src/sim/year.ts';
-import { column, expectNear, HOURS, planOf } from '../unit/sim/planBuilder.ts';
+import { column, HOURS, expectNear as holdNear, planOf } from '../unit/sim/planBuilder.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'House with mass');
+const figures = accuracy.comparison({
+  what: 'steady need, decay of the air, gains, jump of the set point',
+  source: 'worked by hand from the model, twelve digits',
+  unit: '%',
+  allowed: 1e-7,
+  why: 'figures of eleven digits or more',
+});
+
+/** Holds a figure to a worked one, and records how far off it is. */
+function expectNear(actual: number | undefined, worked: number): void {
+  holdNear(actual, worked);
+  figures.add((100 * ((actual ?? Number.NaN) - worked)) / Math.max(Math.abs(worked), 1e-3));
+}
 
 /** H_ve + 1/(1/H_is + 1/(H_w + H_op)), H_is = 3.45·4.5·100 = 1552.5 W/K: 60 + 1552.5·150/1702.5. */
 const STEADY_LOSS = 60 + (1552.5 * 150) / 1702.5;

@@ -1,6 +1,23 @@
 import { describe, expect, test } from 'vitest';
 import { heatingDegreeDays } from '../../src/weather/degreeDays.ts';
 import { type SeasonName, standardSeasons } from '../../src/weather/seasonBins.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Reference seasons');
+const binHours = accuracy.comparison({
+  what: 'heating hours of the three reference seasons, sums of their bins',
+  source: 'Regulation (EU) 811/2013 annex VII table 12, 813/2013 annex III table 5',
+  unit: 'h',
+  allowed: 0,
+  why: 'printed whole',
+});
+const equivalent = accuracy.comparison({
+  what: 'hours at design load of the three seasons, as weather',
+  source: 'worked out from the printed tables apart from this project',
+  unit: 'h',
+  allowed: 0.005,
+  why: 'half of the last digit',
+});
 
 /** A year of hours in which each bin's temperature stands for its hours, and the rest is too warm to heat. */
 function yearOf(season: SeasonName): Float64Array {
@@ -27,12 +44,14 @@ describe.each([
     expect(table).toHaveLength(bins);
     expect(table.map((bin) => bin.temperature)).toEqual(Array.from({ length: bins }, (_, i) => design + i));
     expect(table.reduce((sum, bin) => sum + bin.hours, 0)).toBe(hours);
+    binHours.add(table.reduce((sum, bin) => sum + bin.hours, 0) - hours);
   });
 
   test('needs, as weather, the published hours at design load', () => {
     const degreeHours = 24 * heatingDegreeDays(yearOf(season), 16, 'hours').annual;
     // Half of the last digit of the figure worked out from the tables: temperatures and hours are whole numbers.
     expect(Math.abs(degreeHours / (16 - design) - unrounded)).toBeLessThanOrEqual(0.005);
+    equivalent.add(degreeHours / (16 - design) - unrounded);
     expect(Math.round(degreeHours / (16 - design))).toBe(printed);
     expect(standardSeasons[season].equivalentHours).toBe(printed);
   });

@@ -1,5 +1,22 @@
 import { describe, expect, test } from 'vitest';
 import { hourlyProfile, type TappingProfileName, tappingProfiles } from '../../src/sim/tappingProfiles.ts';
+import { accuracySection } from './accuracyRecord.ts';
+
+const accuracy = accuracySection(import.meta.url, 'Hot-water tapping profiles');
+const sums = accuracy.comparison({
+  what: 'kWh of the tapping profiles S, M, L and XL, by draws and by hours',
+  source: 'Regulation (EU) 813/2013 annex III table 7',
+  unit: 'kWh',
+  allowed: 1e-9,
+  why: 'sums of printed thousandths',
+});
+const hours = accuracy.comparison({
+  what: 'kWh of each hour of the day',
+  source: 'the same table',
+  unit: 'kWh',
+  allowed: 1e-12,
+  why: 'sums of a few printed thousandths',
+});
 
 /**
  * Draws of a day: time and kWh, as printed, and the day's sum. Source: Commission Regulation (EU) No 813/2013, annex III,
@@ -47,6 +64,8 @@ describe.each(names)('tapping profile %s', (name) => {
     const byHour = hourlyProfile(name).reduce((sum, kWh) => sum + kWh, 0);
     expect(Math.abs(byDraw - printed[name].sum)).toBeLessThanOrEqual(1e-9);
     expect(Math.abs(byHour - printed[name].sum)).toBeLessThanOrEqual(1e-9);
+    sums.add(byDraw - printed[name].sum);
+    sums.add(byHour - printed[name].sum);
   });
 
   test('draws each hour what is printed within it', () => {
@@ -55,6 +74,7 @@ describe.each(names)('tapping profile %s', (name) => {
       const within = drawsOf(name).filter(([time]) => Number(time.split(':')[0]) === hour);
       const sum = within.reduce((total, [, draw]) => total + draw, 0);
       expect(Math.abs(kWh[hour]! - sum)).toBeLessThanOrEqual(1e-12);
+      hours.add(kWh[hour]! - sum);
     }
   });
 });

@@ -92,12 +92,56 @@ export const scenarioProblems = {
     cure: 'name a tariff file under tariffs; the first one counts',
   },
   'scenario.cheapest-needs-price': {
-    says: '{path} compares prices by the hour, but the first tariff {found} is priced by blocks alone',
+    says: '{path} compares prices by the hour, but the tariff {found} is priced by blocks alone',
     cure: 'put a tariff with rates or a price series first',
   },
   'scenario.no-shares': {
     says: '{path} are all zero',
     cure: 'write what is drawn in each hour, or leave the shares out',
+  },
+  'scenario.weekend-alone': {
+    says: '{path} stands without the shares of the other days',
+    cure: 'give shares too, on the same scale',
+  },
+  'scenario.boiler-needs-tariff': {
+    says: '{path} is electricity without a price, which is on the household’s tariff, but no tariff is named',
+    cure: 'name a tariff file under tariffs, or give the electricity a price of its own',
+  },
+  'scenario.cylinder-without-hot-water': {
+    says: '{path} is {found} kWh a year, but no hot water is entered',
+    cure: 'enter hotWater, so that both sides heat it, or take the loss out',
+  },
+  'scenario.carbon-needs-tariff': {
+    says: '{path} go by the rates of a tariff, but no tariff is named',
+    cure: 'name a tariff file under tariffs; the first one counts',
+  },
+  'scenario.carbon-no-such-rate': {
+    says: '{path} is {found}; the first tariff has {allowed}',
+    cure: 'write the name of one of its rates',
+  },
+  'scenario.carbon-rate-twice': {
+    says: '{path} is {found}, which has a factor already',
+    cure: 'keep one factor for each rate',
+  },
+  'scenario.carbon-rate-missing': {
+    says: '{path} lack the rate {found} of the first tariff',
+    cure: 'give every rate of the first tariff its factor',
+  },
+  'scenario.whole-life-needs-boiler': {
+    says: '{path} compares a heat pump with a boiler over the years, but no boiler is entered',
+    cure: 'enter the boiler, or take the section out',
+  },
+  'scenario.whole-life-needs-tariff': {
+    says: '{path} needs the cost of a year, but no tariff is named',
+    cure: 'name a tariff file under tariffs; the first one counts',
+  },
+  'scenario.taxes-differ': {
+    says: 'the prices of this tariff {found}; those of the first tariff {allowed}: their bills are not alike',
+    cure: 'state all tariffs in one way; they are ranked only among those stated alike',
+  },
+  'scenario.taxes-mixed': {
+    says: 'the prices of this tariff {found}: its bill is like no other',
+    cure: 'state the tariffs of all suppliers in one way',
   },
   'scenario.frozen-water': {
     says: '{path} is {found}, more than the mean of the cold water: it would freeze',

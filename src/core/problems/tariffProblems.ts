@@ -1,4 +1,4 @@
-/** Problems of tariff files, price series and civil time. */
+/** Problems of tariff files, series of values over time (prices, meter readings, factors) and civil time. */
 export const tariffProblems = {
   'clock.unknown-zone': {
     says: '{path} is {found}, which is no time zone of the IANA list',
@@ -15,6 +15,10 @@ export const tariffProblems = {
   'clock.hours': {
     says: 'the weather has {found} hours; a year has {allowed}',
     cure: 'name a weather file that holds one whole year',
+  },
+  'tariff.none': {
+    says: 'no tariff is named, neither in the scenario nor beside it',
+    cure: 'name tariff files behind the scenario, or under tariffs in it',
   },
   'tariff.no-price': {
     says: 'this tariff has no price for electricity',
@@ -56,64 +60,64 @@ export const tariffProblems = {
     says: 'the price series {found} could not be used, so this tariff cannot be priced',
     cure: 'cure the faults of the series first',
   },
-  'tariff.series-quotes': {
+  'series.quotes': {
     says: 'a quotation mark is not closed or stands in the wrong place',
     cure: 'put quotation marks at both ends of a cell, or at neither',
   },
-  'tariff.series-column': {
+  'series.column': {
     says: 'the column {found} of {path} is not there; the file has {allowed}',
-    cure: "name the columns under 'series': timeColumn and priceColumn",
+    cure: 'name the columns: timeColumn and {unit}',
   },
-  'tariff.series-empty': {
-    says: 'the price series has {found}; at least {allowed} are needed',
-    cure: 'each line holds one stamp and one price',
+  'series.empty': {
+    says: 'the file has {found}; at least {allowed} are needed',
+    cure: 'each line holds one stamp and one value',
   },
-  'tariff.series-stamp': {
+  'series.stamp': {
     says: '{found} is no stamp; allowed is {allowed}',
-    cure: "give each stamp its offset, or say under 'series' that stamps are 'utc' or 'local'",
+    cure: "give each stamp its offset, or say by the key 'stamps' that they are 'utc' or 'local'",
   },
-  'tariff.series-no-such-time': {
+  'series.no-such-time': {
     says: '{found} does not exist in {allowed}: the clocks were put forward over it',
     cure: 'take the line out, or write the stamps with their offset from UTC',
   },
-  'tariff.series-price': {
-    says: '{found} is no price; allowed is {allowed}',
-    cure: 'write a plain number, such as 0.2415 or -0.01; every stamp needs one',
+  'series.value': {
+    says: '{found} is no {unit}; allowed is {allowed}',
+    cure: 'write a plain number, such as 0.2415; every stamp needs one',
   },
-  'tariff.series-decimal': {
+  'series.decimal': {
     says: 'the comma in {found} may divide decimals or thousands',
-    cure: "say under 'series' that decimal is 'comma' or 'point', and write no thousands marks",
+    cure: "say by the key 'decimal' that it is 'comma' or 'point', and write no thousands marks",
   },
-  'tariff.series-step': {
-    says: 'the prices are {found} apart; allowed is {allowed}',
-    cure: 'use prices by the hour or finer, in steps of whole minutes',
+  'series.step': {
+    says: 'the {unit} are {found} apart; allowed is {allowed}',
+    cure: 'use {unit} by the hour or finer, in steps of whole minutes',
   },
-  'tariff.series-gap': {
-    says: 'before {found} prices are missing: {allowed}',
+  'series.gap': {
+    says: 'before {found} {unit} are missing: {allowed}',
     cure: 'complete the file; with a local clock, also the hour that occurs twice in autumn',
   },
-  'tariff.series-repeat': {
+  'series.repeat': {
     says: '{found} occurs a second time',
-    cure: 'leave one price for each stamp',
+    cure: 'leave one {unit} for each stamp',
   },
-  'tariff.series-disorder': {
+  'series.disorder': {
     says: '{found} stands after a later stamp',
     cure: 'sort the lines by time',
   },
-  'tariff.series-irregular': {
-    says: '{found} is out of step; the prices are {allowed} apart',
+  'series.irregular': {
+    says: '{found} is out of step; the {unit} are {allowed} apart',
     cure: 'keep one step throughout the file',
   },
-  'tariff.series-more': {
+  'series.more': {
     says: 'there are {found} more faults in this file',
     cure: 'cure those above first; they often have one cause',
   },
-  'tariff.series-short': {
-    says: 'the price series does not reach {found}',
+  'series.short': {
+    says: 'the {unit} series does not reach {found}',
     cure: "use a series that holds the scenario's whole calendar year",
   },
-  'tariff.series-of-other-year': {
-    says: 'for {found} hours the price of a year before or after was taken; the series holds {allowed}',
+  'series.of-other-year': {
+    says: 'for {found} hours the {unit} of a year before or after was taken; the series holds {allowed}',
     cure: "use a series of the scenario's calendar year, or set the calendar year to that of the series",
   },
   'tariff.supplier-order': {

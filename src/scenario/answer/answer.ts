@@ -1,3 +1,4 @@
+import type { AnnualCost } from '../../compare/annualCost.ts';
 import type { BoilerYear } from '../../compare/boiler.ts';
 import type { YearColumns } from '../../sim/columns.ts';
 import type { SeasonalFactors } from '../../sim/seasonalFactors.ts';
@@ -5,20 +6,29 @@ import type { YearTotals } from '../../sim/totals.ts';
 import type { YearPlan } from '../../sim/yearPlan.ts';
 import type { Bill } from '../../tariffs/bill.ts';
 import type { LoadedScenario } from '../loadScenario.ts';
+import type { LoadedTariff } from '../loadTariffs.ts';
+import type { Comparison } from './comparison.ts';
 
 /** One tariff: the whole bill, and the heating's part of it beside the boiler's on the same tariff. */
 export interface TariffCost {
   readonly tariff: string;
   readonly file: string;
   readonly currency: string;
-  readonly pricesStated: 'withTax' | 'withoutTax';
+  readonly pricesStated: LoadedTariff['pricesStated'];
+  readonly taxes: LoadedTariff['taxes'];
+  /** All electricity on the bill, kWh a step. */
+  readonly electricity: Float64Array;
   /** The whole bill: heating and household. */
   readonly bill: Bill;
   /** The bill of the household alone: standing charges only, where no household is entered. */
   readonly householdBill: Bill;
-  /** Running cost of the heating: bill less the household's, and a hybrid boiler's fuel. */
+  /** Cost of the heating by its parts: bill less the household's, a hybrid's fuel, service entered for the whole life. */
+  readonly heating: AnnualCost;
+  /** All of it. */
   readonly heatingCost: number;
-  /** Running cost of the boiler on this tariff: fuel, standing charge, taxes, service, its pump; absent without a boiler. */
+  /** Cost of the boiler by its parts: what its electricity adds to the household's bill, fuel, service; absent without one. */
+  readonly boiler?: AnnualCost;
+  /** All of it; absent without a boiler. */
   readonly boilerCost?: number;
   /** Boiler less heating; absent without a boiler. */
   readonly saving?: number;
@@ -56,9 +66,9 @@ export interface Answer {
   /** Heating degree hours to the set point's base, K·d, and that base. */
   readonly degreeDays: { readonly base: number; readonly annual: number; readonly monthly: readonly number[] };
   readonly costs: readonly TariffCost[];
-  /** Cost of a hybrid boiler's fuel; 0 without one. */
-  readonly fuelCost: number;
   readonly boiler?: BoilerYear;
+  /** On the first tariff; absent without a boiler or a tariff. */
+  readonly comparison?: Comparison;
   readonly carbon?: { readonly heatPump: Carbon; readonly boiler: Carbon };
   readonly warnings: readonly Warning[];
   readonly assumptions: readonly Assumption[];

@@ -1,89 +1,88 @@
-import { type BoilerYear, boilerYear } from '../../compare/boiler.ts';
+import { type AnnualCost, annualTotal, electricityCost, fuelParts } from '../../compare/annualCost.ts';
+import type { BoilerYear } from '../../compare/boiler.ts';
 import { fuelCost } from '../../compare/fuel.ts';
-import { type SpaceHeatEfficiency, usualHotWaterEfficiency } from '../../compare/spaceHeatInput.ts';
-import type { YearColumns } from '../../sim/columns.ts';
-import type { YearTotals } from '../../sim/totals.ts';
-import type { YearPlan } from '../../sim/yearPlan.ts';
-import { bill } from '../../tariffs/bill.ts';
+import { type Bill, bill } from '../../tariffs/bill.ts';
+import type { PreparedTariff } from '../../tariffs/preparedTariff.ts';
+import { type Kept, KeptKind } from '../kept.ts';
 import type { LoadedScenario } from '../loadScenario.ts';
-import { flowSettingOf } from '../prepare/preparePlan.ts';
-import { polylineOf } from '../prepare/prepareUnit.ts';
-import type { Scenario } from '../scenarioSchema.ts';
 import type { TariffCost } from './answer.ts';
+import type { HeatingRun } from './heatingRuns.ts';
 
-/** A year with the scenario's boiler, which meets the whole need; nothing without a boiler. */
-export function boilerOf(
-  loaded: LoadedScenario,
-  plan: YearPlan,
-  totals: YearTotals,
-  c: YearColumns,
-): BoilerYear | undefined {
-  const { boiler } = loaded.scenario;
-  if (boiler === undefined) return undefined;
-  const efficiency = spaceHeatEfficiency(loaded.scenario, boiler.efficiency, plan);
-  return boilerYear(
-    {
-      efficiency,
-      hotWaterEfficiency: boiler.hotWaterEfficiency ?? usualHotWaterEfficiency(efficiency),
-      fuel: boiler.fuel,
-      pumpPower: boiler.pumpPower / 1000,
-      servicePerYear: boiler.servicePerYear,
-    },
-    {
-      spaceHeat: plan.house.mass === null ? c.spaceHeatNeed : c.unlimitedNeed,
-      hotWater: totals.annual.hotWaterAsked,
-      hotWaterByHour: plan.hotWater?.draw ?? new Float64Array(c.hours),
-      cylinderLoss: boiler.cylinderLoss ?? totals.annual.cylinderLoss,
-    },
-  );
-}
-
-function spaceHeatEfficiency(
-  { house }: Scenario,
-  entry: NonNullable<Scenario['boiler']>['efficiency'],
-  { weather, house: { designLoad } }: YearPlan,
-): SpaceHeatEfficiency {
-  if (typeof entry === 'number') return entry;
-  return {
-    overReturn: polylineOf(entry.byReturnTemperature),
-    flow: flowSettingOf(entry.flowTemperature, house.design.roomTemperature, weather),
-    designLoad,
-  };
-}
-
-/** What the fuel of a hybrid costs in the year; 0 without one. */
-export function hybridFuelCost(loaded: LoadedScenario, totals: YearTotals): number {
+/** What the fuel of a hybrid costs in a year, and of it the energy with its taxes; nothing without one. */
+function hybridFuelCost(loaded: LoadedScenario, fuel: number): Pick<AnnualCost, 'fuel' | 'fuelEnergy'> {
   const { backup } = loaded.scenario;
-  return backup?.source === 'boiler' ? fuelCost(backup.fuel, totals.annual.fuel).total : 0;
+  return backup?.source === 'boiler' ? fuelParts(fuelCost(backup.fuel, fuel)) : { fuel: 0, fuelEnergy: 0 };
 }
 
 /**
- * The year on each tariff. The heating's cost is the whole bill less the household's alone, the boiler's is its fuel and
- * service and what its pump adds to the household's bill (MODEL section 12).
+ * The year on each tariff: heating and household on one bill. The heating costs that bill less the household's alone, the
+ * fuel of a hybrid and its service; the boiler its fuel and service and what its electricity adds to the household's bill.
+ *
+ * @param runs what the heating takes on each tariff
+ * @param boiler the year with the boiler, where there is one
+ * @param kept where the scenarios of a batch keep the bills of household and boiler
+ *
+ * Reference: MODEL section 12.
  */
 export function costsOf(
   loaded: LoadedScenario,
-  c: YearColumns,
-  fuel: number,
+  runs: readonly HeatingRun[],
   boiler: BoilerYear | undefined,
+  kept?: Kept,
 ): TariffCost[] {
-  const household = new Float64Array(c.hours);
-  return loaded.tariffs.map(({ file, tariff, prepared }) => {
-    const whole = bill(prepared, c.electricity);
-    const householdBill = bill(prepared, household);
-    const heatingCost = whole.total - householdBill.total + fuel;
+  const { household, scenario } = loaded;
+  const service = scenario.wholeLife?.servicePerYear ?? 0;
+  const withBoiler = boiler && keptSum(household, boiler.electricity, kept);
+  // On most scenarios all tariffs share one run, and so one column.
+  let last: { run: HeatingRun; electricity: Float64Array } | undefined;
+  return loaded.tariffs.map((tariff, i) => {
+    const { prepared } = tariff;
+    if (last?.run !== runs[i]) last = { run: runs[i], electricity: sumOf(household, runs[i].electricity) };
+    const whole = bill(prepared, last.electricity);
+    const householdBill = keptBill(prepared, household, kept);
+    const heating = {
+      ...electricityCost(whole, householdBill),
+      ...hybridFuelCost(loaded, runs[i].fuel),
+      service,
+    };
+    const heatingCost = annualTotal(heating);
     const cost = {
       tariff: tariff.name,
-      file,
-      currency: tariff.currency ?? loaded.scenario.currency,
+      file: tariff.file,
+      currency: tariff.currency ?? scenario.currency,
       pricesStated: tariff.pricesStated,
+      taxes: tariff.taxes,
+      electricity: last.electricity,
       bill: whole,
       householdBill,
+      heating,
       heatingCost,
     };
-    if (boiler === undefined) return cost;
-    const electricity = bill(prepared, boiler.electricity).total - householdBill.total;
-    const boilerCost = boiler.cost.total + boiler.service + electricity;
-    return { ...cost, boilerCost, saving: boilerCost - heatingCost };
+    if (boiler === undefined || withBoiler === undefined) return cost;
+    const boilerParts = {
+      ...electricityCost(keptBill(prepared, withBoiler, kept), householdBill),
+      ...fuelParts(boiler.cost),
+      service: boiler.service,
+    };
+    const boilerCost = annualTotal(boilerParts);
+    return { ...cost, boiler: boilerParts, boilerCost, saving: boilerCost - heatingCost };
   });
+}
+
+/** Bills and columns that the scenarios of a batch have in common; those of the heating itself differ from year to year. */
+const bills = new KeptKind<Bill>(256);
+const sums = new KeptKind<Float64Array>(16);
+
+function keptBill(prepared: PreparedTariff, electricity: Float64Array, kept?: Kept): Bill {
+  return bills.of(kept, kept?.key([prepared, electricity]) ?? '', () => bill(prepared, electricity));
+}
+
+function keptSum(a: Float64Array, b: Float64Array, kept?: Kept): Float64Array {
+  return sums.of(kept, kept?.key([a, b]) ?? '', () => sumOf(a, b));
+}
+
+function sumOf(a: Float64Array, b: Float64Array): Float64Array {
+  const sum = new Float64Array(a.length);
+  for (let i = 0; i < sum.length; i++) sum[i] = a[i] + b[i];
+  return sum;
 }

@@ -1,23 +1,34 @@
 import { type Problem, visibleText } from '../../core/problem.ts';
 import { problemCure, problemSentence } from '../../core/problemText.ts';
-import { readMap } from '../../sim/heatPumpMap.ts';
 import type { BareAnswer, Warning } from './answer.ts';
 import { hotWaterCautions } from './hotWaterCautions.ts';
+import { sizeWarnings } from './sizeWarnings.ts';
 
 /** Seasonal factors that homes have shown lie between these; outside, an entry is more likely wrong than the house. */
 const LOWEST_PLAUSIBLE_FACTOR = 1.8;
 const HIGHEST_PLAUSIBLE_FACTOR = 4.5;
 /** Backup above this share of the heat is worth a word. */
 const MUCH_BACKUP = 0.1;
-/** Capacity at design conditions over design load: outside these the unit is far too small or too large (common practice, no source). */
-const FAR_UNDER = 0.75;
-const FAR_OVER = 1.5;
 /** Starts a year above which wear is worth a word (common practice, no source). */
 const MANY_STARTS = 5000;
 /** Share of the hours with heat above which reading outside the map weighs on the result. */
 const MUCH_OUTSIDE = 0.02;
 /** The coldest day of a series should come this near to the design temperature, K (common practice, no source). */
 const WEATHER_MARGIN = 6;
+
+/** Of columns that many runs share: the marked hours, and the lowest value. */
+const hoursMarked = oncePerColumn((column: Uint8Array) => column.reduce((sum, mark) => sum + mark, 0));
+const lowestOf = oncePerColumn((column: Float64Array) => column.reduce((least, value) => Math.min(least, value)));
+
+/** A figure of a column, found once for each column. */
+function oncePerColumn<C extends object>(of: (column: C) => number): (column: C) => number {
+  const known = new WeakMap<C, number>();
+  return (column) => {
+    const value = known.get(column) ?? of(column);
+    known.set(column, value);
+    return value;
+  };
+}
 
 /** What an assessor should look at before signing, each with its cause and a usual remedy. */
 export function warningsOf(answer: BareAnswer, found: readonly Problem[]): Warning[] {
@@ -78,36 +89,6 @@ function performanceWarnings({ factors, totals }: BareAnswer): Warning[] {
   return list;
 }
 
-function sizeWarnings({ plan, loaded, designLoad }: BareAnswer): Warning[] {
-  const outdoor = loaded.scenario.house.design.outdoorTemperature;
-  const { flowTemperature } = loaded.scenario;
-  const flow =
-    flowTemperature.method === 'curve' ? Math.max(...flowTemperature.points.map(([, y]) => y)) : flowTemperature.flow;
-  const point = new Float64Array(2);
-  readMap(plan.unitOnWeather.unit.full, outdoor, flow, point, 0);
-  const share = point[0] / designLoad;
-  const figures = `${point[0].toFixed(1)} kW at ${outdoor} °C and ${flow} °C flow, the design load is ${designLoad.toFixed(1)} kW`;
-  if (share < FAR_UNDER) {
-    return [
-      {
-        code: 'size.far-under',
-        text: `The unit is far smaller than the house needs: ${figures}.`,
-        remedy: 'Take the next size, or make sure that backup power and cost are accepted.',
-      },
-    ];
-  }
-  if (share > FAR_OVER) {
-    return [
-      {
-        code: 'size.far-over',
-        text: `The unit is far larger than the house needs: ${figures}.`,
-        remedy: 'A smaller unit starts and stops less and costs less.',
-      },
-    ];
-  }
-  return [];
-}
-
 function mapWarnings({ totals, plan }: BareAnswer): Warning[] {
   const list: Warning[] = [];
   const { hours } = totals;
@@ -125,7 +106,7 @@ function mapWarnings({ totals, plan }: BareAnswer): Warning[] {
       remedy: 'Larger emitters or a lower heating curve; the backup lifts the rest.',
     });
   }
-  const tooCold = plan.unitOnWeather.tooCold.reduce((sum, cold) => sum + cold, 0);
+  const tooCold = hoursMarked(plan.unitOnWeather.tooCold);
   if (tooCold > 0) {
     list.push({
       code: 'map.too-cold',
@@ -137,7 +118,7 @@ function mapWarnings({ totals, plan }: BareAnswer): Warning[] {
 }
 
 function weatherWarnings({ plan, loaded }: BareAnswer): Warning[] {
-  const coldest = plan.weather.trailingMeanTemperature.reduce((least, value) => Math.min(least, value));
+  const coldest = lowestOf(plan.weather.trailingMeanTemperature);
   const design = loaded.scenario.house.design.outdoorTemperature;
   if (coldest > design + WEATHER_MARGIN) {
     return [

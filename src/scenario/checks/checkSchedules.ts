@@ -1,7 +1,6 @@
+import { writtenDate } from '../../core/civilDate.ts';
 import { nearestName } from '../../core/nearest.ts';
 import { type Problem, shown } from '../../core/problem.ts';
-import { writtenDate } from '../../tariffs/civilDate.ts';
-import type { Tariff } from '../../tariffs/tariff.ts';
 import type { EntryPath } from '../entries/pathText.ts';
 import type { Scenario } from '../scenarioSchema.ts';
 import type { YamlFile } from '../yaml/yamlFile.ts';
@@ -14,8 +13,16 @@ interface When {
   readonly to?: string | undefined;
 }
 
-/** What does not go together in the rules of a scenario: set points, quiet hours, reheat windows. */
-export function checkSchedules(yaml: YamlFile, scenario: Scenario, present: Tariff | undefined): Problem[] {
+/**
+ * What does not go together in the rules of a scenario: set points, quiet hours, reheat windows.
+ *
+ * @param presentRates names of the rates of the first tariff, where it could be read
+ */
+export function checkSchedules(
+  yaml: YamlFile,
+  scenario: Scenario,
+  presentRates: readonly string[] | undefined,
+): Problem[] {
   const { need } = scenario.house;
   const lists: { path: EntryPath; rules: readonly When[] }[] = [
     { path: ['house', 'need', need.model === 'lumped' ? 'schedule' : 'days'], rules: rulesOf(need) },
@@ -30,7 +37,7 @@ export function checkSchedules(yaml: YamlFile, scenario: Scenario, present: Tari
   );
   if (need.model !== 'lumped') return problems;
   const setPoints = need.schedule.flatMap((rule, i) =>
-    checkSetPoint(yaml, ['house', 'need', 'schedule', i], rule, { listed: scenario.tariffs.length > 0, present }),
+    checkSetPoint(yaml, ['house', 'need', 'schedule', i], rule, { listed: scenario.tariffs.length > 0, presentRates }),
   );
   return [...problems, ...setPoints];
 }
@@ -69,7 +76,7 @@ function checkSetPoint(
   yaml: YamlFile,
   path: EntryPath,
   rule: { setPoint?: number | undefined; raise?: number | undefined; rate?: string | undefined },
-  tariffs: { listed: boolean; present: Tariff | undefined },
+  tariffs: { listed: boolean; presentRates: readonly string[] | undefined },
 ): Problem[] {
   const problems: Problem[] = [];
   if ((rule.setPoint === undefined) === (rule.raise === undefined)) {
@@ -78,12 +85,12 @@ function checkSetPoint(
   }
   if (rule.rate === undefined) return problems;
   if (!tariffs.listed) problems.push(yaml.problem([...path, 'rate'], { code: 'scenario.rate-needs-tariff' }));
-  if (tariffs.present !== undefined) problems.push(...checkRate(yaml, [...path, 'rate'], rule.rate, tariffs.present));
+  const { presentRates } = tariffs;
+  if (presentRates !== undefined) problems.push(...checkRate(yaml, [...path, 'rate'], rule.rate, presentRates));
   return problems;
 }
 
-function checkRate(yaml: YamlFile, path: EntryPath, rate: string, tariff: Tariff): Problem[] {
-  const names = [...new Set((tariff.rates ?? []).map((each) => each.name))];
+function checkRate(yaml: YamlFile, path: EntryPath, rate: string, names: readonly string[]): Problem[] {
   if (names.includes(rate)) return [];
   const near = nearestName(rate, names);
   const allowed = names.length > 0 ? names.map((name) => `'${shown(name, 30)}'`).join(', ') : 'no rates at all';

@@ -1,8 +1,8 @@
+import { WEEKDAY_NAMES } from '../../core/civilDate.ts';
 import { WATER_HEAT_CAPACITY } from '../../core/constants.ts';
 import type { HotWaterPlan } from '../../sim/hotWaterPlan.ts';
 import { hourlyProfile } from '../../sim/tappingProfiles.ts';
 import type { CivilClock } from '../../tariffs/civilClock.ts';
-import { WEEKDAY_NAMES } from '../../tariffs/civilDate.ts';
 import type { Scenario } from '../scenarioSchema.ts';
 import { stepsOfRule } from './schedules.ts';
 

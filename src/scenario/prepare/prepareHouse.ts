@@ -3,6 +3,7 @@ import type { House } from '../../sim/house.ts';
 import { type MassParameters, massParameters } from '../../sim/lumpedHouse.ts';
 import type { CivilClock } from '../../tariffs/civilClock.ts';
 import type { PreparedTariff } from '../../tariffs/preparedTariff.ts';
+import { type Kept, KeptKind } from '../kept.ts';
 import type { Scenario } from '../scenarioSchema.ts';
 import { stepsOfRule } from './schedules.ts';
 
@@ -42,8 +43,14 @@ export type PreparedHouse =
  * @param entry the scenario's house, checked
  * @param clock civil time of the year
  * @param present the first tariff, for set points that follow its rates
+ * @param kept where the scenarios of a batch keep their set points
  */
-export function prepareHouse(entry: HouseEntry, clock: CivilClock, present: PreparedTariff | undefined): PreparedHouse {
+export function prepareHouse(
+  entry: HouseEntry,
+  clock: CivilClock,
+  present: PreparedTariff | undefined,
+  kept?: Kept,
+): PreparedHouse {
   const { need } = entry;
   const { total, parts } = heatLossOf(entry);
   let mass: MassParameters | null = null;
@@ -56,7 +63,7 @@ export function prepareHouse(entry: HouseEntry, clock: CivilClock, present: Prep
     house: {
       heatLoss: total / 1000,
       designLoad: designLoadOf(entry),
-      setPoint: setPoints(need, clock, present),
+      setPoint: keptSetPoints(need, clock, present, kept),
       nominalSetPoint: need.setPoint,
       baseTemperature: need.model === 'degreeHours' ? (need.baseTemperature ?? null) : null,
       internalGains: need.internalGains / 1000,
@@ -65,6 +72,20 @@ export function prepareHouse(entry: HouseEntry, clock: CivilClock, present: Prep
       mass,
     },
   };
+}
+
+/** Columns of set points that the scenarios of a batch have in common. */
+const setPointColumns = new KeptKind<Float64Array>(64);
+
+function keptSetPoints(
+  need: HouseEntry['need'],
+  clock: CivilClock,
+  present: PreparedTariff | undefined,
+  kept?: Kept,
+): Float64Array {
+  const rules = need.model === 'lumped' ? need.schedule : need.days;
+  const key = kept?.key(present === undefined ? [clock] : [clock, present], need.setPoint, rules) ?? '';
+  return setPointColumns.of(kept, key, () => setPoints(need, clock, present));
 }
 
 /** Set point of each step: the first rule that holds, else the nominal one. */

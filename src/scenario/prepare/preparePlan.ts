@@ -1,4 +1,5 @@
 import { curveSetting, emitterSetting, type FlowSetting } from '../../sim/flowTemperature.ts';
+import type { HotWaterPlan } from '../../sim/hotWaterPlan.ts';
 import type { House } from '../../sim/house.ts';
 import { layMassOnWeather } from '../../sim/massOnWeather.ts';
 import type { HeatPumpUnit } from '../../sim/unit.ts';
@@ -8,6 +9,7 @@ import type { CivilClock } from '../../tariffs/civilClock.ts';
 import type { PreparedTariff } from '../../tariffs/preparedTariff.ts';
 import { prepareWeather } from '../../weather/prepareWeather.ts';
 import type { PreparedWeather } from '../../weather/series.ts';
+import { type Kept, KeptKind } from '../kept.ts';
 import type { LoadedScenario } from '../loadScenario.ts';
 import type { Scenario } from '../scenarioSchema.ts';
 import { prepareHotWater } from './prepareHotWater.ts';
@@ -24,34 +26,62 @@ export interface PlanParts {
   readonly present: PreparedTariff | undefined;
 }
 
-/** Weather and unit of a loaded scenario, prepared. */
-export function prepareParts(loaded: LoadedScenario): Pick<PlanParts, 'weather' | 'unitOnWeather'> {
-  const { site, weather: entry } = loaded.scenario;
-  const weather = prepareWeather(loaded.weather.series, {
-    altitude: site.altitude,
-    defaultRelativeHumidity: entry.relativeHumidity,
-  });
-  return { weather, unitOnWeather: layUnitOnWeather(prepareUnit(loaded.unit), weather) };
+/** What the scenarios of a batch may have in common; a unit on a weather takes about a megabyte. */
+const weathers = new KeptKind<PreparedWeather>(64);
+const unitsOnWeather = new KeptKind<UnitOnWeather>(64);
+const flowSettings = new KeptKind<FlowSetting>(64);
+const quietColumns = new KeptKind<Float64Array>(64);
+const hotWaterPlans = new KeptKind<HotWaterPlan>(64);
+
+/**
+ * Weather and unit of a loaded scenario, prepared.
+ *
+ * @param kept where the scenarios of a batch keep them
+ */
+export function prepareParts(loaded: LoadedScenario, kept?: Kept): Pick<PlanParts, 'weather' | 'unitOnWeather'> {
+  const { altitude } = loaded.scenario.site;
+  const defaultRelativeHumidity = loaded.scenario.weather.relativeHumidity;
+  const site = { altitude, defaultRelativeHumidity };
+  const { unit } = loaded;
+  const { series } = loaded.weather;
+  const weather = weathers.of(kept, kept?.key([series], site) ?? '', () => prepareWeather(series, site));
+  const lay = () => layUnitOnWeather(prepareUnit(unit), weather);
+  return { weather, unitOnWeather: unitsOnWeather.of(kept, kept?.key([unit, weather]) ?? '', lay) };
 }
 
-/** The plan of one run. */
-export function preparePlan(scenario: Scenario, parts: PlanParts): YearPlan {
+/**
+ * The plan of one run.
+ *
+ * @param kept where the scenarios of a batch keep what they have in common
+ */
+export function preparePlan(scenario: Scenario, parts: PlanParts, kept?: Kept): YearPlan {
   const { weather, unitOnWeather, clock, house, present } = parts;
   return {
     weather,
     house,
     massOnWeather: house.mass === null ? null : layMassOnWeather(house.mass, house, weather),
-    flow: flowSettingOf(scenario.flowTemperature, scenario.house.design.roomTemperature, weather),
+    flow: keptFlowSetting(scenario, weather, kept),
     unitOnWeather,
     resting: restingHours(scenario, unitOnWeather, weather),
-    quietShare: quietShares(scenario, clock),
+    quietShare: quietShares(scenario, clock, kept),
     inUseAllowance: scenario.heatPump.inUseAllowance,
     cycleWater: scenario.circulation.waterContent ?? usualCycleWater(unitOnWeather.unit),
     circulationPower: scenario.circulation.pumpPower / 1000,
     backup: backupOf(scenario),
     sourcePrices: sourcePricesOf(scenario, present),
-    hotWater: scenario.hotWater === undefined ? null : prepareHotWater(scenario.hotWater, clock),
+    hotWater: hotWaterOf(scenario, clock, kept),
   };
+}
+
+function keptFlowSetting({ flowTemperature, house }: Scenario, weather: PreparedWeather, kept?: Kept): FlowSetting {
+  const { roomTemperature } = house.design;
+  const make = () => flowSettingOf(flowTemperature, roomTemperature, weather);
+  return flowSettings.of(kept, kept?.key([weather], flowTemperature, roomTemperature) ?? '', make);
+}
+
+function hotWaterOf({ hotWater }: Scenario, clock: CivilClock, kept?: Kept): HotWaterPlan | null {
+  if (hotWater === undefined) return null;
+  return hotWaterPlans.of(kept, kept?.key([clock], hotWater) ?? '', () => prepareHotWater(hotWater, clock));
 }
 
 /** A flow setting from its entry; the room of the emitters is the design room where none is given. */
@@ -79,9 +109,13 @@ function restingHours(scenario: Scenario, onWeather: UnitOnWeather, weather: Pre
   return onWeather.tooCold.map((cold, i) => (cold === 1 || weather.temperature[i] < mode.switchTemperature ? 1 : 0));
 }
 
-function quietShares(scenario: Scenario, clock: CivilClock): Float64Array | null {
+function quietShares(scenario: Scenario, clock: CivilClock, kept?: Kept): Float64Array | null {
   const rules = scenario.heatPump.quietHours;
   if (rules.length === 0) return null;
+  return quietColumns.of(kept, kept?.key([clock], rules) ?? '', () => quietColumn(rules, clock));
+}
+
+function quietColumn(rules: Scenario['heatPump']['quietHours'], clock: CivilClock): Float64Array {
   const shares = new Float64Array(clock.hours).fill(1);
   for (const rule of rules.toReversed()) {
     const holds = stepsOfRule(rule, clock);

@@ -1,5 +1,5 @@
+import { MINUTES_PER_DAY, minuteOfDay, WEEKDAY_NAMES, type WrittenDate, writtenDate } from '../../core/civilDate.ts';
 import type { CivilClock } from '../../tariffs/civilClock.ts';
-import { minuteOfDay, WEEKDAY_NAMES, type WrittenDate, writtenDate } from '../../tariffs/civilDate.ts';
 import type { Weekday } from '../../tariffs/tariff.ts';
 
 /** When a rule holds; whatever is left out does not limit it. */
@@ -10,8 +10,6 @@ export interface WhenRule {
   readonly from?: string | undefined;
   readonly to?: string | undefined;
 }
-
-const MINUTES_PER_DAY = 1440;
 
 /**
  * Marks the steps in which a rule holds, read at the civil time of each step's beginning (MODEL section 1); the weekday

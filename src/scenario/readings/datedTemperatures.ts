@@ -1,7 +1,8 @@
+import { civilDay } from '../../core/civilDate.ts';
 import { hasErrors, type Problem } from '../../core/problem.ts';
+import { stampText } from '../../core/stampText.ts';
 import { createCellPlaces } from '../../weather/read/cellPlace.ts';
 import { checkValues } from '../../weather/read/checkValues.ts';
-import { civilDay, stampText } from '../../weather/read/civilDays.ts';
 import { columnLabel } from '../../weather/read/columnPlan.ts';
 import { offsetOfHeader } from '../../weather/read/columnWords.ts';
 import { createFindings, type Findings } from '../../weather/read/findings.ts';

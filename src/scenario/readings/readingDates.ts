@@ -1,6 +1,6 @@
+import { civilDay, dayExists, dayNumber } from '../../core/civilDate.ts';
 import { shown } from '../../core/problem.ts';
-import { dateText } from '../../tariffs/civilDate.ts';
-import { civilDay, dayExists, dayNumber } from '../../weather/read/civilDays.ts';
+import { dateText } from '../../core/stampText.ts';
 import { type StampParts, scanStamp } from '../../weather/read/scanStamp.ts';
 import type { MeterTable } from './meterTable.ts';
 import type { ReadingFaults } from './readingFaults.ts';

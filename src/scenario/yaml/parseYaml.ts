@@ -4,7 +4,7 @@ import type { InputBytes } from '../fileSource.ts';
 import { guardYaml } from './guardYaml.ts';
 import { syntaxHint } from './syntaxHint.ts';
 import { textOf } from './textOf.ts';
-import { YamlFile } from './yamlFile.ts';
+import { ParsedYamlFile, type YamlFile } from './yamlFile.ts';
 import { type KeyFault, keyFaults } from './yamlKeys.ts';
 
 /** Largest scenario, unit or tariff file that is read, bytes. */
@@ -67,7 +67,7 @@ function valuesOf(file: string, parsed: { text: string; document: Document; line
     };
   }
   if (typeof raw === 'object' && raw !== null && !Array.isArray(raw)) {
-    return { yaml: new YamlFile(file, { ...parsed, raw }), problems: [] };
+    return { yaml: new ParsedYamlFile(file, { ...parsed, raw }), problems: [] };
   }
   const found = Array.isArray(raw) ? 'a list' : raw === null ? 'nothing but comments' : `only '${shown(raw)}'`;
   const offset = raw === null ? 0 : (parsed.document.contents?.range?.[0] ?? 0);

@@ -12,10 +12,35 @@ export interface Place {
 /** What a problem says beside its place. */
 export type Fault = Pick<Problem, 'code'> & Partial<Pick<Problem, 'severity' | 'found' | 'allowed' | 'unit' | 'hint'>>;
 
-/** A YAML file that could be parsed: its plain values, and the places where they stand. */
-export class YamlFile {
+/** Plain values of a structured file, and the places where they stand. */
+export interface YamlFile {
   readonly file: string;
   /** The values as written, without any default. */
+  readonly raw: unknown;
+  /** The file in which the entry at a path is written: `file`, unless the values come from several. */
+  owner(path: EntryPath): string;
+  /** Where the value at a path stands; for what is not there, the key of the deepest section that is. */
+  place(path: EntryPath): Place;
+  /** Where the key at a path stands. */
+  keyPlace(path: EntryPath): Place;
+  /** A problem at the value of a path. */
+  problem(path: EntryPath, fault: Fault): Problem;
+  /** A problem at the key of a path. */
+  keyProblem(path: EntryPath, fault: Fault): Problem;
+  /**
+   * Places inside a text at a path, for tables written as text blocks.
+   *
+   * @returns a function from line and column of the text (counted from 1) to the place in the file; for other forms than a
+   * literal block (`|`) every place is that of the text's beginning
+   */
+  textPlaces(path: EntryPath): (line: number, column: number) => Place;
+  /** Whether the text at a path is a literal block, which keeps its lines. */
+  isLiteralBlock(path: EntryPath): boolean;
+}
+
+/** A YAML file that could be parsed. */
+export class ParsedYamlFile implements YamlFile {
+  readonly file: string;
   readonly raw: unknown;
   readonly #document: Document;
   readonly #lines: LineCounter;
@@ -29,33 +54,27 @@ export class YamlFile {
     this.#text = parsed.text;
   }
 
-  /** Where the value at a path stands; for what is not there, the key of the deepest section that is. */
+  owner(): string {
+    return this.file;
+  }
+
   place(path: EntryPath): Place {
     return this.#placeOf(this.#walk(path).offset);
   }
 
-  /** Where the key at a path stands. */
   keyPlace(path: EntryPath): Place {
     const { key, offset } = this.#walk(path);
     return this.#placeOf(key?.range?.[0] ?? offset);
   }
 
-  /** A problem at the value of a path. */
   problem(path: EntryPath, fault: Fault): Problem {
     return this.#problemAt(this.place(path), path, fault);
   }
 
-  /** A problem at the key of a path. */
   keyProblem(path: EntryPath, fault: Fault): Problem {
     return this.#problemAt(this.keyPlace(path), path, fault);
   }
 
-  /**
-   * Places inside a text at a path, for tables written as text blocks.
-   *
-   * @returns a function from line and column of the text (counted from 1) to the place in the file; for other forms than a
-   * literal block (`|`) every place is that of the text's beginning
-   */
   textPlaces(path: EntryPath): (line: number, column: number) => Place {
     const { node, offset } = this.#walk(path);
     const start = this.#placeOf(offset);
@@ -65,7 +84,6 @@ export class YamlFile {
     return (line, column) => ({ line: header + line, column: indent + column });
   }
 
-  /** Whether the text at a path is a literal block, which keeps its lines. */
   isLiteralBlock(path: EntryPath): boolean {
     const { node } = this.#walk(path);
     return isScalar(node) && node.type === Scalar.BLOCK_LITERAL;

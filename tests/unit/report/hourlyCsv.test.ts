@@ -87,6 +87,7 @@ describe('the columns of the hourly CSV', () => {
     ]);
     expect(withMass.filter((name) => !plainNames.includes(name)).sort()).toEqual([
       'indoorTemperature',
+      'massTemperature',
       'unlimitedNeed',
     ]);
     expect(new Set(withWater).size).toBe(withWater.length);

@@ -105,19 +105,52 @@ describe('the result document', () => {
       expect(sum(Object.values(cost.byRate).map((rate) => rate.hours))).toBeCloseTo(8760, 6);
       expect(sum(Object.values(cost.byTax))).toBeCloseTo(taxes, 6);
       expect(sum(cost.monthly.map((month) => month.total))).toBeCloseTo(total, 6);
-      expect(cost.kWh).toBeCloseTo(plain.annual.electricity.total, 6);
+      expect(cost.kWh).toBeCloseTo(plain.annual.electricity.total + cost.household.kWh, 6);
+      expect(cost.systemElectricity).toBeCloseTo(total - cost.household.total, 9);
+      expect(cost.systemElectricity + cost.systemFuel + cost.systemService).toBeCloseTo(cost.systemTotal, 9);
       expect(cost.saving).toBe(cost.boilerTotal! - cost.systemTotal);
     }
   });
 
   it('has a boiler whose parts add up to what it costs on the first tariff', () => {
     const { boiler } = plain;
-    const { fuelCost, standing, taxes, service, pumpCost, total } = boiler!;
-    expect(fuelCost + standing + taxes + service + Number(pumpCost)).toBeCloseTo(total, 9);
+    const { fuelCost, standing, taxes, service, electricityCost, total } = boiler!;
+    expect(fuelCost + standing + taxes + service + Number(electricityCost)).toBeCloseTo(total, 9);
     expect(total).toBe(plain.costs[0]!.boilerTotal);
     // Efficiency 0.88 and a gas price of 0.095 EUR/kWh, as the scenario says.
     expect(boiler!.fuel).toBeCloseTo(plain.annual.spaceHeatNeed / 0.88, 6);
     expect(fuelCost).toBeCloseTo(boiler!.fuel * 0.095, 6);
+  });
+
+  it('has the household’s bill beside the whole one: its own kWh, standing charge and taxes', () => {
+    for (const { household, standing, byRate } of plain.costs) {
+      // 2900 kWh a year, as the scenario says
+      expect(household.kWh).toBeCloseTo(2900, 8);
+      expect(household.standing).toBe(standing);
+      expect(sum(Object.values(household.byRate).map(({ kWh }) => kWh))).toBeCloseTo(2900, 8);
+      expect(Object.keys(household.byRate)).toEqual(Object.keys(byRate));
+    }
+    const [flat] = plain.costs;
+    // (2900 kWh at 0.29 and twelve months at 11.50) and 20 % tax
+    expect(flat?.household.total).toBeCloseTo((2900 * 0.29 + 12 * 11.5) * 1.2, 6);
+  });
+
+  it('has break-even, other prices and the whole life of the first tariff', () => {
+    const { costs, sensitivity, breakEven, wholeLife, annual } = plain;
+    expect(sensitivity?.[4]?.annualSaving).toBe(costs[0]?.saving);
+    expect(sensitivity?.[4]?.netPresentValue).toBe(wholeLife?.netPresentValue);
+    // without a fuel beside it, heat over electricity is H4
+    expect(breakEven?.heatOverElectricity).toBeCloseTo(Number(annual.seasonalFactor.h4), 9);
+    // 24 500 less 8500 less 7800; service of 160 a year
+    expect(wholeLife).toMatchObject({
+      netCapital: 8200,
+      discountRate: 0.03,
+      electricityDrift: 0.005,
+      fuelDrift: 0.015,
+    });
+    expect(costs[0]?.systemService).toBe(160);
+    expect(wholeLife?.years).toHaveLength(20);
+    expect(wholeLife?.years.at(-1)?.balance).toBe(wholeLife?.netPresentValue);
   });
 
   it('names the files with the SHA-256 of their bytes, in full', () => {
@@ -148,10 +181,23 @@ describe('what is not there', () => {
   mode: { kind: parallel }
 `;
 
+  const WHOLE_LIFE = `wholeLife:
+  capital: 24500
+  grant: 8500
+  replacedBoiler: 7800
+  years: 20
+  discountRate: 3
+  electricityDrift: 0.5
+  fuelDrift: 1.5
+  servicePerYear: 160
+`;
+
   it('has a word instead of a number', () => {
-    const document = resultDocument(demoAnswer([TARIFFS, ''], ['  floorArea: 138\n', '']), '1');
+    const document = resultDocument(demoAnswer([TARIFFS, ''], [WHOLE_LIFE, ''], ['  floorArea: 138\n', '']), '1');
+    expect(document.sensitivity).toBeUndefined();
+    expect(document.breakEven).toBeUndefined();
     expect(document.costs).toEqual([]);
-    expect(document.boiler?.pumpCost).toBe('no tariff');
+    expect(document.boiler?.electricityCost).toBe('no tariff');
     const { fuelCost, standing, taxes, service, total } = document.boiler!;
     expect(total).toBeCloseTo(fuelCost + standing + taxes + service, 9);
     expect(document.house.heatLossPerArea).toBe('no floor area');

@@ -25,6 +25,16 @@ const humid = (from: string, to: string) => ({
   'unit.yaml': `${unitText.replace(from, to)}defrost: { method: humidity }\n`,
 });
 
+const shares = (value: number) => `[${Array(24).fill(value).join()}]`;
+/** A section added to the scenario. */
+const beside = (section: string, tariffs = 'tariffs: [tariff.yaml]') =>
+  house('tariffs: [tariff.yaml]', `${section}\n${tariffs}`);
+const byRate = (...rates: string[]) =>
+  beside(
+    `carbon: { electricity: { given: byRate, factors: [${rates.map((rate) => `{ rate: ${rate}, factor: 0.3 }`).join()}] } }`,
+  );
+const otherTariff = 'name: Other\npricesStated: withTax\nrates: [{ name: all, price: 0.3 }]\n';
+
 const cases: Record<keyof typeof scenarioProblems | keyof typeof mapProblems, Case> = {
   'yaml.not-text': [house('name', '\u0000'), 'this is not a text file'],
   'yaml.syntax': [house('name: Test', 'name: a: Test'), ':1:7  the file cannot be understood here: Nested mappings'],
@@ -148,11 +158,59 @@ const cases: Record<keyof typeof scenarioProblems | keyof typeof mapProblems, Ca
       ...lumped('      - { name: cheap, raise: 1, rate: night }\n', ''),
       'tariff.yaml': 'name: b\nblocks: { per: month, prices: [{ price: 0.3 }] }\n',
     },
-    "backup.mode compares prices by the hour, but the first tariff 'b' is priced by blocks alone",
+    "backup.mode compares prices by the hour, but the tariff 'b' is priced by blocks alone",
   ],
   'scenario.no-shares': [
     lumped('useTemperature: 42', `shares: [${Array(24).fill(0).join()}]`),
     'hotWater.draw.shares are all zero',
+  ],
+  'scenario.weekend-alone': [
+    beside(`household: { given: profile, kWhPerYear: 2000, weekendShares: ${shares(1)} }`),
+    ':20:48  household.weekendShares stands without the shares of the other days',
+  ],
+  'scenario.boiler-needs-tariff': [
+    beside('boiler: { efficiency: 1, fuel: { kind: electricity } }', ''),
+    'boiler.fuel is electricity without a price, which is on the household’s tariff, but no tariff is named',
+  ],
+  'scenario.cylinder-without-hot-water': [
+    beside('boiler: { efficiency: 0.9, fuel: { kind: naturalGas, price: 0.1 }, cylinderLoss: 400 }'),
+    'boiler.cylinderLoss is 400 kWh a year, but no hot water is entered',
+  ],
+  'scenario.carbon-needs-tariff': [
+    { 'house.yaml': (byRate('night')['house.yaml'] ?? '').replace('tariffs: [tariff.yaml]', '') },
+    'carbon.electricity.factors go by the rates of a tariff, but no tariff is named',
+  ],
+  'scenario.carbon-no-such-rate': [
+    byRate('night', 'dey'),
+    "carbon.electricity.factors[1].rate is 'dey'; the first tariff has 'night', 'day'\n    → perhaps day is meant",
+  ],
+  'scenario.carbon-rate-twice': [
+    byRate('night', 'day', 'night'),
+    "carbon.electricity.factors[2].rate is 'night', which has a factor already",
+  ],
+  'scenario.carbon-rate-missing': [
+    byRate('night'),
+    "carbon.electricity.factors lack the rate 'day' of the first tariff",
+  ],
+  'scenario.whole-life-needs-boiler': [
+    beside('wholeLife: { capital: 20000 }'),
+    ':20:1  wholeLife compares a heat pump with a boiler over the years, but no boiler is entered',
+  ],
+  'scenario.whole-life-needs-tariff': [
+    beside('wholeLife: { capital: 20000 }', ''),
+    'wholeLife needs the cost of a year, but no tariff is named',
+  ],
+  'scenario.taxes-differ': [
+    { ...beside('', 'tariffs: [tariff.yaml, other.yaml]'), 'other.yaml': otherTariff },
+    // the first tariff of these files lists no tax and adds none
+    ':21:24  warning: the prices of this tariff hold the taxes; those of the first tariff are stated without tax, and none is listed',
+  ],
+  'scenario.taxes-mixed': [
+    {
+      ...beside('', 'tariffs: [{ supplies: [{ file: tariff.yaml }, { file: other.yaml, from: 05-01 }] }]'),
+      'other.yaml': otherTariff,
+    },
+    'warning: the prices of this tariff state the taxes in more than one way',
   ],
   'scenario.frozen-water': [
     lumped('amplitude: 4', 'amplitude: 11'),

@@ -17,7 +17,7 @@ describe('a scenario', () => {
       weather: { file: 'weather.csv', series: { hours: 8760, offsetMinutes: 60 } },
       clock: { zone: 'Europe/Berlin', calendarYear: 2025, hours: 8760 },
     });
-    expect(loaded?.tariffs.map(({ file, tariff, prepared }) => [file, tariff.name, prepared.price[0]])).toEqual([
+    expect(loaded?.tariffs.map(({ file, name, prepared }) => [file, name, prepared.price[0]])).toEqual([
       ['tariff.yaml', 'Test tariff', 0.2],
     ]);
   });

@@ -2,10 +2,10 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import type { Problem } from '../../../src/core/problem.ts';
 import { problemText } from '../../../src/core/problemText.ts';
+import { zoneOffsets } from '../../../src/core/zoneOffsets.ts';
 import { readPriceSeries } from '../../../src/tariffs/readPriceSeries.ts';
 import { instantsOf, readStamp } from '../../../src/tariffs/seriesStamps.ts';
 import type { PriceSeriesSettings } from '../../../src/tariffs/tariff.ts';
-import { zoneOffsets } from '../../../src/tariffs/zoneOffsets.ts';
 import { codes } from './sampleTariffs.ts';
 
 const settings: PriceSeriesSettings = { file: 'prices.csv', unit: 'perKWh', stamps: 'withOffset' };

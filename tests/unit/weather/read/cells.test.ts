@@ -1,7 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { cellKind, columnKind } from '../../../../src/weather/read/cellKinds.ts';
-import { civilDay, dayNumber, dayOfYear, offsetText, stampText } from '../../../../src/weather/read/civilDays.ts';
 import { columnLabel } from '../../../../src/weather/read/columnPlan.ts';
 import { offsetOfHeader, plainWords, quantityOf } from '../../../../src/weather/read/columnWords.ts';
 import { guessDecimal, guessDelimiter } from '../../../../src/weather/read/delimiter.ts';
@@ -14,7 +13,6 @@ import { type StampParts, scanStamp } from '../../../../src/weather/read/scanSta
 import { findRowOrder } from '../../../../src/weather/read/timeStep.ts';
 import { timesOfDay } from '../../../../src/weather/read/timesOfDay.ts';
 import { unitOfHeader } from '../../../../src/weather/read/unitWords.ts';
-import { zoneSpans } from '../../../../src/weather/read/zoneSpans.ts';
 
 const POINT = 46;
 const COMMA = 44;
@@ -271,20 +269,7 @@ describe('the words of a header', () => {
 });
 
 describe('small parts of the reader', () => {
-  it('days are numbered as the Gregorian calendar counts them', () => {
-    expect(dayNumber(1970, 3, 1)).toBe(59);
-    expect(civilDay(59)).toEqual({ year: 1970, month: 3, day: 1 });
-    expect(dayOfYear({ month: 3, day: 1 }, false)).toBe(59);
-    for (let day = -70_000; day < 90_000; day += 13) {
-      const { year, month, day: dayOfMonth } = civilDay(day);
-      expect(Date.UTC(year, month - 1, dayOfMonth)).toBe(day * 86_400_000);
-      expect(dayNumber(year, month, dayOfMonth)).toBe(day);
-    }
-  });
-
-  it('stamps and offsets are written for people', () => {
-    expect(stampText(dayNumber(2019, 7, 1) * 1440 + 840, true)).toBe('2019-07-01 14:00');
-    expect(offsetText(-570)).toBe('UTC-09:30');
+  it('a column is named by its number and its header', () => {
     expect(columnLabel(1, ['date', 'T_out'])).toBe('column 2 “T_out”');
   });
 
@@ -332,16 +317,5 @@ describe('small parts of the reader', () => {
     ]);
     expect(hourRuns(24, () => true)).toEqual([{ first: 0, length: 24 }]);
     expect(hourRuns(24, () => false)).toEqual([]);
-  });
-
-  it('the spans of a zone are those of its law', () => {
-    // Germany, 2019: summer time from 31 March 01:00 UTC to 27 October 01:00 UTC (Directive 2000/84/EC).
-    const spans = zoneSpans('Europe/Berlin', Date.UTC(2019, 0, 1) / 60_000, Date.UTC(2020, 0, 1) / 60_000);
-    expect(spans?.[0]?.offset).toBe(60);
-    expect(spans?.slice(1)).toEqual([
-      { from: Date.UTC(2019, 2, 31, 1) / 60_000, offset: 120 },
-      { from: Date.UTC(2019, 9, 27, 1) / 60_000, offset: 60 },
-    ]);
-    expect(zoneSpans('Europe/Atlantis', 0, 1440)).toBeUndefined();
   });
 });

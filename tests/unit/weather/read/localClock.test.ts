@@ -1,7 +1,7 @@
 import { DateTime } from 'luxon';
 import { describe, expect, it } from 'vitest';
+import { zoneOffsets } from '../../../../src/core/zoneOffsets.ts';
 import { keepsLocalClock, localToStandard } from '../../../../src/weather/read/localClock.ts';
-import { zoneSpans } from '../../../../src/weather/read/zoneSpans.ts';
 import { type Hour, header, plainFile, plainRows, read, syntheticYear } from './syntheticYear.ts';
 
 /** Stamps of a zone's own clock, written by the luxon library, for instants given in the zone's standard time. */
@@ -145,7 +145,7 @@ describe('clocks that are not local', () => {
 describe('the signs of a local clock', () => {
   const zone = 'Europe/Berlin';
   const minuteOf = (year: number) => Date.UTC(year, 0, 1) / 60_000;
-  const spans = zoneSpans(zone, minuteOf(2019), minuteOf(2021)) ?? [];
+  const spans = zoneOffsets(zone, minuteOf(2019), minuteOf(2021)) ?? [];
   const local = (year: number, from: number, to: number) =>
     Array.from({ length: to - from }, (_, i) => {
       const time = DateTime.fromMillis((minuteOf(year) + (from + i) * 60) * 60_000, { zone });

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { zoneOffsets } from '../../../src/tariffs/zoneOffsets.ts';
+import { zoneOffsets } from '../../../src/core/zoneOffsets.ts';
 
 const minuteOf = (...[year, month, day, hour]: number[]) => Date.UTC(year, month - 1, day, hour) / 60_000;
 

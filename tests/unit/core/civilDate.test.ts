@@ -1,13 +1,14 @@
 import { describe, expect, test } from 'vitest';
 import {
-  dateText,
+  civilDay,
+  dayExists,
   dayNumber,
+  dayOfYear,
   isLeapYear,
   minuteOfDay,
-  timeText,
   weekdayOf,
   writtenDate,
-} from '../../../src/tariffs/civilDate.ts';
+} from '../../../src/core/civilDate.ts';
 
 describe('dates as written', () => {
   test('are read with their year or for every year', () => {
@@ -21,16 +22,11 @@ describe('dates as written', () => {
     'that do not exist are refused: %j',
     (text) => expect(writtenDate(text)).toBeUndefined(),
   );
-
-  test('are written with two digits for month and day', () => {
-    expect(dateText(2025, 3, 1)).toBe('2025-03-01');
-  });
 });
 
 describe('times of day', () => {
   test('are minutes from 0 to 1440', () => {
     expect(['00:00', '22:30', '24:00'].map(minuteOfDay)).toEqual([0, 1350, 1440]);
-    expect(timeText(1350)).toBe('22:30');
   });
 
   test.each(['24:01', '12:60', '7:00', '22', '', '22:30:00'])('that no clock shows are refused: %j', (text) =>
@@ -46,5 +42,37 @@ describe('days', () => {
 
   test('29 February exists by the Gregorian rule', () => {
     expect([2024, 2025, 1900, 2000].map(isLeapYear)).toEqual([true, false, false, true]);
+  });
+
+  test('days are numbered as the Gregorian calendar counts them', () => {
+    expect(dayNumber(1970, 3, 1)).toBe(59);
+    expect(civilDay(59)).toEqual({ year: 1970, month: 3, day: 1 });
+    expect(dayOfYear({ month: 3, day: 1 }, false)).toBe(59);
+    for (let day = -70_000; day < 90_000; day += 13) {
+      const { year, month, day: dayOfMonth } = civilDay(day);
+      expect(Date.UTC(year, month - 1, dayOfMonth)).toBe(day * 86_400_000);
+      expect(dayNumber(year, month, dayOfMonth)).toBe(day);
+    }
+  });
+
+  test('of a month have their number, 29 February in leap years', () => {
+    for (const [year, month, day, exists] of [
+      [2025, 1, 31, true],
+      [2025, 4, 31, false],
+      [2024, 2, 29, true],
+      [2025, 2, 29, false],
+      [2025, 13, 1, false],
+      [2025, 0, 1, false],
+      [2025, 6, 0, false],
+      [2025, Number.NaN, 1, false],
+    ] as const) {
+      expect(dayExists(year, month, day), `${year}-${month}-${day}`).toBe(exists);
+    }
+  });
+
+  test('of a year count from 0; in a common year 29 February is where 1 March is', () => {
+    expect([1, 2, 3, 12].map((month) => dayOfYear({ month, day: 1 }, false))).toEqual([0, 31, 59, 334]);
+    expect(dayOfYear({ month: 3, day: 1 }, true)).toBe(60);
+    expect(dayOfYear({ month: 2, day: 29 }, false)).toBe(dayOfYear({ month: 3, day: 1 }, false));
   });
 });

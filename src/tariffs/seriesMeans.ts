@@ -1,29 +1,36 @@
 import type { CivilClock } from './civilClock.ts';
-import type { PriceSeries } from './tariff.ts';
 
-/** The series' mean prices of a clock's steps, and where it could not give one. */
-export interface SeriesPrices {
-  /** Mean price of minutes [from, to) of a step, money per kWh. */
+/** Regular values from an instant on. */
+export interface RegularValues {
+  /** Beginning of the first value, minutes since 1970-01-01T00:00Z. */
+  readonly startMinute: number;
+  /** 1 to 60 whole minutes. */
+  readonly stepMinutes: number;
+  readonly values: Float64Array;
+}
+
+/** The series' means over a clock's steps, and where it could not give one. */
+export interface SeriesMeans {
+  /** Mean of minutes [from, to) of a step. */
   meanOf(step: number, from: number, to: number): number;
-  /** Minutes for which the price of a year before or after was taken, so far. */
+  /** Minutes for which the value of a year before or after was taken, so far. */
   borrowedMinutes(): number;
-  /** First instant without a price so far, minutes since 1970-01-01T00:00Z. */
+  /** First instant without a value so far, minutes since 1970-01-01T00:00Z. */
   firstMissing(): number | undefined;
 }
 
 const MILLIS_PER_MINUTE = 60_000;
 
 /**
- * Looks up a price series at the minutes of a year. An instant that the series does not reach takes the price of one
- * year later or earlier: the year is taken as periodic, so that a series in local time serves weather in another
- * offset.
+ * Looks up a series at the minutes of a year. An instant that the series does not reach takes the value of one year later
+ * or earlier: the year is taken as periodic, so that a series in local time serves weather in another offset.
  *
  * @param clock the year's civil time; where 29 February is skipped, the year that is added or taken off still has it
- * @param series money per kWh, regular steps of 1 to 60 minutes
+ * @param series regular steps of 1 to 60 minutes
  */
-export function seriesPrices(clock: CivilClock, series: PriceSeries): SeriesPrices {
-  const { startMinute, stepMinutes, prices } = series;
-  const length = prices.length * stepMinutes;
+export function seriesMeans(clock: CivilClock, series: RegularValues): SeriesMeans {
+  const { startMinute, stepMinutes, values } = series;
+  const length = values.length * stepMinutes;
   const { startMillis, hours } = clock;
   const yearMinutes = (startMillis[hours - 1] - startMillis[0]) / MILLIS_PER_MINUTE + 60;
   let borrowed = 0;
@@ -39,14 +46,14 @@ export function seriesPrices(clock: CivilClock, series: PriceSeries): SeriesPric
     const first = startMillis[step] / MILLIS_PER_MINUTE + from - startMinute;
     const index = Math.floor(first / stepMinutes);
     const end = first + to - from;
-    if (index >= 0 && index < prices.length && end <= (index + 1) * stepMinutes) return prices[index];
+    if (index >= 0 && index < values.length && end <= (index + 1) * stepMinutes) return values[index];
     let sum = 0;
     for (let minute = first; minute < end; ) {
       const found = reached(minute);
       const at = Math.floor(found / stepMinutes);
       const count = found < 0 ? 1 : Math.min(end - minute, (at + 1) * stepMinutes - found);
       if (found < 0) missing ??= minute + startMinute;
-      else sum += count * prices[at];
+      else sum += count * values[at];
       if (found !== minute) borrowed += count;
       minute += count;
     }
