@@ -31,12 +31,14 @@ describe('the examples of the docs', () => {
   test.each([
     ['house.yaml', 'scenario'],
     ['set-back.yaml', 'scenario'],
+    ['money.yaml', 'scenario'],
     ['unit.yaml', 'unit'],
     ['unit-from-files.yaml', 'unit'],
     ['unit-with-label.yaml', 'unit'],
     ['night.yaml', 'tariff'],
     ['dynamic.yaml', 'tariff'],
     ['read.yaml', 'read'],
+    ['plan.yaml', 'plan'],
     ['weather.csv', 'weather'],
     ['prices.csv', 'priceSeries'],
   ])('%s is a sound %s', (name, kind) => {
@@ -47,7 +49,11 @@ describe('the examples of the docs', () => {
 
   test('are all named above, or named by one of these', () => {
     expect([...examples.keys()].sort()).toEqual(
-      ['capacity.csv', 'dynamic.yaml', 'house.yaml', 'input.csv', 'night.yaml', 'prices.csv'].concat([
+      ['capacity.csv', 'dynamic.yaml', 'homes.csv', 'house.yaml', 'household.csv', 'input.csv'].concat([
+        'money.yaml',
+        'night.yaml',
+        'plan.yaml',
+        'prices.csv',
         'read.yaml',
         'set-back.yaml',
         'unit-from-files.yaml',

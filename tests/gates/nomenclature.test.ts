@@ -32,6 +32,8 @@ function figuresOf(schema: z.core.$ZodType, path: string): string[] {
   if (schema instanceof z.ZodObject) {
     return Object.entries(schema.shape).flatMap(([key, entry]) => figuresOf(entry, `${path}.${key}`));
   }
+  // months have the keys of their year
+  if (schema instanceof z.ZodArray) return path.endsWith('.monthly') ? [] : figuresOf(schema.def.element, `${path}[]`);
   if (schema instanceof z.ZodNumber) return [path];
   if (schema instanceof z.ZodUnion) {
     return schema.options.some((option) => option instanceof z.ZodNumber) ? [path] : [];
@@ -39,13 +41,27 @@ function figuresOf(schema: z.core.$ZodType, path: string): string[] {
   return [];
 }
 
-const { annual, costs, boiler: boilerEntry, carbon, house } = resultSchema.shape;
+const {
+  annual,
+  costs,
+  boiler: boilerEntry,
+  breakEven,
+  sensitivity,
+  wholeLife,
+  carbon,
+  house,
+  fieldStudies,
+} = resultSchema.shape;
 const figures = [
   ...figuresOf(annual, 'annual'),
   ...figuresOf(costs.def.element, 'costs[]'),
   ...figuresOf(boilerEntry, 'boiler'),
+  ...figuresOf(breakEven, 'breakEven'),
+  ...figuresOf(sensitivity, 'sensitivity'),
+  ...figuresOf(wholeLife, 'wholeLife'),
   ...figuresOf(carbon, 'carbon'),
   ...figuresOf(house, 'house'),
+  ...figuresOf(fieldStudies.def.element, 'fieldStudies[]'),
 ];
 
 describe('the nomenclature', () => {

@@ -1,7 +1,10 @@
+import { batchProblems } from './batchProblems.ts';
 import { fileProblems } from './fileProblems.ts';
+import { hourProblems } from './hourProblems.ts';
 import { labelProblems } from './labelProblems.ts';
 import { mapProblems } from './mapProblems.ts';
 import { readingProblems } from './readingProblems.ts';
+import { reportProblems } from './reportProblems.ts';
 import { scenarioProblems } from './scenarioProblems.ts';
 import { tariffProblems } from './tariffProblems.ts';
 import { weatherProblems } from './weatherProblems.ts';
@@ -24,6 +27,9 @@ export const problemCatalogue = {
   ...mapProblems,
   ...readingProblems,
   ...labelProblems,
+  ...hourProblems,
+  ...batchProblems,
+  ...reportProblems,
 } as const satisfies Record<string, ProblemKind>;
 
 export type ProblemCode = keyof typeof problemCatalogue;

@@ -4,6 +4,10 @@ export const readingProblems = {
     says: 'no readings were found',
     cure: 'write a line of names, such as “date;reading kWh”, and a line for each reading below it',
   },
+  'readings.long-line': {
+    says: 'this line has {found} characters; at most {allowed} are read',
+    cure: 'this is no table with one reading a line: export the data again as CSV text',
+  },
   'readings.too-many-lines': {
     says: 'the file has {found} lines; at most {allowed} are read',
     cure: 'one reading a day is enough; cut the file to the last years',

@@ -60,6 +60,14 @@ export const tariffProblems = {
     says: 'the price series {found} could not be used, so this tariff cannot be priced',
     cure: 'cure the faults of the series first',
   },
+  'series.long-line': {
+    says: 'this line has {found} characters; at most {allowed} are read',
+    cure: 'this is no table with one value a line: export the data again as CSV text',
+  },
+  'series.too-many-lines': {
+    says: 'the file has {found} lines; at most {allowed} are read',
+    cure: "cut the file to the scenario's calendar year",
+  },
   'series.quotes': {
     says: 'a quotation mark is not closed or stands in the wrong place',
     cure: 'put quotation marks at both ends of a cell, or at neither',

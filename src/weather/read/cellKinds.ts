@@ -1,4 +1,4 @@
-import { dayExists } from './civilDays.ts';
+import { dayExists } from '../../core/civilDate.ts';
 import { isMissingWord } from './missingMarks.ts';
 import { DECIMAL_COMMA, DECIMAL_POINT, parseNumber } from './parseNumber.ts';
 import { type StampParts, scanStamp } from './scanStamp.ts';

@@ -1,5 +1,5 @@
 import { HOURS_OF_LEAP_YEAR } from '../../core/constants.ts';
-import { stampText } from './civilDays.ts';
+import { stampText } from '../../core/stampText.ts';
 import { nominalStart } from './stampFields.ts';
 
 /** Consecutive hours of the year, which may run over its end. */

@@ -1,5 +1,5 @@
 import { HOURS_OF_COMMON_YEAR, HOURS_OF_LEAP_YEAR } from '../../core/constants.ts';
-import { stampText } from './civilDays.ts';
+import { stampText } from '../../core/stampText.ts';
 import type { Findings } from './findings.ts';
 import type { RawRows } from './readRows.ts';
 import { stepText } from './timeStep.ts';

@@ -1,4 +1,4 @@
-import type { ZoneSpan } from './zoneSpans.ts';
+import type { OffsetSpan } from '../../core/zoneOffsets.ts';
 
 /** Rows lie within this of a clock change to tell something about it, minutes. */
 const NEAR = 240;
@@ -10,7 +10,7 @@ const MOST_IRREGULAR = 5000;
 
 /** A local clock: its offsets, and the offset of standard time onto which it is converted. */
 export interface LocalClock {
-  readonly spans: readonly ZoneSpan[];
+  readonly spans: readonly OffsetSpan[];
   readonly standardOffset: number;
   /** Whether the file runs backwards in time. */
   readonly backwards: boolean;
@@ -46,19 +46,21 @@ export function localToStandard(readings: Float64Array, clock: LocalClock): Floa
 }
 
 /** The first span that has not ended at this reading of its clock, searched from a near one. */
-function earliestSpan(spans: readonly ZoneSpan[], reading: number, near: number): number {
+function earliestSpan(spans: readonly OffsetSpan[], reading: number, near: number): number {
   let k = near;
   while (k > 0 && reading - offsetOf(spans, k - 1) < fromOf(spans, k)) k--;
   while (reading - offsetOf(spans, k) >= fromOf(spans, k + 1)) k++;
   return k;
 }
 
-function offsetOf(spans: readonly ZoneSpan[], k: number): number {
-  return (spans[k] as ZoneSpan).offset;
+function offsetOf(spans: readonly OffsetSpan[], k: number): number {
+  return (spans[k] as OffsetSpan).offsetMinutes;
 }
 
-function fromOf(spans: readonly ZoneSpan[], k: number): number {
-  return spans[k]?.from ?? Number.POSITIVE_INFINITY;
+/** The first span holds for all that lies before it too. */
+function fromOf(spans: readonly OffsetSpan[], k: number): number {
+  if (k === 0) return Number.NEGATIVE_INFINITY;
+  return spans[k]?.fromMinute ?? Number.POSITIVE_INFINITY;
 }
 
 /**
@@ -87,7 +89,7 @@ export function keepsLocalClock(
   readings: Float64Array,
   converted: Float64Array,
   stride: number,
-  spans: readonly ZoneSpan[],
+  spans: readonly OffsetSpan[],
 ): boolean {
   const asTheyStand = irregularRows(readings, stride).map((i) => readings[i] as number);
   const once = irregularRows(converted, stride).map((i) => readings[i] as number);

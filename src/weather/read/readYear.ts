@@ -1,5 +1,5 @@
+import { stampText } from '../../core/stampText.ts';
 import type { StampEnd } from '../readSettings.ts';
-import { stampText } from './civilDays.ts';
 import { offsetOfHeader } from './columnWords.ts';
 import { layOnYear, type YearOfRows } from './layOnYear.ts';
 import { DECIMAL_COMMA, DECIMAL_POINT } from './parseNumber.ts';

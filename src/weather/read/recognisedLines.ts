@@ -1,5 +1,5 @@
 import { shown } from '../../core/problem.ts';
-import { offsetText } from './civilDays.ts';
+import { offsetText } from '../../core/stampText.ts';
 import { quantityTexts } from './quantities.ts';
 import type { FilledColumn, Recognised, RecognisedColumn, Recognising } from './recognised.ts';
 import { stepText } from './timeStep.ts';

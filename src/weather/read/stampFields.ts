@@ -1,5 +1,5 @@
+import { dayExists, dayNumber, MINUTES_PER_DAY } from '../../core/civilDate.ts';
 import { shown } from '../../core/problem.ts';
-import { dayExists, dayNumber, MINUTES_PER_DAY } from './civilDays.ts';
 import type { Findings } from './findings.ts';
 import type { RawRows } from './readRows.ts';
 

@@ -1,11 +1,11 @@
+import { stampText } from '../../core/stampText.ts';
+import { type OffsetSpan, zoneOffsets } from '../../core/zoneOffsets.ts';
 import type { ReadSettings, StampClock } from '../readSettings.ts';
-import { stampText } from './civilDays.ts';
 import type { Findings } from './findings.ts';
 import { irregularRows, keepsLocalClock, type LocalClock, localToStandard } from './localClock.ts';
 import { rangeOf } from './rangeOf.ts';
 import type { Stamps } from './stampFields.ts';
 import { type RowOrder, strideOf } from './timeStep.ts';
-import { type ZoneSpan, zoneSpans } from './zoneSpans.ts';
 
 /** The rows in standard time: where each one's step begins. */
 export interface StandardTime {
@@ -100,7 +100,7 @@ function fromLocalClock(source: ClockSource, from: 'settings' | 'recognised'): S
     return undefined;
   }
   if (from === 'recognised' && spans.length < 2) return undefined;
-  const standardOffset = Math.min(...spans.map(({ offset }) => offset));
+  const standardOffset = Math.min(...spans.map((span) => span.offsetMinutes));
   const clock: LocalClock = { spans, standardOffset, backwards: order.backwards };
   const ways = (atEnd ? [0, order.step] : [0]).map((first) => {
     const readings = stamps.minutes.map((minute) => minute - first);
@@ -126,10 +126,10 @@ function fromLocalClock(source: ClockSource, from: 'settings' | 'recognised'): S
   };
 }
 
-function spansOf({ stamps, zone }: ClockSource): readonly ZoneSpan[] | undefined {
+function spansOf({ stamps, zone }: ClockSource): readonly OffsetSpan[] | undefined {
   if (zone === undefined) return undefined;
   const { least, most } = rangeOf(stamps.minutes);
-  return least <= most ? zoneSpans(zone, least - TWO_DAYS, most + TWO_DAYS) : undefined;
+  return least <= most ? zoneOffsets(zone, least - TWO_DAYS, most + TWO_DAYS) : undefined;
 }
 
 function reportNoLocalClock({ stamps, zone, findings }: ClockSource): void {

@@ -1,4 +1,4 @@
-import { civilDay, dayNumber, dayOfYear, MINUTES_PER_DAY } from './civilDays.ts';
+import { civilDay, dayNumber, dayOfYear, MINUTES_PER_DAY } from '../../core/civilDate.ts';
 import type { Findings } from './findings.ts';
 
 /** Rows placed in their year: one entry a row. */
