@@ -1,8 +1,8 @@
+import { isLeapYear } from '../core/civilDate.ts';
 import { type Problem, type ProblemCode, shown } from '../core/problem.ts';
+import { type OffsetSpan, zoneOffsets } from '../core/zoneOffsets.ts';
 import type { CivilClock } from '../tariffs/civilClock.ts';
-import { isLeapYear } from '../tariffs/civilDate.ts';
 import { instantsOf, readStamp, type Stamp } from '../tariffs/seriesStamps.ts';
-import { type OffsetSpan, zoneOffsets } from '../tariffs/zoneOffsets.ts';
 import { civilStamps, stamp } from './hourStamps.ts';
 
 /** The hour of a year that holds a time. */

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { answerText } from '../../src/report/answerText.ts';
 import { resultDocument } from '../../src/report/resultDocument.ts';
-import { demoAnswer } from '../unit/report/demoAnswer.ts';
+import { wholeDemoAnswer } from '../unit/report/demoAnswer.ts';
 
 /**
  * The layout alone: groups of digits become #, hashes h, runs of blanks and lines two, and prose stands on one line, for
@@ -21,7 +21,7 @@ function layoutOf(text: string): string {
 
 describe('the printed answer of the demo', () => {
   it('has the layout that was agreed', async () => {
-    const text = layoutOf(answerText(resultDocument(demoAnswer(), '1')));
+    const text = layoutOf(answerText(resultDocument(wholeDemoAnswer(), '1')));
     await expect(text).toMatchFileSnapshot('printedAnswer.txt');
   });
 });

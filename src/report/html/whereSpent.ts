@@ -1,0 +1,113 @@
+import { readMap } from '../../sim/heatPumpMap.ts';
+import type { Field } from '../charts/contourLines.ts';
+import { densityField } from '../charts/densityField.ts';
+import { type Markup, markup } from '../charts/markup.ts';
+import { chartFigure } from './chartFigure.ts';
+import { figureColumns } from './dataTable.ts';
+import type { ReportInput } from './reportInput.ts';
+
+/** Edge of a cell, K. */
+const CELL = 2;
+const LEVELS = [1.5, 2, 2.5, 3, 3.5, 4, 4.5, 5, 6, 7, 8];
+
+/** Heat to the rooms by cell of outdoor and flow temperature; kWh. */
+export interface HeatCell {
+  /** Colder and lower edge, °C. */
+  readonly x: number;
+  readonly y: number;
+  readonly amount: number;
+}
+
+/**
+ * Where the year is spent: the unit's heat to the rooms by outdoor temperature and the flow that it gives.
+ *
+ * @returns cells of 2 K × 2 K that hold heat, coldest first; their sum is the unit's heat to the rooms
+ */
+export function heatCells({ columns: c, plan }: ReportInput['answer']): HeatCell[] {
+  const { highestFlow } = plan.unitOnWeather;
+  const cells = new Map<string, HeatCell>();
+  for (let i = 0; i < c.hours; i++) {
+    const heat = c.heatPumpSpaceHeat[i];
+    if (heat <= 0) continue;
+    const x = CELL * Math.floor(plan.weather.temperature[i] / CELL);
+    const y = CELL * Math.floor(Math.min(c.flowTemperature[i], highestFlow[i]) / CELL);
+    const key = `${x} ${y}`;
+    cells.set(key, { x, y, amount: (cells.get(key)?.amount ?? 0) + heat });
+  }
+  return [...cells.values()].sort((a, b) => a.x - b.x || a.y - b.y);
+}
+
+/** The field with the unit's COP over it; a sentence where the unit gives no heat to the rooms. */
+export function whereSpent(input: ReportInput): Markup {
+  const { answer, words, figures } = input;
+  const { spent: said } = words;
+  const cells = heatCells(answer);
+  if (cells.length === 0) return markup`<p>${said.none}</p>`;
+  const { outdoor, flow } = answer.plan.unitOnWeather.unit.full;
+  const xRange = span([...cells.map(({ x }) => x), ...cells.map(({ x }) => x + CELL), outdoor[0]]);
+  const yRange = span([...cells.flatMap(({ y }) => [y, y + CELL]), ...flow]);
+  const { fullLoad } = answer.loaded.unit;
+  const points = fullLoad.cop.flatMap((cop, i): [number, number][] => {
+    const row = Math.floor(i / flow.length);
+    return cop === null || outdoor[row] > xRange[1] ? [] : [[outdoor[row], flow[i % flow.length]]];
+  });
+  const middle = cells.reduce((best, cell) => (cell.amount > best.amount ? cell : best));
+  const edge = (from: number) => `${figures.number(from, 0)}\u00a0…\u00a0${figures.number(from + CELL, 0)}\u00a0°C`;
+  const says = said.says({
+    outdoor: edge(middle.x),
+    flow: edge(middle.y),
+  });
+  return chartFigure({
+    title: said.title,
+    chart: densityField({
+      ...{ id: 'where-spent', title: said.title, description: says, cells, cellWidth: CELL, cellHeight: CELL },
+      ...{ contours: copField(answer, xRange, yRange), levels: LEVELS, points, xRange, yRange },
+      written: figures.number,
+      ...{ xTitle: said.outdoor, yTitle: said.flow },
+    }),
+    legend: [],
+    says: `${says} ${said.reading}`,
+    table: heatTable(cells, input),
+    figures: words.figures,
+  });
+}
+
+/** The least range of whole fives that holds all values. */
+function span(values: readonly number[]): [number, number] {
+  return [5 * Math.floor(Math.min(...values) / 5), 5 * Math.ceil(Math.max(...values) / 5)];
+}
+
+/** COP of the full-load map, kelvin by kelvin. */
+function copField(
+  { plan }: ReportInput['answer'],
+  [west, east]: readonly [number, number],
+  [south, north]: readonly [number, number],
+): Field {
+  const x = Array.from({ length: east - west + 1 }, (_, i) => west + i);
+  const y = Array.from({ length: north - south + 1 }, (_, i) => south + i);
+  const point = new Float64Array(2);
+  const values = y.flatMap((flow) =>
+    x.map((outdoor) => {
+      readMap(plan.unitOnWeather.unit.full, outdoor, flow, point, 0);
+      return point[1];
+    }),
+  );
+  return { x, y, values };
+}
+
+function heatTable(cells: readonly HeatCell[], { words, figures }: ReportInput) {
+  const flows = [...new Set(cells.map(({ y }) => y))].sort((a, b) => a - b);
+  const outdoors = [...new Set(cells.map(({ x }) => x))];
+  const edge = (from: number) => `${figures.number(from, 0)} … ${figures.number(from + CELL, 0)} °C`;
+  return {
+    caption: words.spent.caption,
+    columns: figureColumns(words.spent.outdoor, flows.map(edge)),
+    rows: outdoors.map((x) => [
+      edge(x),
+      ...flows.map((y) => {
+        const cell = cells.find((known) => known.x === x && known.y === y);
+        return cell === undefined ? '' : figures.number(cell.amount, 0);
+      }),
+    ]),
+  };
+}
