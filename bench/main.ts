@@ -4,6 +4,7 @@ import { newColumns } from '../src/sim/columns.ts';
 import { totalsOf } from '../src/sim/totals.ts';
 import { simulateByStages, simulateYear } from '../src/sim/year.ts';
 import { bill } from '../src/tariffs/bill.ts';
+import { benchBatch } from './batch.ts';
 import { loadDemo, planOf } from './demo.ts';
 import { type Candidate, measure } from './measure.ts';
 import { plainC } from './plainC.ts';
@@ -81,6 +82,8 @@ console.log(
 console.log(
   `one more tariff costs ${((100 * perHour('one more tariff on it')) / year1).toFixed(1)} % of a simulated year`,
 );
+
+await benchBatch();
 
 function commit(): string {
   try {

@@ -14,9 +14,11 @@ export interface OptionEntry {
 /** One command: what the help says of it, and where its code is. */
 export interface CommandEntry {
   readonly name: string;
-  /** Its argument; one that ends in `…` may be repeated. */
+  /** Its argument; one that ends in `…` may be repeated. '' for a command that takes none. */
   readonly argument: string;
   readonly argumentSays: string;
+  /** A further argument that may be left out; one that ends in `…` may be repeated. */
+  readonly further?: { readonly argument: string; readonly says: string };
   readonly says: string;
   readonly options: readonly OptionEntry[];
   /** Lines that run as they stand, from the folder that holds `data/demo`. */
@@ -47,6 +49,38 @@ export const commandTable: readonly CommandEntry[] = [
       'winterledger simulate data/demo/house.yaml --json result.json --hourly hours.csv',
     ],
     load: () => import('./commands/simulate.ts'),
+  },
+  {
+    name: 'explain',
+    argument: 'SCENARIO',
+    argumentSays: 'scenario file (YAML)',
+    says: 'one hour of the year step by step: every figure with its unit, its formula in words and where it is published',
+    options: [
+      {
+        name: 'at',
+        value: 'TIME',
+        says: 'beginning of the hour, civil time of the site unless an offset is written: 2025-01-14T06:00',
+      },
+      json,
+    ],
+    examples: [
+      'winterledger explain data/demo/house.yaml --at 2025-01-14T06:00',
+      'winterledger explain data/demo/house.yaml --at 2025-01-14T06:00+01:00 --json hour.json',
+    ],
+    load: () => import('./commands/explain.ts'),
+  },
+  {
+    name: 'tariffs',
+    argument: 'SCENARIO',
+    argumentSays: 'scenario file (YAML); its first tariff is the present one',
+    further: { argument: 'TARIFF…', says: 'tariff files (YAML) to compare beside those of the scenario' },
+    says: 'tariffs side by side on the whole bill of one simulated year: what each saves, kWh by rate, dearest week',
+    options: [json],
+    examples: [
+      'winterledger tariffs data/demo/house.yaml data/demo/tariffs/half-hourly.yaml',
+      'winterledger tariffs data/demo/house.yaml --json tariffs.json',
+    ],
+    load: () => import('./commands/tariffs.ts'),
   },
   {
     name: 'degree-days',
@@ -109,6 +143,94 @@ export const commandTable: readonly CommandEntry[] = [
       'winterledger season data/demo/units/hollerwisch-6.yaml --climate average --application 55 --bins',
     ],
     load: () => import('./commands/season.ts'),
+  },
+  {
+    name: 'batch',
+    argument: 'PLAN',
+    argumentSays: 'plan of a batch (YAML): a base scenario, homes, axes',
+    says: 'a year of every home of a plan with every option, a row each; goes on where it was stopped',
+    options: [
+      { name: 'out', value: 'DIR', says: 'folder for the results; it is made where it is not there' },
+      { name: 'workers', value: 'N', says: 'threads that simulate; all cores when left out' },
+      { name: 'shard', value: 'K/N', says: 'run only the part K of N, such as 3/16; gather joins the parts' },
+      { name: 'limit', value: 'N', says: 'most years that a plan may come to', usual: '200000' },
+    ],
+    examples: [
+      'winterledger batch data/demo/plan.yaml --out results',
+      'winterledger batch data/demo/plan.yaml --out part1 --shard 1/2',
+      'winterledger batch data/demo/plan.yaml --out part2 --shard 2/2',
+    ],
+    load: () => import('./commands/batch.ts'),
+  },
+  {
+    name: 'gather',
+    argument: 'DIR…',
+    argumentSays: 'folders with the parts of one batch',
+    says: 'joins the parts of a batch that were run with --shard, and says which are missing',
+    options: [{ name: 'out', value: 'DIR', says: 'folder for the joined results' }],
+    examples: ['winterledger gather part1 part2 --out gathered'],
+    load: () => import('./commands/gather.ts'),
+  },
+  {
+    name: 'rank',
+    argument: 'DIR',
+    argumentSays: 'folder with the results of a batch',
+    says: 'best and worst years of a batch, how they are spread, and the values of each axis side by side',
+    options: [
+      {
+        name: 'by',
+        value: 'FIGURE',
+        says: 'what counts',
+        choices: ['cost', 'carbon', 'seasonalFactor', 'backupHours'],
+        usual: 'cost',
+      },
+      { name: 'axis', value: 'NAME', says: 'set side by side the values of this axis alone' },
+      { name: 'top', value: 'N', says: 'rows that are listed at either end', usual: '5' },
+      json,
+    ],
+    examples: [
+      'winterledger rank results --by cost',
+      'winterledger rank results --by seasonalFactor --axis unit --top 3 --json ranking.json',
+    ],
+    load: () => import('./commands/rank.ts'),
+  },
+  {
+    name: 'report',
+    argument: 'SCENARIO',
+    argumentSays: 'scenario file (YAML)',
+    says: 'a report for client, professional and auditor as one HTML file that needs nothing beside itself',
+    options: [
+      { name: 'out', value: 'FILE', says: 'the HTML file; - for standard output' },
+      { name: 'pdf', value: 'FILE', says: 'also print it to a PDF file, by a Chromium that is installed' },
+      { name: 'language', value: 'LANGUAGE', says: 'its language', choices: ['en', 'de'], usual: 'en' },
+      { name: 'date', value: 'DATE', says: 'date to print, such as 2025-03-31; a line for the hand when left out' },
+    ],
+    examples: [
+      'winterledger report data/demo/house.yaml --out report.html',
+      'winterledger report data/demo/house.yaml --out bericht.html --language de --date 2025-03-31',
+    ],
+    load: () => import('./commands/report.ts'),
+  },
+  {
+    name: 'verify',
+    argument: 'REPORT',
+    argumentSays: 'report that winterledger has written (HTML)',
+    says: 'makes a report again from its scenario and the files on the disk, and says whether each figure still holds',
+    options: [],
+    examples: ['winterledger verify report.html'],
+    load: () => import('./commands/verify.ts'),
+  },
+  {
+    name: 'sheet',
+    argument: '',
+    argumentSays: 'takes no file',
+    says: 'the sheet: the whole tool as a page in the browser of this machine; it also works from a file, without a network',
+    options: [
+      { name: 'port', value: 'N', says: 'port to serve it on; 0 for one that is free', usual: '8733' },
+      { name: 'out', value: 'FILE', says: 'write the page to a file instead of serving it' },
+    ],
+    examples: ['winterledger sheet --out sheet.html'],
+    load: () => import('./commands/sheet.ts'),
   },
   {
     name: 'check',

@@ -8,6 +8,8 @@ export interface Io {
   readonly stderr: TextSink;
   /** Whether the talk may be coloured. */
   readonly colour: boolean;
+  /** Whether the talk is read on a terminal, so that a line may be written anew; no when left out. */
+  readonly terminal?: boolean;
   /** Version of the program. */
   readonly version: string;
 }

@@ -9,6 +9,7 @@ const io: Io = {
   stdout: textSink(process.stdout, 'standard output'),
   stderr: textSink(process.stderr, 'standard error'),
   colour: mayColour(process.stderr, process.env),
+  terminal: process.stderr.isTTY === true,
   version,
 };
 

@@ -77,17 +77,17 @@ function describe(say: (text: string) => void, chosen: (asked: Asked) => void): 
 }
 
 function commandOf(entry: CommandEntry, program: Command, chosen: (asked: Asked) => void): Command {
-  const repeated = entry.argument.endsWith('…');
-  const argument = repeated ? `<${entry.argument.slice(0, -1)}...>` : `<${entry.argument}>`;
   const command = new Command(entry.name)
     .copyInheritedSettings(program)
     .description(entry.says)
     .helpOption('--help', 'show this help')
-    .argument(argument, entry.argumentSays)
     .addHelpText('after', `\nExamples:\n${entry.examples.map((line) => `  ${line}`).join('\n')}`)
-    .action((files: string | string[], options: Record<string, string | true | undefined>) =>
-      chosen({ entry, input: { files: [files].flat(), options: asTexts(options) } }),
-    );
+    .action(() => {
+      const files = command.processedArgs.flat().filter((file) => typeof file === 'string');
+      chosen({ entry, input: { files, options: asTexts(command.opts()) } });
+    });
+  if (entry.argument !== '') command.argument(`<${inCommander(entry.argument)}>`, entry.argumentSays);
+  if (entry.further !== undefined) command.argument(`[${inCommander(entry.further.argument)}]`, entry.further.says);
   for (const { name, value, says, choices, usual } of entry.options) {
     const option = new Option(value === undefined ? `--${name}` : `--${name} <${value}>`, says);
     if (choices !== undefined) option.choices([...choices]);
@@ -95,6 +95,11 @@ function commandOf(entry: CommandEntry, program: Command, chosen: (asked: Asked)
     command.addOption(option);
   }
   return command;
+}
+
+/** The name of an argument; where it may be repeated, with dots for `…`. */
+function inCommander(argument: string): string {
+  return argument.replace('…', '...');
 }
 
 /** Options as texts; a switch that was given has the text 'on'. */

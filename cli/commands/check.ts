@@ -9,6 +9,7 @@ const kindWords = {
   unit: 'a heat-pump unit',
   tariff: 'a tariff',
   read: 'read settings',
+  plan: 'a plan of a batch',
   weather: 'weather',
   priceSeries: 'a price series',
 } as const;
@@ -18,12 +19,20 @@ export async function run({ files }: CommandInput, io: Io): Promise<number> {
   const source = new DiskSource();
   let sound = true;
   for (const file of files) {
-    const checked = checkFile(file, source);
+    const checked = await checkWhole(file, source);
     sound &&= !hasErrors(checked.problems);
     await io.stdout.write(statement(file, checked));
     await tellProblems(checked.problems, io);
   }
   return sound ? EXIT.done : EXIT.wrongInput;
+}
+
+/** A plan is looked through with its base scenario, its homes and its first year, as a batch would. */
+async function checkWhole(file: string, source: DiskSource): Promise<CheckedFile> {
+  const checked = checkFile(file, source);
+  if (checked.kind !== 'plan' || hasErrors(checked.problems)) return checked;
+  const { prepareBatch } = await import('../batch/preparedBatch.ts');
+  return { ...checked, problems: prepareBatch(file).problems };
 }
 
 /** `house.yaml  taken for a scenario: in order`, and below it what was recognised. */

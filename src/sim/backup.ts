@@ -53,6 +53,8 @@ export function boilerIsCheaper(backup: Backup, prices: SourcePrices, c: YearCol
 export function costByHeatPump(prices: SourcePrices, c: YearColumns, i: number): number {
   return c.heatPumpSpaceElectricity[i] * prices.electricity[i];
 }
+
+/** Cost of the same heat by the boiler; money, taxes in. */
 export function costByBoiler(backup: Backup, prices: SourcePrices, c: YearColumns, i: number): number {
   return (c.heatPumpSpaceHeat[i] / backup.efficiency) * prices.fuel;
 }

@@ -76,15 +76,17 @@ export function totalsOf(plan: YearPlan, c: YearColumns): YearTotals {
 
 function sumHours(plan: YearPlan, c: YearColumns, from: number, to: number): EnergyTotals {
   const sum = (column: Float64Array) => columnSum(column, from, to);
+  // columns that the plan leaves zero need no sum
+  const ofWater = (column: Float64Array) => (plan.hotWater === null ? 0 : sum(column));
   const lumped = plan.house.mass !== null;
   const need = sum(lumped ? c.unlimitedNeed : c.spaceHeatNeed);
   const heatPumpSpaceHeat = sum(c.heatPumpSpaceHeat);
   const backupSpaceHeat = sum(c.backupSpaceHeat);
-  const backupWaterHeat = sum(c.backupWaterHeat);
-  const short = sum(c.hotWaterShort);
+  const backupWaterHeat = ofWater(c.backupWaterHeat);
+  const short = ofWater(c.hotWaterShort);
   const uses = {
     heatPumpSpaceElectricity: sum(c.heatPumpSpaceElectricity),
-    heatPumpWaterElectricity: sum(c.heatPumpWaterElectricity),
+    heatPumpWaterElectricity: ofWater(c.heatPumpWaterElectricity),
     backupElectricity: plan.backup.isBoiler ? 0 : backupSpaceHeat + backupWaterHeat,
     circulationElectricity: sum(c.circulationElectricity),
     standbyElectricity: sum(c.standbyElectricity),
@@ -93,16 +95,16 @@ function sumHours(plan: YearPlan, c: YearColumns, from: number, to: number): Ene
   return {
     spaceHeatNeed: need,
     heatPumpSpaceHeat,
-    heatPumpWaterHeat: sum(c.heatPumpWaterHeat),
+    heatPumpWaterHeat: ofWater(c.heatPumpWaterHeat),
     backupSpaceHeat,
     backupWaterHeat,
     unmetHeat: lumped ? need - heatPumpSpaceHeat - backupSpaceHeat : sum(c.unmetHeat),
-    hotWaterAsked: sum(c.hotWaterServed) + short,
+    hotWaterAsked: ofWater(c.hotWaterServed) + short,
     hotWaterShort: short,
-    cylinderLoss: sum(c.cylinderLoss),
+    cylinderLoss: ofWater(c.cylinderLoss),
     ...uses,
     electricity: compensatedSum(Object.values(uses)),
-    fuel: sum(c.fuel),
+    fuel: plan.backup.isBoiler ? sum(c.fuel) : 0,
   };
 }
 
@@ -133,7 +135,9 @@ function sumMonths(monthly: readonly EnergyTotals[]): EnergyTotals {
 function countHours(c: YearColumns): HourCounts {
   const frequency = new Int32Array(MARK_COMBINATIONS);
   for (let i = 0; i < c.hours; i++) frequency[c.marks[i]]++;
-  const count = (bits: number) => frequency.reduce((sum, hours, marks) => sum + ((marks & bits) === 0 ? 0 : hours), 0);
+  const met: number[] = [];
+  for (let marks = 0; marks < MARK_COMBINATIONS; marks++) if (frequency[marks] > 0) met.push(marks);
+  const count = (bits: number) => met.reduce((sum, marks) => sum + ((marks & bits) === 0 ? 0 : frequency[marks]), 0);
   return {
     backup: count(MARK.backupForSpace | MARK.backupForWater),
     backupForSpace: count(MARK.backupForSpace),

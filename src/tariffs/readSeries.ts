@@ -1,5 +1,6 @@
 import { type Problem, shown } from '../core/problem.ts';
 import { type SeriesFaults, seriesFaults } from './seriesFaults.ts';
+import { seriesSize } from './seriesSize.ts';
 import { type SeriesTable, seriesTable } from './seriesTable.ts';
 import { instantsOfRows, stepOfRows } from './seriesTimes.ts';
 import type { SeriesKind, SeriesSettings, TimeSeries } from './timeSeries.ts';
@@ -22,6 +23,8 @@ export interface SeriesInput {
  */
 export function readSeries(input: SeriesInput): { series?: TimeSeries; problems: Problem[] } {
   const { text, file, settings, kind, zone } = input;
+  const oversize = seriesSize(text, file);
+  if (oversize !== undefined) return { problems: [oversize] };
   const { table, problems } = seriesTable(text, file, settings, kind);
   if (!table) return { problems };
   const faults = seriesFaults(file);

@@ -9,7 +9,21 @@ describe('the table of commands', () => {
   it('has every name once, and says something of everything', () => {
     const names = commandTable.map(({ name }) => name);
     expect(new Set(names).size).toBe(names.length);
-    expect(names).toEqual(['simulate', 'explain', 'tariffs', 'degree-days', 'fit', 'season', 'check']);
+    expect(names).toEqual([
+      'simulate',
+      'explain',
+      'tariffs',
+      'degree-days',
+      'fit',
+      'season',
+      'batch',
+      'gather',
+      'rank',
+      'report',
+      'verify',
+      'sheet',
+      'check',
+    ]);
     for (const { options, says, argumentSays, examples } of commandTable) {
       expect(new Set(options.map(({ name }) => name)).size).toBe(options.length);
       for (const text of [says, argumentSays, ...options.map((option) => option.says)]) expect(text).toMatch(/\w{3}/);

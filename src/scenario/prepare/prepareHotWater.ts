@@ -3,6 +3,7 @@ import { WATER_HEAT_CAPACITY } from '../../core/constants.ts';
 import type { HotWaterPlan } from '../../sim/hotWaterPlan.ts';
 import { hourlyProfile } from '../../sim/tappingProfiles.ts';
 import type { CivilClock } from '../../tariffs/civilClock.ts';
+import { type Kept, KeptKind } from '../kept.ts';
 import type { Scenario } from '../scenarioSchema.ts';
 import { stepsOfRule } from './schedules.ts';
 
@@ -12,9 +13,22 @@ type HotWaterEntry = NonNullable<Scenario['hotWater']>;
 const STANDING_LOSS_DIFFERENCE = 45;
 const DAYS_OF_THE_WAVE = 365;
 
-/** The cylinder, its draws and its windows, by hour; draws and windows at the civil time of each step's beginning. */
-export function prepareHotWater(entry: HotWaterEntry, clock: CivilClock): HotWaterPlan {
-  const coldWater = coldWaterOf(entry, clock);
+/** Columns of the hot water that the scenarios of a batch have in common; the cylinder itself is a few numbers. */
+const columns = new KeptKind<Float64Array>(64);
+const marks = new KeptKind<Uint8Array>(64);
+
+/**
+ * The cylinder, its draws and its windows, by hour; draws and windows at the civil time of each step's beginning.
+ *
+ * @param kept where the scenarios of a batch keep the columns
+ */
+export function prepareHotWater(entry: HotWaterEntry, clock: CivilClock, kept?: Kept): HotWaterPlan {
+  const keyOf = (part: string, value: unknown) => kept?.key([clock], part, value) ?? '';
+  const coldKey = keyOf('coldWater', entry.coldWater);
+  const coldWater = columns.of(kept, coldKey, () => coldWaterOf(entry, clock));
+  const draw = columns.of(kept, keyOf(coldKey, entry.draw), () => drawOf(entry, clock, coldWater));
+  const allowed = marks.of(kept, keyOf('windows', entry.reheatWindows), () => allowedSteps(entry, clock));
+  const hygieneAsked = marks.of(kept, keyOf('hygiene', entry.hygiene), () => hygieneSteps(entry, clock));
   return {
     volume: entry.volume,
     setPoint: entry.setPoint,
@@ -22,10 +36,10 @@ export function prepareHotWater(entry: HotWaterEntry, clock: CivilClock): HotWat
     lossCoefficient:
       entry.loss.given === 'coefficient' ? entry.loss.value / 1000 : entry.loss.value / 24 / STANDING_LOSS_DIFFERENCE,
     surroundingTemperature: entry.surroundingTemperature,
-    draw: drawOf(entry, clock, coldWater),
+    draw,
     coldWater,
-    allowed: allowedSteps(entry, clock),
-    hygieneAsked: hygieneSteps(entry, clock),
+    allowed,
+    hygieneAsked,
     hygieneTemperature: entry.hygiene?.temperature ?? entry.setPoint,
     immersionPower: entry.immersionPower,
   };

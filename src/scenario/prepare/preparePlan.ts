@@ -1,5 +1,4 @@
 import { curveSetting, emitterSetting, type FlowSetting } from '../../sim/flowTemperature.ts';
-import type { HotWaterPlan } from '../../sim/hotWaterPlan.ts';
 import type { House } from '../../sim/house.ts';
 import { layMassOnWeather } from '../../sim/massOnWeather.ts';
 import type { HeatPumpUnit } from '../../sim/unit.ts';
@@ -31,7 +30,6 @@ const weathers = new KeptKind<PreparedWeather>(64);
 const unitsOnWeather = new KeptKind<UnitOnWeather>(64);
 const flowSettings = new KeptKind<FlowSetting>(64);
 const quietColumns = new KeptKind<Float64Array>(64);
-const hotWaterPlans = new KeptKind<HotWaterPlan>(64);
 
 /**
  * Weather and unit of a loaded scenario, prepared.
@@ -69,7 +67,7 @@ export function preparePlan(scenario: Scenario, parts: PlanParts, kept?: Kept): 
     circulationPower: scenario.circulation.pumpPower / 1000,
     backup: backupOf(scenario),
     sourcePrices: sourcePricesOf(scenario, present),
-    hotWater: hotWaterOf(scenario, clock, kept),
+    hotWater: scenario.hotWater === undefined ? null : prepareHotWater(scenario.hotWater, clock, kept),
   };
 }
 
@@ -77,11 +75,6 @@ function keptFlowSetting({ flowTemperature, house }: Scenario, weather: Prepared
   const { roomTemperature } = house.design;
   const make = () => flowSettingOf(flowTemperature, roomTemperature, weather);
   return flowSettings.of(kept, kept?.key([weather], flowTemperature, roomTemperature) ?? '', make);
-}
-
-function hotWaterOf({ hotWater }: Scenario, clock: CivilClock, kept?: Kept): HotWaterPlan | null {
-  if (hotWater === undefined) return null;
-  return hotWaterPlans.of(kept, kept?.key([clock], hotWater) ?? '', () => prepareHotWater(hotWater, clock));
 }
 
 /** A flow setting from its entry; the room of the emitters is the design room where none is given. */

@@ -25,6 +25,9 @@ export interface MeterTable {
 /** Daily readings of half a century. */
 const MOST_LINES = 20_000;
 
+/** Characters of a line; one of readings needs about forty. */
+const LONGEST_LINE = 10_000;
+
 /**
  * Splits the text of a file of readings: any of comma, semicolon, tab, bar and blanks between cells; blank lines and lines
  * that begin with # are left out; the first line that remains names the columns.
@@ -39,11 +42,7 @@ export function meterTable(
   faults: ReadingFaults,
 ): MeterTable | undefined {
   const plain = plainLines(text);
-  const lines = plain.split('\n').length;
-  if (lines > MOST_LINES) {
-    faults.add({ code: 'readings.too-many-lines', found: String(lines), allowed: String(MOST_LINES) });
-    return undefined;
-  }
+  if (isTooMuch(plain.split('\n'), faults)) return undefined;
   const cells = openCells(withoutRemarks(plain), { decimal });
   const [head, ...records] = recordsOf(cells);
   if (head === undefined || records.length === 0) {
@@ -61,6 +60,19 @@ export function meterTable(
       return column === undefined ? { line } : { line, column };
     },
   };
+}
+
+/** A text so long that taking it apart would use up memory or time is a fault. */
+function isTooMuch(lines: readonly string[], faults: ReadingFaults): boolean {
+  if (lines.length > MOST_LINES) {
+    faults.add({ code: 'readings.too-many-lines', found: String(lines.length), allowed: String(MOST_LINES) });
+    return true;
+  }
+  const long = lines.findIndex((line) => line.length > LONGEST_LINE);
+  if (long < 0) return false;
+  const found = String(lines[long].length);
+  faults.add({ code: 'readings.long-line', line: long + 1, found, allowed: String(LONGEST_LINE) });
+  return true;
 }
 
 /** Remarks become blank lines, so that the others keep their numbers. */

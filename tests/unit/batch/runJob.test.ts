@@ -5,7 +5,7 @@ import { problemText } from '../../../src/core/problemText.ts';
 import { makeAnswer } from '../../../src/scenario/answer/makeAnswer.ts';
 import { loadScenario } from '../../../src/scenario/loadScenario.ts';
 import { memoryFiles } from '../scenario/memoryFiles.ts';
-import { lumpedText, sampleFiles, scenarioText, tariffText } from '../scenario/sampleFiles.ts';
+import { lumpedText, sampleFiles, scenarioText, tariffText, unitText, weatherText } from '../scenario/sampleFiles.ts';
 import { baseHome, runnerOf } from './batchFiles.ts';
 
 const head = 'name: Test\nscenario: house.yaml\naxes:\n';
@@ -21,13 +21,29 @@ function simulated(text: string, changes: Record<string, unknown>) {
     if (value === null) document.deleteIn(place.split('.'));
     else document.setIn(place.split('.'), value);
   }
-  const files = sampleFiles({ 'house.yaml': document.toString(), 'second.yaml': secondTariff });
+  const files = sampleFiles({ ...otherFiles, 'house.yaml': document.toString() });
   const { loaded, problems } = loadScenario('house.yaml', memoryFiles(files));
   const { answer } = makeAnswer(loaded!, problems);
   return rowResult(answer!, answer!.warnings);
 }
 
+const condensing = {
+  efficiency: {
+    byReturnTemperature: [
+      [30, 0.98],
+      [60, 0.88],
+    ],
+    flowTemperature: { method: 'emitters', flow: 60, return: 45 },
+  },
+  fuel: { kind: 'naturalGas', price: 0.1 },
+};
 const secondTariff = tariffText.replace('Test tariff', 'Second').replace('0.2', '0.1');
+
+const otherFiles = {
+  'second.yaml': secondTariff,
+  'unit2.yaml': unitText.replace('A7       8.0', 'A7       9.0'),
+  'weather2.csv': weatherText().replaceAll(/,80$/gm, ',95'),
+};
 
 describe('a job of a batch', () => {
   it('finds to the last digit what the same scenario alone finds, whatever ran before it', () => {
@@ -52,12 +68,34 @@ describe('a job of a batch', () => {
       dear: { tariffs: ['second.yaml', 'tariff.yaml'] },
       boiler: { boiler: { efficiency: 0.8, fuel: { kind: 'heatingOil', price: 0.12 } }, 'hotWater.volume': 120 },
       household: { household: { given: 'profile', kWhPerYear: 3000 } },
+      'less boiler': { boiler: { efficiency: 0.7, fuel: { kind: 'heatingOil', price: 0.12 } }, 'hotWater.volume': 120 },
+      'own flow': { boiler: condensing, 'house.design.roomTemperature': 21 },
+      'more household': { household: { given: 'profile', kWhPerYear: 5000 } },
+      carbon: { carbon: { electricity: 0.4 } },
+      'less carbon': { carbon: { electricity: 0.2 } },
+      'less water': { 'hotWater.draw.litresPerDay': 60 },
+      'even water': { 'hotWater.coldWater.amplitude': 0 },
+      windows: { 'hotWater.reheatWindows': [{ start: '02:00', end: '05:00' }] },
+      'other run': { 'hotWater.hygiene.weekday': 'wed' },
+      'other zone': { 'site.zone': 'Atlantic/Azores' },
+      'other year': { 'site.calendarYear': 2023 },
+      'other curve': {
+        'flowTemperature.points': [
+          [-12, 50],
+          [15, 30],
+        ],
+      },
+      'other unit': { 'heatPump.unit': 'unit2.yaml' },
+      'other weather': { 'weather.file': 'weather2.csv' },
+      'other stamps': { 'weather.read.stamps': 'end' },
+      'other night': { 'house.need.schedule': [{ name: 'night', setPoint: 15, start: '22:00', end: '06:00' }] },
+      'warmer rooms': { 'house.need.setPoint': 22 },
     };
     const names = Object.keys(options);
     const axis = { given: 'options', name: 'o', options: names.map((name) => ({ name, set: options[name] })) };
     const plan = stringify({ name: 'Test', scenario: 'house.yaml', axes: [axis] });
-    const { runner } = runnerOf(plan, { 'house.yaml': lumpedText, 'second.yaml': secondTariff });
-    const order = [0, 1, 0, 3, 2, 4, 5, 6, 7, 1, 3, 0];
+    const { runner } = runnerOf(plan, { ...otherFiles, 'house.yaml': lumpedText });
+    const order = [...names.keys(), ...[...names.keys()].reverse()];
     for (const option of order) {
       const row = runner.run(option + 1, baseHome, option);
       expect(row.problems, names[option]).toEqual([]);

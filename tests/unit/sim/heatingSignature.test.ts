@@ -136,3 +136,19 @@ describe('heatLossOfSignature', () => {
     expect(loss.high).toBeCloseTo(198, 9);
   });
 });
+
+it('refuses a use that is the same, warm or cold, on the mean, but not in each period', () => {
+  // two cold periods and two warm ones, each pair with a use of 2 a day on the mean: a level line with a residual
+  const result = heatingSignature([period(0, 1), period(0, 3), period(10, 1), period(10, 3)]);
+  expect(result).toEqual({ refused: 'noSlope', slope: 0 });
+});
+
+it('counts as cold the days below the base, and not one that is just as warm', () => {
+  // the house worked by hand, with a fifth period at its base of 15 °C and its base use of 8
+  const { baseTemperature, periods } = signatureOf([
+    ...[period(-2, 94), period(4, 61), period(10, 34), period(20, 8)],
+    period(15, 8),
+  ]);
+  expect(baseTemperature).toBe(15);
+  expect(periods.map(({ coldShare }) => coldShare)).toEqual([1, 1, 1, 0, 0]);
+});

@@ -61,6 +61,13 @@ describe('the civil weeks of a bill', () => {
     const made = bill(tariff, steadyUse(berlin));
     expect(sum(weeksOf(tariff).map(({ cost }) => cost))).toBeCloseTo(taxedEnergy(made), 7);
   });
+
+  test('add that share to what the rates ask', () => {
+    // January as before: 114.4 by blocks on 744 kWh, and 0.30 by the rate on each of the 168 kWh of the week
+    const blocks = { per: 'month', prices: [{ upTo: 100, price: 0.5 }, { price: 0.1 }] } as const;
+    const both = prepared(tariffOf({ rates: [{ name: 'flat', price: 0.3 }], blocks }), berlin);
+    expect(weeksOf(both)[1]?.cost).toBeCloseTo((114.4 * 168) / 744 + 168 * 0.3, DIGITS);
+  });
 });
 
 describe('the dearest week', () => {

@@ -150,3 +150,10 @@ describe('a file of readings is refused', () => {
     expect(texts[20]).toContain('meter.csv  10 more problems are not listed');
   });
 });
+
+it('a line without end is refused before it is taken apart', () => {
+  // 10 characters of the date, then two a cell
+  expect(textsOf(`date,reading kWh\n2024-01-01${',1'.repeat(10_000_000)}\n`)).toEqual([
+    'meter.csv:2  this line has 20000010 characters; at most 10000 are read\n    → this is no table with one reading a line: export the data again as CSV text',
+  ]);
+});

@@ -1,0 +1,47 @@
+import { expect, test } from 'vitest';
+import { MARK } from '../../../../src/sim/columns.ts';
+import type { StageName } from '../../../../src/sim/explain/stage.ts';
+import { type ExplainedCase, explainedCases, explainedPlans, figureOf } from './explainedYears.ts';
+
+// What is said of an hour beside its figures is held against the columns of the year, which other tests hold.
+
+const stageOf = ({ stages }: ExplainedCase, name: StageName) => stages.find(({ stage }) => stage === name);
+
+test('the compressor is said to run in just the hours in which it gives heat', () => {
+  const hours = { running: 0, idle: 0 };
+  for (const one of explainedCases(1)) {
+    const { year, i } = one;
+    const runs = year.heatPumpSpaceHeat[i]! > 0 || year.heatPumpWaterHeat[i]! > 0;
+    hours[runs ? 'running' : 'idle']++;
+    const { findings } = stageOf(one, 'auxiliaries')!;
+    expect(findings.includes('compressorRuns'), `${one.name} ${i}`).toBe(runs);
+    expect(findings.includes('compressorIdle'), `${one.name} ${i}`).toBe(!runs);
+  }
+  expect(Math.min(hours.running, hours.idle)).toBeGreaterThan(100);
+});
+
+test('it is said to run below its lowest level in just the hours that are marked so', () => {
+  let cycling = 0;
+  for (const one of explainedCases(1)) {
+    const { year, i } = one;
+    const marked = (year.marks[i]! & MARK.cycling) !== 0;
+    // the rate that was only offered to a cheaper boiler is not the one that was run
+    const rate = stageOf(one, 'rateLeft') ?? stageOf(one, 'rate');
+    expect(rate?.findings.includes('cycling') ?? false, `${one.name} ${i}`).toBe(marked);
+    if (marked) cycling++;
+  }
+  expect(cycling).toBeGreaterThan(100);
+});
+
+test('of two sources the one is said to be cheaper whose cost is less; ties go to the heat pump', () => {
+  const said = { boiler: 0, heatPump: 0, neither: 0 };
+  for (const one of explainedCases(1, { cheaper: explainedPlans['the cheaper of two sources']! })) {
+    const stage = stageOf(one, 'backup');
+    const isCompared = stage?.figures.some(({ name }) => name === 'costByBoiler') ?? false;
+    const dearer = isCompared && figureOf(stage, 'costByHeatPump') > figureOf(stage, 'costByBoiler');
+    expect(stage?.findings.includes('boilerCarries'), `${one.i}`).toBe(dearer);
+    expect(stage?.findings.includes('heatPumpCheaper'), `${one.i}`).toBe(isCompared && !dearer);
+    said[dearer ? 'boiler' : isCompared ? 'heatPump' : 'neither']++;
+  }
+  expect(Math.min(said.boiler, said.heatPump, said.neither)).toBeGreaterThan(5);
+});
