@@ -4,7 +4,10 @@ import { build } from 'esbuild';
 
 rmSync('dist', { recursive: true, force: true });
 await build({
-  entryPoints: ['cli/main.ts'],
+  // the worker threads of a batch have an entry of their own
+  entryPoints: { main: 'cli/main.ts', batchWorker: 'cli/batch/worker.ts' },
+  // it starts threads by files of its own, so it stays a package
+  external: ['piscina'],
   outdir: 'dist',
   bundle: true,
   platform: 'node',

@@ -1,0 +1,111 @@
+/** A change that no test can notice because nothing that is computed changes. */
+export interface Equivalent {
+  readonly file: string;
+  /** The line as it stands, without its indent, and the change. */
+  readonly text: string;
+  readonly was: string;
+  readonly becomes: string;
+  readonly why: string;
+}
+
+/** Argued one by one; they are counted neither as noticed nor as survivors. */
+export const equivalents: readonly Equivalent[] = [
+  {
+    file: 'src/sim/backup.ts',
+    text: 'if (c.heatPumpSpaceHeat[i] <= 0) return false;',
+    was: '<=',
+    becomes: '<',
+    why: 'no heat costs nothing by either source, and a tie goes to the heat pump all the same',
+  },
+  {
+    file: 'src/sim/heatingSignature.ts',
+    text: "if (ownShare < LEAST_OWN_SHARE) return { refused: 'alike' };",
+    was: '<',
+    becomes: '<=',
+    why: 'a share that is the bound to the last bit is no more alike than one beside it',
+  },
+  {
+    file: 'src/sim/lumpedHouse.ts',
+    text: 'const hMassOutdoor = opaque === 0 ? 0 : 1 / (1 / opaque - 1 / hSurfaceMass);',
+    was: '0',
+    becomes: '1',
+    why: 'where nothing is opaque the formula gives 1 / ∞, which is 0 as well (the other 0 of the line is held by tests)',
+  },
+  {
+    file: 'src/sim/mapOnWeather.ts',
+    text: 'direct[i] = map.linear || outdoor < coldest ? 1 : 0;',
+    was: '0',
+    becomes: '1',
+    why: 'the map is then read where it stands instead of from what was laid out for the hour: slower, the same figures',
+  },
+  {
+    file: 'src/sim/roomsKernel.ts',
+    text: 'let atRest = 0;',
+    was: '0',
+    becomes: '1',
+    why: 'a house with mass sets it before it is read, and no other reads it',
+  },
+  {
+    file: 'src/sim/spaceHeat.ts',
+    text: 'if (given / (1 - c.hotWaterShare[i]) < least * (1 - ROUNDING)) c.marks[i] |= MARK.cycling;',
+    was: '<',
+    becomes: '<=',
+    why: 'the bound is a rounding of the last bits: a rate just on it is neither below nor above the lowest level',
+  },
+  {
+    file: 'src/sim/unitOnWeather.ts',
+    text: 'for (let i = 0; i < hours; i++) {',
+    was: '<',
+    becomes: '<=',
+    why: 'what is written behind the end of a typed array goes nowhere',
+  },
+  {
+    file: 'src/tariffs/bill.ts',
+    text: 'const LEDGER_LENGTH = 84;',
+    was: '84',
+    becomes: '85',
+    why: 'one place more in the array, which nobody reads',
+  },
+  {
+    file: 'src/tariffs/fixedCharges.ts',
+    text: 'const daysOfMonth = new Float64Array(12);',
+    was: '12',
+    becomes: '13',
+    why: 'a month more of no days, which costs nothing',
+  },
+  {
+    file: 'src/tariffs/prepareTariff.ts',
+    text: 'if (series && means) problems.push(...seriesReach(series, means, PRICES));',
+    was: '&&',
+    becomes: '||',
+    why: 'both are there or neither is',
+  },
+  {
+    file: 'src/tariffs/rateSlices.ts',
+    text: 'const last = slices.at(-1);',
+    was: '1',
+    becomes: '2',
+    why: 'slices that could be one stay two of the same price: slower, the same sums',
+  },
+  {
+    file: 'src/tariffs/readSeries.ts',
+    text: 'if (found.length > 0 || stepMinutes === undefined || startMinute === undefined) return { problems: found };',
+    was: '||',
+    becomes: '&&',
+    why: 'a step or a beginning that is not known has brought a fault already',
+  },
+  {
+    file: 'src/tariffs/seriesMeans.ts',
+    text: 'if (index >= 0 && index < values.length && end <= (index + 1) * stepMinutes) return values[index];',
+    was: '<=',
+    becomes: '<',
+    why: 'a short cut: the sum over the minutes of one value, divided by them, is that value',
+  },
+  {
+    file: 'src/tariffs/seriesTimes.ts',
+    text: "else if (distance < 0) faults.add({ code: 'series.disorder', ...place });",
+    was: '0',
+    becomes: '1',
+    why: 'distances are whole minutes, and that of none was dealt with before',
+  },
+];

@@ -1,0 +1,27 @@
+import type fc from 'fast-check';
+
+/** Properties that share the time; a rough number is enough. */
+const PROPERTIES = 14;
+const SEED = 20_250_301;
+
+const seconds = Number(process.env.WINTERLEDGER_FUZZ_SECONDS ?? 0);
+
+/** Time that a property may take in the runner, ms. */
+export const LONGEST = Math.max(120_000, 4 * seconds * 1000);
+
+/**
+ * How often a property is tried: always the same cases; or, with WINTERLEDGER_FUZZ_SECONDS, as many new ones as fit into
+ * its share of that time. A failure is reported with the seed that brings it again as WINTERLEDGER_FUZZ_SEED.
+ *
+ * @param runs cases of the ordinary run
+ */
+export function effort(runs: number): fc.Parameters<unknown> {
+  if (!(seconds > 0)) return { seed: SEED, numRuns: runs };
+  const seed = Number(process.env.WINTERLEDGER_FUZZ_SEED ?? Date.now() % 2 ** 31);
+  return {
+    seed,
+    numRuns: 1_000_000_000,
+    interruptAfterTimeLimit: (seconds * 1000) / PROPERTIES,
+    markInterruptAsFailure: false,
+  };
+}

@@ -1,0 +1,89 @@
+import { decodeText } from '../../src/core/decodeText.ts';
+import type { EntryPath } from '../../src/scenario/entries/pathText.ts';
+import { type FileKind, recogniseKind } from '../../src/scenario/recogniseKind.ts';
+import { folderOf, MemorySource, type SheetFile } from './memorySource.ts';
+import { type Written, withEntry } from './yamlEdit.ts';
+
+/** The files of the page: the truth that everything else is made of. */
+export class FileBox {
+  #files = new Map<string, SheetFile>();
+  readonly #hashes = new WeakMap<Uint8Array, string>();
+  readonly #changed = new Set<string>();
+  /** Counts the changes of every file but the scenario. */
+  othersChanged = 0;
+  scenario = '';
+
+  get list(): { name: string; size: number; changed: boolean }[] {
+    return [...this.#files.values()].map(({ name, bytes }) => ({
+      ...{ name, size: bytes.length, changed: this.#changed.has(name) },
+    }));
+  }
+
+  get all(): readonly SheetFile[] {
+    return [...this.#files.values()];
+  }
+
+  get source(): MemorySource {
+    return new MemorySource(this.#files, this.#hashes);
+  }
+
+  /** The files with another text of the scenario. */
+  sourceWith(text: string): MemorySource {
+    const changed = { name: this.scenario, bytes: new TextEncoder().encode(text) };
+    return new MemorySource(new Map([...this.#files, [this.scenario, changed]]), this.#hashes);
+  }
+
+  has(name: string): boolean {
+    return this.#files.has(name);
+  }
+
+  /** Begins anew with these files; the scenario is the one that is given, else the one that lies highest. */
+  replace(files: readonly SheetFile[], scenario?: string): void {
+    this.#files = new Map(files.map((file) => [file.name, file]));
+    this.#changed.clear();
+    this.othersChanged++;
+    const depth = (name: string) => name.split('/').length;
+    const found = files
+      .filter((file) => kindOf(file) === 'scenario')
+      .sort((a, b) => depth(a.name) - depth(b.name) || (a.name < b.name ? -1 : 1));
+    this.scenario = scenario ?? found[0]?.name ?? '';
+  }
+
+  put(file: SheetFile): void {
+    this.#files.set(file.name, file);
+    this.#changed.add(file.name);
+    if (file.name !== this.scenario) this.othersChanged++;
+  }
+
+  text(name: string): string {
+    const file = this.#files.get(name);
+    return file === undefined ? '' : decodeText(file.bytes).text;
+  }
+
+  setText(name: string, text: string): void {
+    this.put({ name, bytes: new TextEncoder().encode(text) });
+  }
+
+  /** Changes one entry of a structured file; nothing where the file cannot be parsed. */
+  write(name: string, path: EntryPath, value: Written): void {
+    const text = withEntry(this.text(name), path, value);
+    if (text !== undefined) this.setText(name, text);
+  }
+
+  /** The path under which a name in the scenario is held. */
+  pathOf(name: string): string {
+    const { path, file } = this.source.find(name, this.scenario);
+    return file?.name ?? path;
+  }
+
+  /** The name by which the scenario names a file that it holds. */
+  nameFromScenario(path: string): string {
+    const folder = folderOf(this.scenario);
+    return folder !== '' && path.startsWith(`${folder}/`) ? path.slice(folder.length + 1) : path;
+  }
+}
+
+/** What a file is, by what stands in it. */
+export function kindOf({ bytes }: SheetFile): FileKind | undefined {
+  return recogniseKind(decodeText(bytes.subarray(0, 20_000)).text).kind;
+}

@@ -1,0 +1,70 @@
+import type { ExplainDocument } from '../../src/report/explainSchema.ts';
+import type { Language } from '../../src/report/language/languages.ts';
+import { explained } from './explained.ts';
+import type { SheetFile } from './memorySource.ts';
+import { type Pictures, picturesOf } from './pictures.ts';
+import { type Action, act, takeFiles } from './sheetActions.ts';
+import { SheetModel } from './sheetModel.ts';
+import { type SaveKind, saved } from './sheetSaves.ts';
+import type { SheetState } from './sheetState.ts';
+import { BLANK_SCENARIO, blankFiles } from './startFiles.ts';
+import { type Changes, runVariant, type VariantResult } from './whatIfRun.ts';
+
+/** A house to begin with. */
+export interface Start {
+  readonly files: readonly SheetFile[];
+  readonly scenario?: string;
+}
+
+/** What the page asks of the worker. */
+export interface SheetCalls {
+  demo(): SheetState;
+  blank(zone: string): SheetState;
+  open(start: Start): SheetState;
+  take(files: readonly SheetFile[]): { state: SheetState; refused: readonly string[] };
+  act(action: Action): SheetState;
+  language(language: Language): SheetState;
+  pictures(): Pictures | undefined;
+  explain(hour: number): ExplainDocument | undefined;
+  variant(changes: Changes): VariantResult | undefined;
+  save(kind: SaveKind): SheetFile | undefined;
+  /** All files, for the draft. */
+  files(): Start;
+}
+
+/** The calls on a model of their own. */
+export function sheetCalls(version: string, demo: readonly SheetFile[]): SheetCalls {
+  const model = new SheetModel(version);
+  const { box } = model;
+  return {
+    demo: () => {
+      box.replace(demo, 'house.yaml');
+      return model.state();
+    },
+    blank: (zone) => {
+      box.replace(blankFiles(zone), BLANK_SCENARIO);
+      return model.state();
+    },
+    open: ({ files, scenario }) => {
+      box.replace(files, scenario);
+      return model.state();
+    },
+    take: (files) => {
+      const refused = takeFiles(box, files);
+      return { state: model.state(), refused };
+    },
+    act: (action) => {
+      act(box, action);
+      return model.state();
+    },
+    language: (language) => {
+      model.language = language;
+      return model.state();
+    },
+    pictures: () => picturesOf(model),
+    explain: (hour) => explained(model, hour),
+    variant: (changes) => runVariant(model, changes),
+    save: (kind) => saved(model, kind),
+    files: () => ({ files: box.all, scenario: box.scenario }),
+  };
+}

@@ -1,0 +1,54 @@
+import type { FormNode, Told } from './formNode.ts';
+import type { MapGrid } from './mapTables.ts';
+import type { PartId } from './visit.ts';
+
+/** One part of the visit with its fields. */
+export interface PartState {
+  readonly id: PartId;
+  readonly nodes: readonly FormNode[];
+}
+
+/** A structured file that a part shows beside its own entries: the unit, or a tariff. */
+export interface BesideState {
+  readonly name: string;
+  readonly nodes: readonly FormNode[];
+  readonly text: string;
+}
+
+/** How the weather file was understood. */
+export interface WeatherPreview {
+  readonly file: string;
+  readonly lines: readonly string[];
+  /** The first lines of the file as they stand. */
+  readonly head: readonly string[];
+}
+
+/** What an answer says in short, ready to be shown. */
+export interface ShownAnswer {
+  readonly sentences: readonly string[];
+  readonly tiles: readonly { readonly name: string; readonly value: string; readonly unit: string }[];
+  readonly bars: readonly {
+    readonly name: string;
+    readonly value: string;
+    readonly strip: string;
+    readonly boiler: boolean;
+  }[];
+  readonly cautions: readonly { readonly plain: string; readonly text: string; readonly remedy: string }[];
+  readonly assumptions: readonly { readonly path: string; readonly text: string }[];
+  /** Electricity by month, drawn. */
+  readonly months: string;
+}
+
+/** Everything that the page shows beside its own words. */
+export interface SheetState {
+  readonly scenario: string;
+  readonly text: string;
+  readonly files: readonly { readonly name: string; readonly size: number; readonly changed: boolean }[];
+  readonly parts: readonly PartState[];
+  readonly unit?: BesideState;
+  readonly tariffs: readonly BesideState[];
+  readonly grids: readonly MapGrid[];
+  readonly weather?: WeatherPreview;
+  readonly problems: readonly Told[];
+  readonly answer?: ShownAnswer;
+}

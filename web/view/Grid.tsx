@@ -1,0 +1,124 @@
+import { useState } from 'preact/hooks';
+import type { MapCell, MapGrid } from '../model/mapTables.ts';
+import { laidOn, pastedCells } from '../model/pastedTable.ts';
+import { act, words } from '../sheet.ts';
+import { fieldId } from './fieldId.ts';
+
+/** A table of a unit: cells to type into, to paste into, marked where a point is odd. */
+export function Grid({ grid }: { readonly grid: MapGrid }) {
+  const said = words.value.grid;
+  const { file, path, cells, quantity } = grid;
+  const texts = cells.map((row) => row.map(({ text }) => text));
+  const write = (next: readonly (readonly string[])[]) => act({ do: 'table', file, path, cells: next });
+  const told = cells.flatMap((row, r) => row.flatMap((cell, c) => cell.told.map((text) => ({ text, r, c }))));
+  const name = `${said[grid.level]}: ${said[quantity]}`;
+  const id = fieldId(file, path);
+  return (
+    <div class="grid" id={id} tabIndex={-1}>
+      {quantity === 'capacity' ? <h4>{name}</h4> : <Second grid={grid} />}
+      <div class="wide">
+        <table>
+          <caption class="hidden">{name}</caption>
+          <tbody>
+            {cells.map((row, r) => (
+              // biome-ignore lint/suspicious/noArrayIndexKey: a row of the grid is its place
+              <tr key={r}>
+                {row.map((cell, c) => (
+                  // biome-ignore lint/suspicious/noArrayIndexKey: a cell of the grid is its place
+                  <td key={c} class={r === 0 || c === 0 ? 'rim' : undefined}>
+                    <Cell
+                      cell={cell}
+                      corner={r === 0 && c === 0}
+                      name={cellName(texts, r, c)}
+                      onText={(text) => write(laidOn(texts, [[text]], [r, c]))}
+                      onPaste={(text) => write(laidOn(texts, pastedCells(text), [r, c]))}
+                    />
+                  </td>
+                ))}
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </div>
+      {told.map(({ text, r, c }) => (
+        <p class="warning" key={`${r} ${c} ${text}`} lang="en">
+          {text}
+        </p>
+      ))}
+      <button type="button" class="quiet" onClick={() => write([...texts, texts[0].map(() => '')])}>
+        {said.row}
+      </button>
+      <button type="button" class="quiet" onClick={() => write(texts.map((row) => [...row, '']))}>
+        {said.column}
+      </button>
+    </div>
+  );
+}
+
+function cellName(texts: readonly (readonly string[])[], r: number, c: number): string {
+  const said = words.value.grid;
+  if (r === 0 && c === 0) return said.corner;
+  if (r === 0) return said.flow(String(c));
+  return c === 0 ? said.outdoor(String(r)) : said.cell(texts[r][0], texts[0][c] ?? '');
+}
+
+/** What the second table holds may be said differently. */
+function Second({ grid: { file, path, level, quantity } }: { readonly grid: MapGrid }) {
+  const said = words.value.grid;
+  const id = `${fieldId(file, path)}-second`;
+  return (
+    <p class="second">
+      <label for={id}>{`${said[level]}: ${said.second}`}</label>{' '}
+      <select
+        id={id}
+        value={quantity}
+        onChange={(event) => {
+          const chosen = event.currentTarget.value === 'cop' ? 'cop' : 'inputPower';
+          act({ do: 'second', file, path, quantity: chosen });
+        }}
+      >
+        <option value="cop">{said.cop}</option>
+        <option value="inputPower">{said.inputPower}</option>
+      </select>
+    </p>
+  );
+}
+
+interface CellOf {
+  readonly cell: MapCell;
+  readonly corner: boolean;
+  readonly name: string;
+  readonly onText: (text: string) => void;
+  readonly onPaste: (text: string) => void;
+}
+
+function Cell({ cell, corner, name, onText, onPaste }: CellOf) {
+  const [typed, setTyped] = useState<string | undefined>(undefined);
+  const paste = (event: ClipboardEvent) => {
+    const text = event.clipboardData?.getData('text/plain') ?? '';
+    if (!/[\t\n]/.test(text)) return;
+    event.preventDefault();
+    setTyped(undefined);
+    onPaste(text);
+  };
+  return (
+    <input
+      type="text"
+      inputMode="decimal"
+      autocomplete="off"
+      aria-label={name}
+      aria-invalid={cell.told.length > 0}
+      title={cell.told.join(' ') || undefined}
+      value={corner ? '' : (typed ?? cell.text)}
+      placeholder={corner ? '⌄' : undefined}
+      onInput={(event) => {
+        const { value } = event.currentTarget;
+        if (corner) return;
+        setTyped(value);
+        onText(value);
+      }}
+      onBlur={() => setTyped(undefined)}
+      onPaste={paste}
+    />
+  );
+}
