@@ -24,6 +24,8 @@ module.exports = {
     { name: 'no-cycles', severity: 'error', from: {}, to: { circular: true } },
     { name: 'src-is-pure', severity: 'error', from: { path: '^src/' }, to: { dependencyTypes: ['core'] } },
     { name: 'src-knows-no-edge', severity: 'error', from: { path: '^src/' }, to: { path: '^(cli|web|tests|bench)/' } },
+    { name: 'web-knows-src-alone', severity: 'error', from: { path: '^web/' }, to: { path: '^(cli|tests|bench)/' } },
+    { name: 'cli-knows-no-page', severity: 'error', from: { path: '^cli/' }, to: { path: '^web/' } },
     {
       name: 'no-dev-in-product',
       severity: 'error',

@@ -7,8 +7,16 @@ import { bill } from '../src/tariffs/bill.ts';
 import { benchBatch } from './batch.ts';
 import { loadDemo, planOf } from './demo.ts';
 import { type Candidate, measure } from './measure.ts';
+import { keepPage } from './page.ts';
 import { plainC } from './plainC.ts';
 import { everythingOn } from './plans.ts';
+
+/** Everything that was printed, for the page. */
+const said: string[] = [];
+function say(line: string): void {
+  console.log(line);
+  said.push(line);
+}
 
 const SAMPLES = 31;
 const YEARS_OF_C = 20;
@@ -54,36 +62,31 @@ function timeOfC(ns: number): number {
   return ns;
 }
 
-console.log(
-  `${new Date().toISOString().slice(0, 10)}  ${cpus()[0].model.trim()}  Node ${process.version}  ${commit()}`,
-);
-console.log(`medians of ${SAMPLES} interleaved samples\n`);
+say(`${new Date().toISOString().slice(0, 10)}  ${cpus()[0].model.trim()}  Node ${process.version}  ${commit()}`);
+say(`medians of ${SAMPLES} interleaved samples\n`);
 const perHour = (name: string) => {
   const found = measured.find((each) => each.name === name);
   return found === undefined ? 0 : (found.median * 1e6) / hours;
 };
 for (const { name, least, median, most } of measured) {
   const figures = `${median.toFixed(3).padStart(8)} ms ${((median * 1e6) / hours).toFixed(1).padStart(7)} ns an hour`;
-  console.log(`${name.padEnd(32)} ${figures}   (${least.toFixed(3)} to ${most.toFixed(3)})`);
+  say(`${name.padEnd(32)} ${figures}   (${least.toFixed(3)} to ${most.toFixed(3)})`);
 }
 if (inC === undefined) {
-  console.log('no C compiler here: nothing to hold the year against');
+  say('no C compiler here: nothing to hold the year against');
 } else {
   const ns = inCNs.toSorted((a, b) => a - b)[inCNs.length >> 1];
-  console.log(`${'plain C loop, everything on'.padEnd(32)} ${''.padStart(11)} ${ns.toFixed(1).padStart(7)} ns an hour`);
-  console.log(`\neverything on takes ${(perHour('… with everything on') / ns).toFixed(2)} × the plain C loop`);
-  console.log(`a house with mass takes ${(perHour('… and a house with mass') / ns).toFixed(2)} × the same loop`);
+  say(`${'plain C loop, everything on'.padEnd(32)} ${''.padStart(11)} ${ns.toFixed(1).padStart(7)} ns an hour`);
+  say(`\neverything on takes ${(perHour('… with everything on') / ns).toFixed(2)} × the plain C loop`);
+  say(`a house with mass takes ${(perHour('… and a house with mass') / ns).toFixed(2)} × the same loop`);
   inC.close();
 }
 const year1 = perHour('a prepared year of the demo');
-console.log(
-  `hot water and mass take ${(perHour('… and a house with mass') / year1).toFixed(2)} × the year without them`,
-);
-console.log(
-  `one more tariff costs ${((100 * perHour('one more tariff on it')) / year1).toFixed(1)} % of a simulated year`,
-);
+say(`hot water and mass take ${(perHour('… and a house with mass') / year1).toFixed(2)} × the year without them`);
+say(`one more tariff costs ${((100 * perHour('one more tariff on it')) / year1).toFixed(1)} % of a simulated year`);
 
-await benchBatch();
+await benchBatch(say);
+if (process.argv.includes('--keep')) keepPage(said);
 
 function commit(): string {
   try {

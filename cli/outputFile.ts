@@ -21,7 +21,7 @@ export class OutputFault extends Error {
   readonly problem: Problem;
 
   constructor(file: string, fault: unknown) {
-    super(faultText(fault));
+    super(faultText(fault), { cause: fault });
     this.problem = unwritable(file, faultText(fault));
   }
 }

@@ -28,11 +28,13 @@ export function sheetServer(page: Uint8Array): Server {
 
 function answer(request: IncomingMessage, response: ServerResponse, page: Uint8Array): void {
   const port = request.socket.localPort;
-  if (!OWN_NAMES.some((name) => request.headers.host === `${name}:${port}`)) return refuse(response, 421);
-  if (request.method !== 'GET' && request.method !== 'HEAD') return refuse(response, 405, { Allow: 'GET, HEAD' });
-  if (request.url !== '/') return refuse(response, 404);
-  response.writeHead(200, { ...HEADERS, 'Content-Type': 'text/html; charset=utf-8', 'Content-Length': page.length });
-  response.end(request.method === 'HEAD' ? undefined : page);
+  if (!OWN_NAMES.some((name) => request.headers.host === `${name}:${port}`)) refuse(response, 421);
+  else if (request.method !== 'GET' && request.method !== 'HEAD') refuse(response, 405, { Allow: 'GET, HEAD' });
+  else if (request.url !== '/') refuse(response, 404);
+  else {
+    response.writeHead(200, { ...HEADERS, 'Content-Type': 'text/html; charset=utf-8', 'Content-Length': page.length });
+    response.end(request.method === 'HEAD' ? undefined : page);
+  }
 }
 
 function refuse(response: ServerResponse, status: number, more: Record<string, string> = {}): void {

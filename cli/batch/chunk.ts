@@ -12,6 +12,20 @@ export interface ChunkTask {
   readonly count: number;
   /** Where to begin to read homes; absent without a table of homes. */
   readonly place?: HomePlace;
+  /** Whether the rows are given back, since they are but a part of a chunk, instead of kept by the worker. */
+  readonly apart?: boolean;
+}
+
+/** A chunk that its worker has kept: so the rows of a long batch never pass through one thread. */
+export interface ChunkKept {
+  readonly chunk: number;
+  readonly rows: number;
+  readonly failed: number;
+}
+
+/** A chunk that its worker could not keep: the file, and the code of the system's fault. */
+export interface ChunkUnwritten {
+  readonly unwritten: { readonly file: string; readonly code: string };
 }
 
 /** What became of a chunk: its rows in both forms, and its figures. */

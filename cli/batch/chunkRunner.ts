@@ -1,8 +1,12 @@
-import type { ChunkDone, ChunkTask } from './chunk.ts';
+import { OutputFault } from '../outputFile.ts';
+import type { ChunkDone, ChunkKept, ChunkTask } from './chunk.ts';
 
 /** Something that runs chunks elsewhere and may lose them: the pool of workers. */
 export interface ChunkPool {
-  run(task: ChunkTask): Promise<ChunkDone>;
+  /** Runs a chunk and keeps its rows. @throws OutputFault where they cannot be kept */
+  run(task: ChunkTask): Promise<ChunkKept>;
+  /** Runs a part of a chunk. */
+  runApart(task: ChunkTask): Promise<ChunkDone>;
 }
 
 export interface ChunkWork {
@@ -12,39 +16,45 @@ export interface ChunkWork {
   readonly atOnce: number;
   /** What stands for a job that no worker could finish. */
   readonly lost: (job: ChunkTask, fault: unknown) => ChunkDone;
-  /** Takes a finished chunk; chunks come in any order. What it throws ends the work. */
-  readonly done: (chunk: ChunkDone) => Promise<void>;
+  /** Keeps a chunk that was run in parts. @throws OutputFault */
+  readonly keep: (chunk: ChunkDone) => void;
+  /** Hears of a chunk that is kept; they come in any order. What it throws ends the work. */
+  readonly done: (chunk: ChunkKept) => Promise<void>;
 }
 
 /**
  * Runs chunks, a few at once. A chunk whose worker dies is run again job by job, so that only the job that killed it is lost.
+ *
+ * @throws OutputFault where a chunk cannot be kept
  */
-export async function runChunks({ pool, tasks, atOnce, lost, done }: ChunkWork): Promise<void> {
-  const queue = tasks[Symbol.iterator]();
+export async function runChunks(work: ChunkWork): Promise<void> {
+  const queue = work.tasks[Symbol.iterator]();
   const runNext = async (): Promise<void> => {
     for (let next = queue.next(); next.done !== true; next = queue.next()) {
-      await done(await runOne(pool, next.value, lost));
+      await work.done(await runOne(next.value, work));
     }
   };
-  const runs = Array.from({ length: atOnce }, runNext);
   try {
-    await Promise.all(runs);
+    await Promise.all(Array.from({ length: work.atOnce }, runNext));
   } finally {
     queue.return?.();
   }
 }
 
-async function runOne(pool: ChunkPool, task: ChunkTask, lost: ChunkWork['lost']): Promise<ChunkDone> {
+async function runOne(task: ChunkTask, { pool, lost, keep }: ChunkWork): Promise<ChunkKept> {
   try {
     return await pool.run(task);
-  } catch {
-    const parts: ChunkDone[] = [];
-    for (let i = 0; i < task.count; i++) {
-      const job = { ...task, first: task.first + i, count: 1 };
-      parts.push(await pool.run(job).catch((fault: unknown) => lost(job, fault)));
-    }
-    return joined(task, parts);
+  } catch (fault) {
+    if (fault instanceof OutputFault) throw fault;
   }
+  const parts: ChunkDone[] = [];
+  for (let i = 0; i < task.count; i++) {
+    const job = { ...task, first: task.first + i, count: 1 };
+    parts.push(await pool.runApart(job).catch((fault: unknown) => lost(job, fault)));
+  }
+  const whole = joined(task, parts);
+  keep(whole);
+  return whole;
 }
 
 function joined({ chunk }: ChunkTask, parts: readonly ChunkDone[]): ChunkDone {

@@ -30,7 +30,8 @@ export interface PreparedBatch {
   readonly inputs: readonly InputRecord[];
   /** Those of the first job. */
   readonly assumptions: readonly Assumption[];
-  readonly setup: WorkerSetup;
+  /** What the workers are given, but for the folder of the results. */
+  readonly setup: Omit<WorkerSetup, 'results'>;
 }
 
 /**

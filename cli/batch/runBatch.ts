@@ -8,9 +8,10 @@ import { type BatchManifest, listedAxes, sortedInputs } from '../../src/report/b
 import type { InputRecord } from '../../src/scenario/inputFiles.ts';
 import { removeOnInterruption } from '../interruption.ts';
 import type { Io } from '../io.ts';
-import type { ChunkDone, ChunkTask } from './chunk.ts';
+import { OutputFault } from '../outputFile.ts';
+import type { ChunkDone, ChunkKept, ChunkTask, ChunkUnwritten } from './chunk.ts';
 import { type ChunkRange, chunksOf, jobsOf, type Shard, taskOf } from './chunkPlan.ts';
-import { runChunks } from './chunkRunner.ts';
+import { type ChunkPool, runChunks } from './chunkRunner.ts';
 import { surveyHomes } from './homesFile.ts';
 import type { Journal } from './journal.ts';
 import { lostJob } from './lostJob.ts';
@@ -20,6 +21,7 @@ import { ResultsWriter } from './resultsFiles.ts';
 import { openFolder } from './runFolder.ts';
 import { otherRun } from './runIdentity.ts';
 import { RunLock } from './runLock.ts';
+import type { WorkerSetup } from './workerSetup.ts';
 
 export interface RunAsked {
   /** Folder of the results. */
@@ -78,35 +80,52 @@ interface Simulation extends RunAsked {
 
 async function simulate(
   batch: PreparedBatch,
-  { workers, part, io, journal, missing, before }: Simulation,
+  { out, workers: asked, part, io, journal, missing, before }: Simulation,
 ): Promise<void> {
-  const threads = workers ?? availableParallelism();
+  const threads = asked ?? availableParallelism();
   const { fromJob, toJob } = jobsOf(batch.jobs, chunksOf(batch.jobs, part));
   const progress = new Progress(io, toJob - fromJob + 1, before);
-  const pool = new Piscina<ChunkTask, ChunkDone>({
+  const workers = new Piscina<ChunkTask, ChunkAnswer>({
     filename: fileURLToPath(new URL('./batchWorker.js', import.meta.url)),
     minThreads: 1,
     maxThreads: threads,
     idleTimeout: Number.POSITIVE_INFINITY,
-    workerData: batch.setup,
+    workerData: { ...batch.setup, results: out } satisfies WorkerSetup,
     resourceLimits: { maxYoungGenerationSizeMb: YOUNG_MEGABYTES },
   });
   const shape = shapeOf(batch);
   try {
     await runChunks({
-      pool,
+      pool: poolOf(workers),
       tasks: missing,
       atOnce: 2 * threads,
       lost: (task, fault) => lostJob(batch, shape, task, fault),
-      done: async (chunk) => {
-        journal.keep(chunk);
-        await progress.add(chunk.rows);
-      },
+      keep: (chunk) => journal.keep(chunk),
+      done: ({ rows }) => progress.add(rows),
     });
   } finally {
     await progress.end();
-    await pool.destroy();
+    await workers.destroy();
   }
+}
+
+type ChunkAnswer = ChunkDone | ChunkKept | ChunkUnwritten;
+
+/** The workers as a pool of chunks; what a worker could not write is a fault here too. */
+function poolOf(workers: Piscina<ChunkTask, ChunkAnswer>): ChunkPool {
+  return {
+    run: async (task) => {
+      const answer = await workers.run(task);
+      if (!('unwritten' in answer)) return answer;
+      const { file, code } = answer.unwritten;
+      throw new OutputFault(file, Object.assign(new Error(code), { code }));
+    },
+    runApart: async (task) => {
+      const answer = await workers.run({ ...task, apart: true });
+      if ('csv' in answer) return answer;
+      throw new Error('a worker has given no rows back');
+    },
+  };
 }
 
 /** A table of homes that is no longer what it was when the run began has given rows of two tables. */

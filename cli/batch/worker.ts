@@ -11,8 +11,11 @@ import { InputFiles } from '../../src/scenario/inputFiles.ts';
 import { Kept } from '../../src/scenario/kept.ts';
 import { weathers } from '../../src/scenario/loadWeather.ts';
 import { DiskSource } from '../diskSource.ts';
-import type { ChunkDone, ChunkTask } from './chunk.ts';
+import { faultCode } from '../faultWords.ts';
+import { OutputFault } from '../outputFile.ts';
+import type { ChunkDone, ChunkKept, ChunkTask, ChunkUnwritten } from './chunk.ts';
 import { HomesReader } from './homesFile.ts';
+import { Journal } from './journal.ts';
 import type { WorkerSetup } from './workerSetup.ts';
 
 /** The code of a worker thread: it reads the plan once, then simulates chunks of jobs as they are given to it. */
@@ -22,6 +25,7 @@ weathers.put(kept, setup.weather);
 const files = new InputFiles(new DiskSource(), kept);
 const { plan, problems } = loadPlan(setup.planFile, files);
 if (plan === undefined) throw new Error(`the plan cannot be read any more: ${problems[0]?.code ?? ''}`);
+const journal = new Journal(setup.results);
 const runner = new JobRunner(plan, files, kept);
 const reader = setup.homes === undefined ? undefined : new HomesReader(setup.homes);
 const options = optionCount(plan.axes);
@@ -29,8 +33,21 @@ const axes = plan.axes.map(({ name }) => name);
 const shape = { axes, homes: reader !== undefined, tariffs: setup.tariffs };
 const baseHome: Home = { name: baseName(plan), changes: [], problems: [] };
 
-/** Simulates a chunk. */
-export default function simulateChunk({ chunk, first, count, place }: ChunkTask): ChunkDone {
+/** Simulates a chunk and keeps its rows, or gives them back. */
+export default function runChunk(task: ChunkTask): ChunkDone | ChunkKept | ChunkUnwritten {
+  const done = simulateChunk(task);
+  if (task.apart === true) return done;
+  const { chunk, rows, failed } = done;
+  try {
+    journal.keep(done);
+  } catch (fault) {
+    if (fault instanceof OutputFault) return { unwritten: { file: fault.problem.file, code: faultCode(fault.cause) } };
+    throw fault;
+  }
+  return { chunk, rows, failed };
+}
+
+function simulateChunk({ chunk, first, count, place }: ChunkTask): ChunkDone {
   const csv: string[] = [];
   const json: string[] = [];
   const figures: number[] = [];

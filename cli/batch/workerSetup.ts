@@ -5,6 +5,8 @@ import type { HeaderRow } from './homesFile.ts';
 /** What a worker is given when it starts. */
 export interface WorkerSetup {
   readonly planFile: string;
+  /** Folder of the results, where the worker keeps what it has finished. */
+  readonly results: string;
   readonly homes?: HeaderRow;
   /** Most tariffs of any job. */
   readonly tariffs: number;

@@ -11,6 +11,7 @@ import { lostJob } from '../../cli/batch/lostJob.ts';
 import { prepareBatch } from '../../cli/batch/preparedBatch.ts';
 import { durationText, Progress } from '../../cli/batch/progress.ts';
 import { RunLock } from '../../cli/batch/runLock.ts';
+import { OutputFault } from '../../cli/outputFile.ts';
 import { batchHeader } from '../../src/report/batchCsv.ts';
 import { namesIn } from './program.ts';
 
@@ -30,9 +31,19 @@ const lost = ({ chunk, first }: ChunkTask): ChunkDone => ({
 });
 const tasks = [0, 1, 2].map((chunk) => ({ chunk, first: 5 * chunk, count: 5 }));
 
+/** What is kept, in the order of the chunks: what a worker has run whole, or what was joined from its jobs. */
 async function results(run: (task: ChunkTask) => Promise<ChunkDone>) {
   const found: ChunkDone[] = [];
-  await runChunks({ pool: { run }, tasks, atOnce: 2, lost, done: async (chunk) => void found.push(chunk) });
+  const whole = async (task: ChunkTask) => {
+    const chunk = await run(task);
+    found.push(chunk);
+    return chunk;
+  };
+  await runChunks({
+    ...{ pool: { run: whole, runApart: run }, tasks, atOnce: 2, lost },
+    keep: (chunk) => void found.push(chunk),
+    done: async () => {},
+  });
   return found.sort((a, b) => a.chunk - b.chunk);
 }
 
@@ -97,14 +108,20 @@ describe('a chunk whose worker dies', () => {
     expect(cellsOf(csv).length).toBe(cellsOf(batchHeader(shape)).length);
   });
 
-  it('ends the work where a result cannot be kept', async () => {
-    const work = runChunks({
-      ...{ pool: { run: async (task) => doneOf(task) }, tasks, atOnce: 1, lost },
-      done: async () => {
-        throw new Error('the disk is full');
+  it('is not run again where its rows cannot be kept: that ends the work', async () => {
+    let apart = 0;
+    const pool = {
+      run: async () => {
+        throw new OutputFault('chunk-000001', Object.assign(new Error(), { code: 'ENOSPC' }));
       },
-    });
+      runApart: async (task: ChunkTask) => {
+        apart++;
+        return doneOf(task);
+      },
+    };
+    const work = runChunks({ pool, tasks, atOnce: 1, lost, keep: () => {}, done: async () => {} });
     await expect(work).rejects.toThrow('the disk is full');
+    expect(apart).toBe(0);
   });
 });
 

@@ -21,7 +21,9 @@ describe('fit on the house of the demo', () => {
   it('prints the heat loss, its lines and every period within 80 columns, and nothing on standard error', async () => {
     const { code, stdout, stderr } = await run(folder, 'fit', house, '--readings', meter);
     expect({ code, stderr }).toEqual({ code: 0, stderr: '' });
-    expect(stdout).toMatch(/By its readings the house loses \d+ W\/K \(standard error [\d.]+; with\s+the\s+uncertainty\s+of\s+the\s+base\s+temperature\s+it\s+lies\s+between/);
+    expect(stdout).toMatch(
+      /By its readings the house loses \d+ W\/K \(standard error [\d.]+; with\s+the\s+uncertainty\s+of\s+the\s+base\s+temperature\s+it\s+lies\s+between/,
+    );
     expect(stdout).toMatch(/\nhouse:\n {2}heatLoss: \{ given: coefficient, value: [\d.]+ \}\n/);
     expect(stdout.match(/│ 2025-\d\d-\d\d – /g)).toHaveLength(11);
     // The name of the house is longer than a line.

@@ -1,7 +1,7 @@
 import { execFileSync } from 'node:child_process';
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { afterAll } from 'vitest';
+import { onTestFinished } from 'vitest';
 
 /** How a folder that can hold no result came about, and what the program then says. */
 export interface BadFolder {
@@ -38,6 +38,8 @@ function mounted(path: string): boolean {
   } catch {
     return false;
   }
-  afterAll(() => execFileSync('umount', [path]));
+  onTestFinished(() => {
+    execFileSync('umount', [path]);
+  });
   return true;
 }

@@ -1,11 +1,12 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { loadScenario } from '../../src/scenario/loadScenario.ts';
-import { effort, LONGEST } from './effort.ts';
+import { effort, isLong, LONGEST } from './effort.ts';
 import { type Hurt, hurtBytes, hurtTable, hurtYaml } from './hurt.ts';
 import { filesWithHurt, type HurtFiles } from './hurtFiles.ts';
 import { type SoundName, soundFiles } from './soundFiles.ts';
 import { tryCheck, tryDegreeDays, tryReadings, trySeason, trySimulate } from './tries.ts';
+import { tryBatch } from './tryBatch.ts';
 
 // Every kind of input file, hurt in one to three places, goes the whole way of the commands that read it. What comes out is
 // a result in which everything holds that MODEL section 15 says, or problems with their place: never an exception, never a
@@ -91,6 +92,8 @@ const kinds: readonly Kind[] = [
     runs: 60,
     go: (source) => house !== undefined && tryReadings(house, 'meter.csv', source),
   },
+  { name: 'a plan of a batch', files: ['plan.yaml'], hurt: hurtYaml, runs: 60, go: tryBatch },
+  { name: 'a table of homes', files: ['homes.csv'], hurt: hurtTable, runs: 60, go: tryBatch },
   {
     name: 'any file that is only looked through',
     files: ['full.yaml', 'units/tables.yaml', 'tariffs/blocks.yaml', 'read.yaml', 'prices.csv'],
@@ -103,7 +106,7 @@ const kinds: readonly Kind[] = [
   },
 ];
 
-describe.each(kinds)('$name', ({ files, hurt, runs, go }) => {
+describe.each(kinds)('$name', ({ name, files, hurt, runs, go }) => {
   test('that is sound gives a result', () => {
     for (const file of files) {
       expect(go(filesWithHurt(file, hurtBytes(soundFiles[file], { how: 'encoding', encoding: 'utf8' })), file)).toBe(
@@ -130,6 +133,7 @@ describe.each(kinds)('$name', ({ files, hurt, runs, go }) => {
       // were nearly all refused at once, or hardly any, the rest would not have been tried
       expect(results).toBeGreaterThan(tried / 20);
       expect(results).toBeLessThan(tried);
+      if (isLong) process.stderr.write(`${name}: ${tried} files, ${results} of them with a result\n`);
     },
     LONGEST,
   );

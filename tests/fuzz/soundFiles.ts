@@ -135,6 +135,8 @@ export const soundFiles = {
   'weather.csv': demo('weather.csv'),
   'meter.csv': demo('meter.csv'),
   'read.yaml': readSettings,
+  'plan.yaml': demo('plan.yaml'),
+  'homes.csv': demo('homes.csv').split('\n').slice(0, 8).join('\n'),
 } as const;
 
 export type SoundName = keyof typeof soundFiles;

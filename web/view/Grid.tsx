@@ -21,10 +21,8 @@ export function Grid({ grid }: { readonly grid: MapGrid }) {
           <caption class="hidden">{name}</caption>
           <tbody>
             {cells.map((row, r) => (
-              // biome-ignore lint/suspicious/noArrayIndexKey: a row of the grid is its place
               <tr key={r}>
                 {row.map((cell, c) => (
-                  // biome-ignore lint/suspicious/noArrayIndexKey: a cell of the grid is its place
                   <td key={c} class={r === 0 || c === 0 ? 'rim' : undefined}>
                     <Cell
                       cell={cell}

@@ -60,7 +60,7 @@ function Section({ node }: { readonly node: SectionNode }) {
     );
   }
   return (
-    <fieldset class={path.length === 1 ? 'section top' : 'section'} id={fieldId(file, path)} tabIndex={-1}>
+    <fieldset class={path.length === 1 ? 'section whole' : 'section'} id={fieldId(file, path)} tabIndex={-1}>
       <legend>{label}</legend>
       <p class="says" lang="en">
         {says}

@@ -35,15 +35,20 @@ async function run(of: Changes): Promise<Result> {
   return (await ask('variant', of)) ?? 'refused';
 }
 
-async function runAll(of: Changes): Promise<void> {
-  const [asFiled, now, ...others] = await Promise.all([
-    run(NOTHING),
-    run(of),
-    ...kept.value.map((one) => run(one.changes)),
-  ]);
+/** Runs the files as they are and with the sliders; what came for sliders that have moved on is dropped. */
+async function runSliders(of: Changes): Promise<void> {
+  const [asFiled, now] = await Promise.all([run(NOTHING), run(of)]);
   base.value = asFiled;
-  present.value = now;
-  kept.value = kept.value.map((one, i) => ({ ...one, result: others[i] }));
+  if (changes.value === of) present.value = now;
+}
+
+async function runKept({ number, changes: of }: Variant): Promise<void> {
+  const result = await run(of);
+  kept.value = kept.value.map((one) => (one.number === number ? { ...one, result } : one));
+}
+
+function tell(problem: unknown): void {
+  fault.value = String(problem);
 }
 
 /** Sliders over the answer, and variants side by side. */
@@ -55,15 +60,19 @@ export function WhatIf() {
     // files are named so that a change of theirs runs the variants anew
     void files;
     const later = setTimeout(() => {
-      runAll(of).catch((problem: unknown) => {
-        fault.value = String(problem);
-      });
+      runSliders(of).catch(tell);
     }, 60);
     return () => clearTimeout(later);
   }, [of, files]);
+  useEffect(() => {
+    void files;
+    for (const one of kept.value) runKept(one).catch(tell);
+  }, [files]);
   const keep = () => {
     lastNumber++;
-    kept.value = [...kept.value, { number: lastNumber, changes: of, result: present.value }].slice(-MOST_KEPT);
+    const variant = { number: lastNumber, changes: of, result: undefined };
+    kept.value = [...kept.value, variant].slice(-MOST_KEPT);
+    runKept(variant).catch(tell);
   };
   return (
     <section class="whatif" aria-labelledby="whatif">

@@ -80,6 +80,10 @@ export const weatherProblems = {
     says: '{path} is {found}; no stamp of the file has this form, the first is {allowed}',
     cure: 'use luxon tokens: yyyy year, MM month, dd day, HH hour, mm minute, ZZ offset; text in single quotes',
   },
+  'weather.loose-format': {
+    says: '{path} is {found}: it holds a part of varying length twice, or more than eight of them',
+    cure: 'write parts of two digits as MM, dd, HH, mm and ss, and what always stands there in single quotes',
+  },
   'weather.unread-stamps': {
     says: '{path} seems to hold the stamps, but {found} is of no form that is recognised',
     cure: "state the form by 'stampFormat', such as 'dd-MMM-yyyy HH:mm'",

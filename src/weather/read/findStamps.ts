@@ -4,7 +4,7 @@ import { chosenColumn } from './chosenColumn.ts';
 import { columnLabel, type StampColumns, type UsedColumn } from './columnPlan.ts';
 import { namesStamp, offsetOfHeader, type StampRole, stampRoleOf } from './columnWords.ts';
 import type { ColumnSearch } from './findQuantities.ts';
-import { hasForm } from './formattedStamps.ts';
+import { formProblem, hasForm } from './formattedStamps.ts';
 import { scanStamp } from './scanStamp.ts';
 
 const ROLES = ['stamp', 'date', 'time', 'year', 'month', 'day', 'hour', 'minute', 'hourOfYear'] as const;
@@ -43,8 +43,7 @@ function findByForm({ head, rows, settings }: ColumnSearch): StampColumns | unde
 /** A form that fits no column is a mistake; and a column that is called a date or a time, but is not understood, must not be taken for none. */
 function reportUnread({ head, rows, settings, findings }: ColumnSearch): void {
   if (settings.stampFormat !== undefined) {
-    const [found, allowed] = [`“${shown(settings.stampFormat)}”`, `“${shown(rows[0]?.[0] ?? '', 40)}”`];
-    findings.add({ code: 'weather.stamp-format', severity: 'error', path: 'stampFormat', found, allowed });
+    findings.add(formProblem(settings.stampFormat, rows[0]?.[0] ?? ''));
     return;
   }
   const index = head.names.findIndex((name, column) => head.kinds[column] === 'text' && namesStamp(name));

@@ -1,12 +1,17 @@
 import { DateTime } from 'luxon';
-import { shown } from '../../core/problem.ts';
+import { type Problem, shown } from '../../core/problem.ts';
+import { isLooseForm } from './looseForm.ts';
 import { emptyFields, numberStamps, type StampSource, type Stamps } from './stampFields.ts';
 
 /** A year that only an absent year token gives: luxon then takes the present one. */
 const HAS_YEAR_TOKEN = /y|kk|D|f|X|x/;
 
+/** Characters of a stamp; a longer cell is none. */
+const LONGEST_STAMP = 100;
+
 /** Reads one stamp by a form, in UTC; a form without a year reads as of the year 2000. */
 function readStamp(text: string, format: string): DateTime {
+  if (text.length > LONGEST_STAMP || isLooseForm(bareTokens(format))) return DateTime.invalid('not read');
   const options = { zone: 'utc', locale: 'en', setZone: true };
   if (hasYear(format)) return DateTime.fromFormat(text, format, options);
   return DateTime.fromFormat(`2000 ${text}`, `yyyy ${format}`, options);
@@ -24,6 +29,18 @@ function bareTokens(format: string): string {
 /** Whether a cell has a form stated in the tokens of the luxon library. */
 export function hasForm(cell: string, format: string): boolean {
   return readStamp(cell.trim(), format).isValid;
+}
+
+/**
+ * The problem of a form that no stamp has.
+ *
+ * @param format the form
+ * @param cell the first stamp of the file
+ */
+export function formProblem(format: string, cell: string): Omit<Problem, 'file'> {
+  const problem = { severity: 'error', path: 'stampFormat', found: `“${shown(format)}”` } as const;
+  if (isLooseForm(bareTokens(format))) return { ...problem, code: 'weather.loose-format' };
+  return { ...problem, code: 'weather.stamp-format', allowed: `“${shown(cell, 40)}”` };
 }
 
 /**
@@ -54,8 +71,7 @@ export function readFormattedStamps(source: StampSource, format: string): Stamps
     if (withOffset) fields.offset[i] = stamp.offset;
   }
   if (read === 0) {
-    const [found, allowed] = [`“${shown(format)}”`, `“${shown(cell(0), 40)}”`];
-    findings.add({ code: 'weather.stamp-format', severity: 'error', path: 'stampFormat', found, allowed });
+    findings.add(formProblem(format, cell(0)));
     return { minutes: fields.minute, hasYears: false, to24: false, form: 'not read' };
   }
   return numberStamps(fields, source, { form: format, path: 'the stamp', cell });

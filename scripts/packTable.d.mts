@@ -1,0 +1,3 @@
+import type { PackedTable } from '../web/model/unpackTable.ts';
+
+export function packTable(text: string): PackedTable;
