@@ -108,4 +108,25 @@ export const equivalents: readonly Equivalent[] = [
     becomes: '1',
     why: 'distances are whole minutes, and that of none was dealt with before',
   },
+  {
+    file: 'src/sim/partLoad.ts',
+    text: 'if (rate < least) {',
+    was: '<',
+    becomes: '<=',
+    why: 'at the lowest level itself nothing pauses: both formulas give its COP',
+  },
+  {
+    file: 'src/sim/roomWithMass.ts',
+    text: 'for (let step = -START_UP_HOURS; step < hours; step++) {',
+    was: '<',
+    becomes: '<=',
+    why: 'what is written behind the end of a typed array goes nowhere',
+  },
+  {
+    file: 'src/sim/season/declaredSeason.ts',
+    text: 'if (limit === undefined || outdoor <= limit.outdoor) return { capacity: limit?.capacity ?? atBivalent, cop };',
+    was: '<=',
+    becomes: '<',
+    why: 'at the point itself the line to it ends at its capacity',
+  },
 ];

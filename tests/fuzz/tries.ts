@@ -71,14 +71,6 @@ export function tryDegreeDays(weather: string, settings: string | undefined, sou
   return true;
 }
 
-/** `fit` */
-export function tryFit(scenario: string, readings: string, source: HurtFiles): boolean {
-  const { loaded, problems } = loadScenario(scenario, source);
-  expectAnswered(loaded, problems, source.written);
-  if (loaded === undefined) return false;
-  return tryReadings(loaded, readings, source);
-}
-
 /** The readings of `fit` on a house that is loaded. */
 export function tryReadings(
   loaded: NonNullable<ReturnType<typeof loadScenario>['loaded']>,

@@ -40,6 +40,7 @@ describe('the lumped house', () => {
     ['no ventilation', 180, { windows: 40, opaque: 60, ventilation: 0 }],
     ['no opaque elements', 180, { windows: 40, opaque: 0, ventilation: 30 }],
     ['air alone', 180, { windows: 0, opaque: 0, ventilation: 1 }],
+    ['air alone, in W/K', 180, { windows: 0, opaque: 0, ventilation: 45 }],
     ['a great loss by air', 4000, { windows: 0.1, opaque: 0.1, ventilation: 0.8 }],
   ])('one factor scales all ways so that the steady loss is the one entered: %s', (_, heatLoss, parts) => {
     const mass = massOf(120, 'medium', heatLoss, parts);

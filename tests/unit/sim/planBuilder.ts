@@ -65,13 +65,6 @@ export function column(usual: number, special: Readonly<Record<number, number>> 
   return values;
 }
 
-/** Marks of hours: 1 in those named. */
-export function marked(...hours: number[]): Uint8Array {
-  const marks = new Uint8Array(HOURS);
-  for (const hour of hours) marks[hour] = 1;
-  return marks;
-}
-
 const byHour = (value: ByHour, hours: number) => (typeof value === 'number' ? column(value, {}, hours) : value);
 
 /** Weather at sea level. */

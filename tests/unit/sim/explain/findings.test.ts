@@ -45,3 +45,46 @@ test('of two sources the one is said to be cheaper whose cost is less; ties go t
   }
   expect(Math.min(said.boiler, said.heatPump, said.neither)).toBeGreaterThan(5);
 });
+
+test('the backup is said to be short, or not to be needed, by what it was asked and gave', () => {
+  const said = { unmet: 0, notNeeded: 0, asked: 0 };
+  for (const one of explainedCases(1)) {
+    const { year, i } = one;
+    const stage = stageOf(one, 'backup')!;
+    if (stage.findings.includes('noHeatAsked')) continue;
+    const unmet = year.unmetHeat[i]! > 0;
+    expect(stage.findings.includes('unmet'), `${one.name} ${i}`).toBe(unmet);
+    const carries = stage.findings.includes('boilerCarries');
+    const asked = carries || figureOf(stage, 'backupAsked') > 0;
+    expect(stage.findings.includes('noBackupNeeded'), `${one.name} ${i}`).toBe(!asked);
+    if (unmet) said.unmet++;
+    said[asked ? 'asked' : 'notNeeded']++;
+  }
+  expect(Math.min(said.unmet, said.asked, said.notNeeded)).toBeGreaterThan(20);
+});
+
+test('a reheat is put down to hygiene in the hour that asks for it, and to nothing of the kind where none is asked', () => {
+  let asked = 0;
+  for (const one of explainedCases(1)) {
+    const { hotWater } = one.plan;
+    if (hotWater === null) continue;
+    const findings = stageOf(one, 'reheat')!.findings;
+    if (hotWater.hygieneAsked.every((each) => each === 0)) expect(findings).not.toContain('hygienePending');
+    if (hotWater.hygieneAsked[one.i] !== 1 || hotWater.allowed[one.i] !== 1) continue;
+    expect(findings, `${one.name} ${one.i}`).toContain('hygienePending');
+    expect(findings, `${one.name} ${one.i}`).not.toContain('cylinderCool');
+    asked++;
+  }
+  expect(asked).toBeGreaterThan(5);
+});
+
+test('only a cylinder that the heat pump did not heat is said to be above its reach', () => {
+  let above = 0;
+  for (const one of explainedCases(1)) {
+    const findings = stageOf(one, 'reheat')?.findings ?? [];
+    if (!findings.includes('cylinderAboveReach')) continue;
+    expect(one.year.heatPumpWaterHeat[one.i], `${one.name} ${one.i}`).toBe(0);
+    above++;
+  }
+  expect(above).toBeGreaterThan(0);
+});

@@ -163,6 +163,12 @@ const stampCases: Case[] = [
     says: ['“dd/MM/yyyy HH:mm”', '“1 Thermidor 01-01T00:00”'],
   },
   {
+    code: 'weather.loose-format',
+    text: `time,temperature\n${Array.from({ length: 30 }, () => '111111x,1.5').join('\n')}\n`,
+    settings: { stampFormat: 'MdMdMd' },
+    says: ['stampFormat', 'MdMdMd', 'twice'],
+  },
+  {
     code: 'weather.unread-stamps',
     text: plain.replaceAll(/^\d{4}-/gm, '1 Thermidor '),
     line: 2,
