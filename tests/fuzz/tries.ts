@@ -14,7 +14,7 @@ import { checkFile } from '../../src/scenario/checkFile.ts';
 import { isProblem } from '../../src/scenario/fileSource.ts';
 import { fitAnswer } from '../../src/scenario/fit/fitAnswer.ts';
 import { InputFiles } from '../../src/scenario/inputFiles.ts';
-import { loadScenario, scenarioOf } from '../../src/scenario/loadScenario.ts';
+import { type loadScenario, scenarioOf } from '../../src/scenario/loadScenario.ts';
 import { loadReadSettings, weatherFrom } from '../../src/scenario/loadWeather.ts';
 import { loadReadings } from '../../src/scenario/readings/loadReadings.ts';
 import { loadLabel } from '../../src/scenario/season/loadLabel.ts';
