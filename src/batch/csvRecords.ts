@@ -55,6 +55,12 @@ export class CsvRecords {
       lines = 1;
       open = false;
     }
+    // a line without end is handed on as it stands: gathered up, each block would be copied behind all that came before
+    if (all.length - begin > LONGEST_RECORD) {
+      records.push(this.#record(all.subarray(begin)));
+      this.#offset += all.length - begin;
+      begin = all.length;
+    }
     this.#rest = all.slice(begin);
     return records;
   }
