@@ -76,10 +76,10 @@ describe('layouts in use', () => {
 
   it('a typical year without names: year, month, day, hour and minute first, after lines of another form', () => {
     const text = [
-      'LOCATION,Nowhere,-,XXX,Source,700000,52.0,9.0,1.0,12.0',
-      'DESIGN CONDITIONS,0',
+      'PLACE,Nowhere,-,none,Source,700000,52.0,9.0,1.0,12.0',
+      'SIZING,0',
       'COMMENTS,none',
-      'DATA PERIODS,1,1,Data,Sunday, 1/ 1,12/31',
+      'SPAN,1,1,Data,Sunday, 1/ 1,12/31',
       ...year.map((h) => {
         const p = parts(h.minute + 60, true);
         return [1999 + p.m, p.m, p.d, p.h, 60, '?9?9E0', h.temperature, 1, h.humidity, h.pressure * 100].join(',');
