@@ -129,4 +129,25 @@ export const equivalents: readonly Equivalent[] = [
     becomes: '<',
     why: 'at the point itself the line to it ends at its capacity',
   },
+  {
+    file: 'src/tariffs/bill.ts',
+    text: 'for (let r = 0; r < runs.cell.length; r++) {',
+    was: '<',
+    becomes: '<=',
+    why: 'a run without an end has no hours, and is written nowhere',
+  },
+  {
+    file: 'src/tariffs/rateRules.ts',
+    text: "from: minuteOfDay(rate.from ?? '00:00') ?? 0,",
+    was: '0',
+    becomes: '1',
+    why: 'a time that cannot be read has brought a fault already, and its rule is not used',
+  },
+  {
+    file: 'src/tariffs/rateSlices.ts',
+    text: 'return from < to ? minute >= from && minute < to : minute >= from || minute < to;',
+    was: '<',
+    becomes: '<=',
+    why: 'a rate that ends where it begins is refused (the other two bounds of the line are held by tests)',
+  },
 ];

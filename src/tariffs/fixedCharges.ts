@@ -1,13 +1,11 @@
 import type { CivilClock } from './civilClock.ts';
-import { daysOfYear } from './civilClock.ts';
 import type { DayRange } from './rateSlices.ts';
 import type { Tariff } from './tariff.ts';
 
-/** How much of each civil month, and of the year, some days are: by days. */
+/** How much of each civil month some days are: by days. */
 export interface DayShares {
   readonly daysOfMonth: Float64Array;
   readonly shareOfMonth: Float64Array;
-  readonly shareOfYear: number;
 }
 
 /** Counts the days of each month that lie in a range. */
@@ -20,7 +18,7 @@ export function dayShares(clock: CivilClock, days: DayRange): DayShares {
     shareOfMonth[m] = daysOfMonth[m] / length;
     first += length;
   });
-  return { daysOfMonth, shareOfMonth, shareOfYear: (days.until - days.from) / daysOfYear(clock) };
+  return { daysOfMonth, shareOfMonth };
 }
 
 /**
@@ -28,7 +26,7 @@ export function dayShares(clock: CivilClock, days: DayRange): DayShares {
  * month and the charge per year are shared out by days.
  *
  * @returns 12 sums of money, before tax
- * @example standingOfMonths({ perDay: 0.5, perMonth: 10, perYear: 24 }, { daysOfMonth: Float64Array.of(31), shareOfMonth: Float64Array.of(1), shareOfYear: 31 / 365 }, 365)[0] // 31·0.50 + 10 + 24·31/365 = 27.538
+ * @example standingOfMonths({ perDay: 0.5, perMonth: 10, perYear: 24 }, { daysOfMonth: Float64Array.of(31), shareOfMonth: Float64Array.of(1) }, 365)[0] // 31·0.50 + 10 + 24·31/365 = 27.538
  */
 export function standingOfMonths(standing: Tariff['standing'], shares: DayShares, yearDays: number): Float64Array {
   const { perDay = 0, perMonth = 0, perYear = 0 } = standing ?? {};

@@ -132,7 +132,6 @@ function partOf(input: PartInput, clock: CivilClock, columns: PriceColumns): Pre
     ...layPrices({ slices, rulePrice, rateOfRule, series, taxFactor }, columns),
     ...{ days, rulePrice, rateOfRule, taxes, taxShare, taxInside },
     shareOfMonth: shares.shareOfMonth,
-    shareOfYear: shares.shareOfYear,
     hasSeries: series !== undefined,
     blocks: tariff.blocks,
     standing: standingOfMonths(tariff.standing, shares, daysOfYear(clock)),

@@ -31,9 +31,8 @@ export interface PreparedTariff {
 /** The days of one supplier. */
 export interface PreparedPart {
   readonly days: DayRange;
-  /** Share of each civil month's days, and of the year's days, that lie in this part. */
+  /** Share of each civil month's days that lie in this part. */
   readonly shareOfMonth: Float64Array;
-  readonly shareOfYear: number;
   /** Price of each rule, money per kWh, and the rate it counts as. */
   readonly rulePrice: Float64Array;
   readonly rateOfRule: Uint8Array;

@@ -1,8 +1,12 @@
 import { describe, expect, test } from 'vitest';
 import { CsvRecords, LONGEST_RECORD } from '../../src/batch/csvRecords.ts';
 import { problemText } from '../../src/core/problemText.ts';
+import { loadScenario } from '../../src/scenario/loadScenario.ts';
+import { weatherFrom } from '../../src/scenario/loadWeather.ts';
 import { readMeter } from '../../src/scenario/readings/readMeter.ts';
 import { readPriceSeries } from '../../src/tariffs/readPriceSeries.ts';
+import { inputOf, memoryFiles } from '../unit/scenario/memoryFiles.ts';
+import { scenarioText, weatherText } from '../unit/scenario/sampleFiles.ts';
 
 // What trying found, each as small as it could be made; every one of them failed before it was mended.
 
@@ -27,5 +31,25 @@ describe('a line without end', () => {
     expect(rows.length).toBeGreaterThan(0);
     expect(rows[0]!.line).toBe(1);
     expect(rows[0]!.bytes.length).toBeGreaterThan(LONGEST_RECORD);
+  });
+});
+
+describe('a number that is none', () => {
+  test('where a text belongs is not spelt in words of the language', () => {
+    const { problems } = loadScenario('a.yaml', memoryFiles({ 'a.yaml': scenarioText.replace('Test house', '.inf') }));
+    const text = problems.map(problemText).join('\n');
+    expect(text).toContain(
+      'a.yaml:1:7  name is not a finite number; it is a text of at most 200 letters\n    → put it in quotes',
+    );
+    expect(text).not.toMatch(/Infinity|NaN/);
+  });
+
+  test('that only the change of its unit makes is shown as a number', () => {
+    // −1.5e307 hPa is −1.5e309 Pa, beyond the numbers of the machine
+    const weather = weatherText().replace(/80$/gm, '80,980').replace('humidity %', 'humidity %,pressure hPa');
+    const spoilt = weather.replace('980\n', '-1.5e307\n');
+    const { problems } = weatherFrom(inputOf('w.csv', spoilt), {}, {});
+    const text = problems.map(problemText).join('\n');
+    expect(text).toContain('is -1.79769e+308 Pa; possible is 45000 to 110000 Pa');
   });
 });

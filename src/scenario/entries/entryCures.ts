@@ -59,6 +59,8 @@ function numberCure(field: Field, schema: z.ZodNumber, found: string): string {
 
 function textCure(field: Field, found: unknown): string | undefined {
   if (typeof found !== 'number') return undefined;
+  // .inf and .nan are numbers in YAML; how they were written is not known here
+  if (!Number.isFinite(found)) return 'put it in quotes';
   return formatCure(field.format, String(found)) ?? `put it in quotes: '${shown(found)}'`;
 }
 

@@ -106,8 +106,9 @@ function rangeText(quantity: Quantity): string {
   return `${least} to ${most} ${unit}`;
 }
 
+/** Six digits; a value that the change of its unit has carried beyond the numbers is shown as the lowest of them. */
 function rounded(value: number): string {
-  return String(Number(value.toPrecision(6)));
+  return String(Number(Math.max(value, -Number.MAX_VALUE).toPrecision(6)));
 }
 
 /** Holds humidity at 100 % and radiation at 0. Returns how many values were held. */

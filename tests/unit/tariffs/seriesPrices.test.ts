@@ -50,6 +50,17 @@ describe('a price series prices each step by its minutes', () => {
     expect(tariff.price[8759]).toBe(8759 / 2);
   });
 
+  test.each([
+    [24, 0],
+    [25, 1],
+  ])('a day of them is the difference of two offsets, and more is another year: %d hours', (late, warnings) => {
+    const begin = `2025-01-0${1 + Math.floor(late / 24)}T0${late % 24}:00+01:00`;
+    const series = seriesOf(begin, 60, 8760, (k) => k);
+    const { problems } = prepareTariff({ tariff: all, file: 't.yaml', series }, berlin);
+    expect(said(problems)).toHaveLength(warnings);
+    expect(said(problems).join()).toMatch(warnings === 0 ? /^$/ : /warning: for 25 hours the price of a year before/);
+  });
+
   test('instants outside the series are looked up a year later or earlier', () => {
     // Weather in UTC begins an hour after the civil year of Berlin.
     const utc = clockOf('Europe/Berlin', 0);
