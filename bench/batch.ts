@@ -5,15 +5,18 @@ import { dirname, join, resolve } from 'node:path';
 import { HomesReader, surveyHomes } from '../cli/batch/homesFile.ts';
 import { DiskSource } from '../cli/diskSource.ts';
 import { loadPlan } from '../src/batch/batchPlan.ts';
+import { JobFile } from '../src/batch/jobFile.ts';
 import { JobRunner } from '../src/batch/runJob.ts';
+import { SectionEntries } from '../src/batch/sectionEntries.ts';
 import { batchLine } from '../src/report/batchCsv.ts';
 import { batchJsonLine } from '../src/report/batchJson.ts';
+import { answerYear } from '../src/scenario/answer/makeAnswer.ts';
 import { InputFiles } from '../src/scenario/inputFiles.ts';
 import { Kept } from '../src/scenario/kept.ts';
+import { type LoadedScenario, scenarioFrom } from '../src/scenario/loadScenario.ts';
 import { newColumns } from '../src/sim/columns.ts';
 import { totalsOf } from '../src/sim/totals.ts';
 import { simulateYear } from '../src/sim/year.ts';
-import { loadDemo, planOf } from './demo.ts';
 
 /** Homes of the large plan, and of the small one that memory is held against. */
 const LARGE = 10_000;
@@ -44,7 +47,11 @@ export async function benchBatch(say: (line: string) => void): Promise<void> {
     say(
       `peak memory ${peak.toFixed(0)} MB, of ${SMALL} years ${ofSmall.peakMegabytes.toFixed(0)} MB: ${(peak / ofSmall.peakMegabytes).toFixed(2)} times`,
     );
-    say(`${(100 * shareOutside(small)).toFixed(0)} % of a job is not its simulation (hours, months and totals)`);
+    const { simulation, pricing } = partsOfJob(small);
+    const percent = (share: number) => `${(100 * share).toFixed(0)} %`;
+    say(
+      `of a job, ${percent(simulation)} is simulation (hours, months, totals), ${percent(pricing)} pricing (bills, boiler, carbon), ${percent(1 - simulation - pricing)} all else`,
+    );
   } finally {
     rmSync(folder, { recursive: true, force: true });
   }
@@ -90,8 +97,11 @@ function peakOf(pid: number): number {
   }
 }
 
-/** Share of a job's time outside the hours and their totals: the same homes in one thread, as jobs and as prepared plans. */
-function shareOutside(planFile: string): number {
+/**
+ * How a job's time is parted: each home as a job, and beside it what of that is simulation (hours, months, totals) and
+ * pricing (bills, boiler, carbon), the same plan in one thread.
+ */
+function partsOfJob(planFile: string): { readonly simulation: number; readonly pricing: number } {
   const kept = new Kept();
   const files = new InputFiles(new DiskSource(), kept);
   const { plan } = loadPlan(planFile, files);
@@ -99,28 +109,46 @@ function shareOutside(planFile: string): number {
   if (plan === undefined || survey === undefined) throw new Error('the plan of the bench cannot be read');
   const runner = new JobRunner(plan, files, kept);
   const homes = [...new HomesReader(survey.headerRow).homesFrom(survey.marks[0])].map(({ home }) => home);
-  const demo = planOf(loadDemo());
-  const plans = homes.map((_, i) => {
-    const heatLoss = (100 + (i % 500) * 0.5) / 1000;
-    const designLoad = (demo.house.designLoad * heatLoss) / demo.house.heatLoss;
-    return { ...demo, house: { ...demo.house, heatLoss, designLoad } };
+  const entries = new SectionEntries();
+  const scenarios = homes.map(({ changes }) => {
+    const { loaded } = scenarioFrom(entries.of(new JobFile(plan.base, changes)), files);
+    const { year } = loaded === undefined ? {} : answerYear(loaded, { kept });
+    if (loaded === undefined || year === undefined) throw new Error('a home of the bench cannot be simulated');
+    return { loaded, plan: year.plan };
   });
+  const hours = scenarios[0].plan.weather.hours;
+  const used = { year: newColumns(hours), billed: new Float64Array(hours) };
   const shape = { axes: [], homes: true, tariffs: 4 };
-  const columns = newColumns(demo.weather.hours);
+  const taken = { job: 0, simulation: 0, answer: 0 };
   let sink = 0;
-  let [whole, simulation] = [0, 0];
-  // A home and a prepared year in turn, so that the machine's speed meets both alike.
+  const timed = (run: () => number): number => {
+    const start = process.hrtime.bigint();
+    sink += run();
+    return Number(process.hrtime.bigint() - start);
+  };
+  // A job and its parts in turn, so that the machine's speed meets all alike; the first round warms up.
   for (let i = -homes.length; i < homes.length; i++) {
     const at = (i + homes.length) % homes.length;
-    const start = process.hrtime.bigint();
-    const row = runner.run(at + 1, homes[at], 0);
-    sink += batchLine(row, shape).length + batchJsonLine(row, shape.axes).length;
-    const between = process.hrtime.bigint();
-    sink += totalsOf(plans[at], simulateYear(plans[at], columns)).annual.electricity;
+    const { loaded, plan: year } = scenarios[at];
+    const job = timed(() => {
+      const row = runner.run(at + 1, homes[at], 0);
+      return batchLine(row, shape).length + batchJsonLine(row, shape.axes).length;
+    });
+    const simulation = timed(() => totalsOf(year, simulateYear(year, used.year)).annual.electricity);
+    // without `kept`'s memory of this home's boiler: a home is new to a batch
+    const answer = timed(
+      () => answerYear({ ...loaded, scenario: renewed(loaded.scenario) }, { kept, used }).problems.length,
+    );
     if (i < 0) continue;
-    whole += Number(between - start);
-    simulation += Number(process.hrtime.bigint() - between);
+    taken.job += job;
+    taken.simulation += simulation;
+    taken.answer += answer;
   }
   if (!Number.isFinite(sink)) throw new Error('a year has no finite figure');
-  return 1 - simulation / whole;
+  return { simulation: taken.simulation / taken.job, pricing: (taken.answer - taken.simulation) / taken.job };
+}
+
+/** The same scenario with a house of its own, as each home has one. */
+function renewed(scenario: LoadedScenario['scenario']): LoadedScenario['scenario'] {
+  return { ...scenario, house: { ...scenario.house } };
 }

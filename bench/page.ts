@@ -25,7 +25,7 @@ ${said.join('\n')}
 | one more tariff | the year that it prices | at most 5 % |
 | batch on two workers | on one | at least 1.7 times, on two free cores |
 | peak memory of a large batch | of a small one | at most 1.2 times |
-| what is not simulation in a job | the job | at most 30 % |
+| what is neither simulation nor pricing in a job | the job | at most 30 % |
 
 The hours run in two loops (\`src/sim/roomsKernel.ts\`, \`src/sim/waterKernel.ts\`) that leave the same bytes as the stages; a test
 holds that on random plans. The power of the emitters is a table with a binomial series whose first dropped term is below 1e-16

@@ -1,10 +1,10 @@
 import { hasErrors, type Problem } from '../core/problem.ts';
-import { answerYear } from '../scenario/answer/makeAnswer.ts';
+import { answerYear, type UsedColumns } from '../scenario/answer/makeAnswer.ts';
 import { warningsOf } from '../scenario/answer/warnings.ts';
 import type { InputFiles } from '../scenario/inputFiles.ts';
 import type { Kept } from '../scenario/kept.ts';
 import { scenarioFrom } from '../scenario/loadScenario.ts';
-import { newColumns, type YearColumns } from '../sim/columns.ts';
+import { newColumns } from '../sim/columns.ts';
 import { valuesOfOption } from './axes.ts';
 import type { BatchPlan } from './batchPlan.ts';
 import type { Home } from './homesTable.ts';
@@ -18,7 +18,7 @@ export class JobRunner {
   readonly #files: InputFiles;
   readonly #kept: Kept;
   readonly #entries = new SectionEntries();
-  readonly #columns = new Map<number, YearColumns>();
+  readonly #used = new Map<number, UsedColumns>();
   #home: { readonly home: Home; readonly file: JobFile } | undefined;
 
   /**
@@ -63,15 +63,14 @@ export class JobRunner {
   #simulate(file: JobFile): Pick<Row, 'result' | 'problems'> {
     const { loaded, problems } = scenarioFrom(this.#entries.of(file), this.#files);
     if (loaded === undefined) return { problems: errorsOf(problems) };
-    const columns = this.#columnsOf(loaded.clock.hours);
-    const made = answerYear(loaded, { kept: this.#kept, columns });
+    const made = answerYear(loaded, { kept: this.#kept, used: this.#usedOf(loaded.clock.hours) });
     if (made.year === undefined) return { problems: errorsOf(made.problems) };
     return { result: rowResult(made.year, warningsOf(made.year, problems)), problems: [] };
   }
 
-  #columnsOf(hours: number): YearColumns {
-    const known = this.#columns.get(hours) ?? newColumns(hours);
-    this.#columns.set(hours, known);
+  #usedOf(hours: number): UsedColumns {
+    const known = this.#used.get(hours) ?? { year: newColumns(hours), billed: new Float64Array(hours) };
+    this.#used.set(hours, known);
     return known;
   }
 }

@@ -11,6 +11,8 @@ import type { JobFile } from './jobFile.ts';
  */
 export class SectionEntries {
   readonly #sound = new WeakMap<object, unknown>();
+  /** What a section is that nobody wrote: its default, or nothing. */
+  readonly #leftOut = new Map<z.ZodType, { readonly value: unknown } | undefined>();
 
   /** @returns the scenario with its defaults filled in, none of them listed; or all that is wrong with it */
   of(file: JobFile): EntriesResult<Scenario> {
@@ -35,11 +37,13 @@ export class SectionEntries {
   }
 
   #section(schema: z.ZodType, raw: unknown): { readonly value: unknown } | undefined {
+    if (raw === undefined && this.#leftOut.has(schema)) return this.#leftOut.get(schema);
     const isSection = typeof raw === 'object' && raw !== null;
     if (isSection && this.#sound.has(raw)) return { value: this.#sound.get(raw) };
     const result = schema.safeParse(raw);
-    if (!result.success) return undefined;
-    if (isSection) this.#sound.set(raw, result.data);
-    return { value: result.data };
+    const section = result.success ? { value: result.data } : undefined;
+    if (raw === undefined) this.#leftOut.set(schema, section);
+    if (isSection && section !== undefined) this.#sound.set(raw, section.value);
+    return section;
   }
 }

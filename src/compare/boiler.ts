@@ -59,9 +59,10 @@ export interface BoilerYear {
  * Reference: MODEL section 12.
  */
 export function boilerYear(boiler: Boiler, need: BoilerNeed): BoilerYear {
-  const { hotWaterEfficiency, pumpPower } = boiler;
-  const forRooms = spaceHeatInput(boiler.efficiency, need.spaceHeat);
-  const roomInput = sumOf(forRooms);
+  const { efficiency, hotWaterEfficiency, pumpPower } = boiler;
+  const spaceHeat = sumOf(need.spaceHeat);
+  const roomInput =
+    typeof efficiency === 'number' ? spaceHeat / efficiency : sumOf(spaceHeatInput(efficiency, need.spaceHeat));
   const pump = new Float64Array(need.spaceHeat.length);
   for (let i = 0; i < pump.length; i++) if (need.spaceHeat[i] > 0) pump[i] = pumpPower;
   const input = roomInput + (need.hotWater + need.cylinderLoss) / hotWaterEfficiency;
@@ -70,11 +71,12 @@ export function boilerYear(boiler: Boiler, need: BoilerNeed): BoilerYear {
     service: boiler.servicePerYear,
     pump,
     pumpElectricity: sumOf(pump),
-    meanSpaceHeatEfficiency: roomInput > 0 ? sumOf(need.spaceHeat) / roomInput : ('no heat' as const),
+    meanSpaceHeatEfficiency: roomInput > 0 ? spaceHeat / roomInput : ('no heat' as const),
   };
   if (fuel !== undefined) {
     return { ...common, fuel: input, cost: fuelCost(fuel, input), electricity: pump, heatElectricity: 0 };
   }
+  const forRooms = spaceHeatInput(efficiency, need.spaceHeat);
   const lossOfHour = need.cylinderLoss / pump.length;
   const electricity = pump.map(
     (kWh, i) => kWh + forRooms[i] + (need.hotWaterByHour[i] + lossOfHour) / hotWaterEfficiency,

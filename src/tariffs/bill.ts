@@ -76,27 +76,34 @@ export function bill(prepared: PreparedTariff, electricity: Float64Array): Bill 
   for (const part of prepared.parts) chargePart(part, prepared, electricity, ledger);
   const { months } = ledger;
   const monthly: BillSums[] = [];
-  for (let m = 0; m < 12; m++) monthly.push(sumsOf((column) => months[column + m]));
+  for (let m = 0; m < 12; m++) monthly.push(sumsOf(months, m));
   const byRate = prepared.rateNames.map((name, r): [string, RateSums] => [
     name,
     { kWh: ledger.rateKWh[r], hours: prepared.hoursOfRate[r], cost: ledger.rateCost[r] },
   ]);
   return {
-    ...sumsOf((column) => compensatedSum(months, column, column + 12)),
+    ...sumsOf(yearOf(months), 0),
     byRate: Object.fromEntries(byRate),
     byTax: Object.fromEntries(ledger.byTax),
     monthly,
   };
 }
 
-function sumsOf(at: (column: number) => number): BillSums {
-  const energy = at(ENERGY);
-  const standing = at(STANDING);
-  const demand = at(DEMAND);
-  const taxes = at(TAXES);
-  const credits = at(CREDITS);
+/** The year of each column, where its January would stand. */
+function yearOf(months: Float64Array): Float64Array {
+  const year = new Float64Array(LEDGER_LENGTH);
+  for (let at = 0; at < LEDGER_LENGTH; at += 12) year[at] = compensatedSum(months, at, at + 12);
+  return year;
+}
+
+function sumsOf(ledger: Float64Array, m: number): BillSums {
+  const energy = ledger[ENERGY + m];
+  const standing = ledger[STANDING + m];
+  const demand = ledger[DEMAND + m];
+  const taxes = ledger[TAXES + m];
+  const credits = ledger[CREDITS + m];
   const total = energy + standing + demand + taxes - credits;
-  return { kWh: at(0), energy, standing, demand, taxes, taxesInside: at(TAXES_INSIDE), credits, total };
+  return { kWh: ledger[m], energy, standing, demand, taxes, taxesInside: ledger[TAXES_INSIDE + m], credits, total };
 }
 
 /** Adds one supplier's days to the ledger. */
@@ -140,15 +147,18 @@ function energyCells(part: PreparedPart, price: Float64Array, electricity: Float
   const kWh = new Float64Array(12 * rulePrice.length);
   const cost = new Float64Array(12 * rulePrice.length);
   for (let r = 0; r < runs.cell.length; r++) {
+    const from = runs.from[r];
     const to = runs.to[r];
+    if (!hasSeries) {
+      kWh[runs.cell[r]] += sumOfRun(electricity, from, to);
+      continue;
+    }
     let used = 0;
     let paid = 0;
-    if (hasSeries) {
-      for (let i = runs.from[r]; i < to; i++) {
-        used += electricity[i];
-        paid += electricity[i] * price[i];
-      }
-    } else for (let i = runs.from[r]; i < to; i++) used += electricity[i];
+    for (let i = from; i < to; i++) {
+      used += electricity[i];
+      paid += electricity[i] * price[i];
+    }
     kWh[runs.cell[r]] += used;
     cost[runs.cell[r]] += paid;
   }
@@ -158,6 +168,17 @@ function energyCells(part: PreparedPart, price: Float64Array, electricity: Float
   }
   if (!hasSeries) for (let cell = 0; cell < cost.length; cell++) cost[cell] = kWh[cell] * rulePrice[(cell / 12) | 0];
   return { kWh, cost };
+}
+
+/** Sum of a run, four hours at a time, so that additions need not wait for one another. */
+function sumOfRun(electricity: Float64Array, from: number, to: number): number {
+  let sum = 0;
+  let i = from;
+  for (; i + 4 <= to; i += 4) {
+    sum += electricity[i] + electricity[i + 1] + (electricity[i + 2] + electricity[i + 3]);
+  }
+  for (; i < to; i++) sum += electricity[i];
+  return sum;
 }
 
 /** Sum over the rules of one month's cells. */

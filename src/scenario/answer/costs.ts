@@ -20,7 +20,7 @@ function hybridFuelCost(loaded: LoadedScenario, fuel: number): Pick<AnnualCost, 
  *
  * @param runs what the heating takes on each tariff
  * @param boiler the year with the boiler, where there is one
- * @param kept where the scenarios of a batch keep the bills of household and boiler
+ * @param batch where the scenarios of a batch keep the bills of household and boiler, and a column for what is on the bill
  *
  * Reference: MODEL section 12.
  */
@@ -28,7 +28,7 @@ export function costsOf(
   loaded: LoadedScenario,
   runs: readonly HeatingRun[],
   boiler: BoilerYear | undefined,
-  kept?: Kept,
+  { kept, billed }: { readonly kept?: Kept | undefined; readonly billed?: Float64Array | undefined } = {},
 ): TariffCost[] {
   const { household, scenario } = loaded;
   const service = scenario.wholeLife?.servicePerYear ?? 0;
@@ -37,7 +37,7 @@ export function costsOf(
   let last: { run: HeatingRun; electricity: Float64Array } | undefined;
   return loaded.tariffs.map((tariff, i) => {
     const { prepared } = tariff;
-    if (last?.run !== runs[i]) last = { run: runs[i], electricity: sumOf(household, runs[i].electricity) };
+    if (last?.run !== runs[i]) last = { run: runs[i], electricity: sumOf(household, runs[i].electricity, billed) };
     const whole = bill(prepared, last.electricity);
     const householdBill = keptBill(prepared, household, kept);
     const heating = {
@@ -81,8 +81,7 @@ function keptSum(a: Float64Array, b: Float64Array, kept?: Kept): Float64Array {
   return sums.of(kept, kept?.key([a, b]) ?? '', () => sumOf(a, b));
 }
 
-function sumOf(a: Float64Array, b: Float64Array): Float64Array {
-  const sum = new Float64Array(a.length);
+function sumOf(a: Float64Array, b: Float64Array, sum: Float64Array = new Float64Array(a.length)): Float64Array {
   for (let i = 0; i < sum.length; i++) sum[i] = a[i] + b[i];
   return sum;
 }

@@ -44,16 +44,23 @@ export function makeAnswer(
 /** An answer as far as a row of a batch needs it: no break-even, no other prices, no whole life. */
 export type YearAnswer = Omit<BareAnswer, 'comparison'>;
 
+/** Columns that a year writes over. */
+export interface UsedColumns {
+  readonly year: YearColumns;
+  /** All electricity on the bill. */
+  readonly billed: Float64Array;
+}
+
 /**
  * The year of a loaded scenario: simulated, priced, beside the boiler.
  *
  * @param loaded a scenario without errors
- * @param batch what a batch uses again: prepared things, and columns whose year is no longer wanted
+ * @param batch what a batch uses again: prepared things, and the columns of a year that is no longer wanted
  * @returns the year; or a problem where the lumped model cannot be built from the house
  */
 export function answerYear(
   loaded: LoadedScenario,
-  { kept, columns: used }: { readonly kept?: Kept; readonly columns?: YearColumns } = {},
+  { kept, used }: { readonly kept?: Kept; readonly used?: UsedColumns } = {},
 ): { year?: YearAnswer; problems: Problem[] } {
   const { scenario, clock } = loaded;
   const present = loaded.tariffs[0]?.prepared;
@@ -62,10 +69,13 @@ export function answerYear(
   const { house } = prepared;
   const parts = prepareParts(loaded, kept);
   const plan = preparePlan(scenario, { ...parts, clock, house, present }, kept);
-  const columns = simulateYear(plan, used);
+  const columns = simulateYear(plan, used?.year);
   const totals = totalsOf(plan, columns);
   const boiler = boilerOf(loaded, { plan, totals, columns }, kept);
-  const costs = costsOf(loaded, heatingRuns(loaded.tariffs, plan, columns, totals), boiler, kept);
+  const costs = costsOf(loaded, heatingRuns(loaded.tariffs, plan, columns, totals), boiler, {
+    kept,
+    billed: used?.billed,
+  });
   const carbon = carbonOf(loaded, columns, totals, boiler);
   const base = house.baseTemperature ?? house.nominalSetPoint - house.internalGains / house.heatLoss;
   const year = {
