@@ -5,11 +5,13 @@ import { totalsOf } from '../src/sim/totals.ts';
 import { simulateByStages, simulateYear } from '../src/sim/year.ts';
 import { bill } from '../src/tariffs/bill.ts';
 import { benchBatch } from './batch.ts';
+import { benchColdStart } from './coldStart.ts';
 import { loadDemo, planOf } from './demo.ts';
 import { type Candidate, measure } from './measure.ts';
 import { keepPage } from './page.ts';
 import { plainC } from './plainC.ts';
 import { everythingOn } from './plans.ts';
+import { benchReading } from './reading.ts';
 
 /** Everything that was printed, for the page. */
 const said: string[] = [];
@@ -85,6 +87,8 @@ const year1 = perHour('a prepared year of the demo');
 say(`hot water and mass take ${(perHour('… and a house with mass') / year1).toFixed(2)} × the year without them`);
 say(`one more tariff costs ${((100 * perHour('one more tariff on it')) / year1).toFixed(1)} % of a simulated year`);
 
+benchReading(say);
+benchColdStart(say);
 await benchBatch(say);
 if (process.argv.includes('--keep')) keepPage(said);
 
