@@ -10,6 +10,8 @@ export interface Io {
   readonly colour: boolean;
   /** Whether the talk is read on a terminal, so that a line may be written anew; no when left out. */
   readonly terminal?: boolean;
+  /** Whether the results are read on a terminal that shows block letters; no when left out. */
+  readonly pictures?: boolean;
   /** Version of the program. */
   readonly version: string;
 }

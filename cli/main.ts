@@ -3,6 +3,7 @@ import type { Io } from './io.ts';
 import { lastResort } from './lastResort.ts';
 import { mayColour } from './mayColour.ts';
 import { runProgram } from './program.ts';
+import { showsPictures } from './showsPictures.ts';
 import { textSink } from './textSink.ts';
 
 const io: Io = {
@@ -10,6 +11,7 @@ const io: Io = {
   stderr: textSink(process.stderr, 'standard error'),
   colour: mayColour(process.stderr, process.env),
   terminal: process.stderr.isTTY === true,
+  pictures: showsPictures(process.stdout, process.env),
   version,
 };
 

@@ -3,6 +3,8 @@ import { answerText } from '../../src/report/answerText.ts';
 import { documentText } from '../../src/report/documentText.ts';
 import { hourlyCsv } from '../../src/report/hourlyCsv.ts';
 import { resultDocument } from '../../src/report/resultDocument.ts';
+import { hoursOfDay } from '../../src/report/terminal/hoursOfDay.ts';
+import { english } from '../../src/report/words.ts';
 import { makeAnswer } from '../../src/scenario/answer/makeAnswer.ts';
 import { loadScenario } from '../../src/scenario/loadScenario.ts';
 import { DiskSource } from '../diskSource.ts';
@@ -36,6 +38,9 @@ async function simulate(scenario: string, { json, hourly, outputs, io }: Wanted)
   await outputs.write(json, [documentText(document)]);
   await outputs.write(hourly, hourlyCsv(made.answer));
   await outputs.finish();
-  if (!outputs.takesStdout) await io.stdout.write(answerText(document));
+  if (!outputs.takesStdout) {
+    const pictures = io.pictures === true ? hoursOfDay(made.answer) : undefined;
+    await io.stdout.write(answerText(document, english, pictures));
+  }
   return EXIT.done;
 }

@@ -2,6 +2,7 @@ import { visibleText } from '../core/problem.ts';
 import { factor, figure } from './figures.ts';
 import { type Column, table } from './layout.ts';
 import type { ResultDocument } from './resultSchema.ts';
+import { lyingBar } from './terminal/blocks.ts';
 import type { Words } from './words.ts';
 
 type Cost = ResultDocument['costs'][0];
@@ -72,8 +73,15 @@ function cellOf(value: number | undefined, currency: string): string {
   return value === undefined ? '–' : `${figure(value, 0)}${currency}`;
 }
 
-/** The months and the year: need, heat by source, electricity, seasonal factor. */
-export function monthTable({ monthly, annual }: ResultDocument, words: Words): string {
+/** Letters of the longest bar. */
+const BAR_WIDTH = 12;
+
+/**
+ * The months and the year: need, heat by source, electricity, seasonal factor.
+ *
+ * @param bars whether a bar of each month's electricity stands beside its figure
+ */
+export function monthTable({ monthly, annual }: ResultDocument, words: Words, bars = false): string {
   const { columns } = words;
   const rows = [...monthly, annual];
   const column = (heading: string, of: (row: (typeof rows)[0]) => string): Column => ({
@@ -81,12 +89,25 @@ export function monthTable({ monthly, annual }: ResultDocument, words: Words): s
     figures: true,
     cells: rows.map(of),
   });
+  const most = Math.max(...monthly.map(({ electricity }) => electricity.total));
+  const barOf = (total: number) => (most === 0 ? '' : lyingBar(total, most, BAR_WIDTH));
+  const bar: Column = {
+    heading: '',
+    figures: false,
+    cells: [...monthly.map(({ electricity }) => barOf(electricity.total)), ''],
+  };
   return table([
     { heading: columns.month, figures: false, cells: [...words.months, words.year] },
     column(columns.need, (row) => figure(row.spaceHeatNeed, 0)),
-    column(columns.heatPumpHeat, (row) => figure(row.heatPumpHeat, 0)),
-    column(columns.backupHeat, (row) => figure(row.backupHeat, 0)),
+    column(bars ? inTwoLines(columns.heatPumpHeat) : columns.heatPumpHeat, (row) => figure(row.heatPumpHeat, 0)),
+    column(bars ? inTwoLines(columns.backupHeat) : columns.backupHeat, (row) => figure(row.backupHeat, 0)),
     column(columns.electricity, (row) => figure(row.electricity.total, 0)),
+    ...(bars ? [bar] : []),
     column(columns.factor, (row) => factor(row.seasonalFactor.h4)),
   ]);
+}
+
+/** A heading broken at its last blank, to save width. */
+function inTwoLines(heading: string): string {
+  return heading.replace(/ (?=\S+$)/, '\n');
 }

@@ -5,6 +5,8 @@ import { comparisonSection } from './comparisonSection.ts';
 import { factor, figure, kWh } from './figures.ts';
 import { heading, wrapped } from './layout.ts';
 import type { ResultDocument } from './resultSchema.ts';
+import { dayStrips } from './terminal/dayStrips.ts';
+import type { HoursOfDay } from './terminal/hoursOfDay.ts';
 import { weatherSummary } from './weatherSummary.ts';
 import { english, type Words } from './words.ts';
 
@@ -16,16 +18,18 @@ const SHOWN_OF_HASH = 12;
  *
  * @param document of one scenario
  * @param words of the language it is written in
+ * @param pictures the hours of the day, for a reader who sees block letters; months then have bars too
  * @returns lines of at most 80 columns where the names in them allow it, with a final newline; the same document gives
  *   the same text
  */
-export function answerText(document: ResultDocument, words: Words = english): string {
+export function answerText(document: ResultDocument, words: Words = english, pictures?: HoursOfDay): string {
   const sections = [
     [heading(visibleText(document.scenario)), wrapped(`${words.of}: ${visibleText(document.heatPumpUnit)}`)],
     [wrapped(answerSentences(document, words).join(' '))],
     costSection(document, words),
     comparisonSection(document, words),
-    [heading(words.headings.months), monthTable(document, words)],
+    [heading(words.headings.months), monthTable(document, words, pictures !== undefined)],
+    pictures === undefined ? [] : dayStrips(pictures, words),
     figureSection(document, words),
     warningSection(document, words),
     assumptionSection(document, words),

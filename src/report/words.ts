@@ -15,6 +15,7 @@ export const english = {
     costs: 'Cost of a year on each tariff',
     comparison: (tariff: string) => `Against the boiler, on ${tariff}`,
     months: 'Month by month, kWh',
+    hoursOfDay: (unit: string) => `What one kWh more costs by the hour of the day, in the mean of the year${unit}`,
     warnings: 'Look at this before you sign',
     assumptions: 'Assumed, because no file says otherwise',
     weather: 'How the weather file was understood',
@@ -39,6 +40,7 @@ export const english = {
     electricity: 'Electricity',
     factor: 'H4',
   },
+  heatingByHour: 'Heating takes',
   billNote: (household: string) => `The bill is that of the heating and of ${household} of the household together.`,
   billNoteAlone: 'The bill is that of the heating alone: no electricity of a household is entered.',
   costsNote:
