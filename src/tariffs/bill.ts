@@ -28,9 +28,16 @@ export interface RateSums {
   readonly cost: number;
 }
 
+export interface RateMonths {
+  readonly kWh: Float64Array;
+  readonly cost: Float64Array;
+}
+
 /** A year's bill. Costs by rate add up to the energy cost, months to the year, taxes by name to all taxes. */
 export interface Bill extends BillSums {
   readonly byRate: Readonly<Record<string, RateSums>>;
+  /** Energy by rate and civil month, before taxes that come on top: cell 12 · rate + month, rates in the order of `byRate`. */
+  readonly ofRateAndMonth: RateMonths;
   /** Taxes by name, on top or inside. */
   readonly byTax: Readonly<Record<string, number>>;
   /** Twelve civil months, January first. */
@@ -53,8 +60,7 @@ const LEDGER_LENGTH = 84;
 interface Ledger {
   /** Twelve months of each column, one column after the other: kWh, then as the constants say. */
   readonly months: Float64Array;
-  readonly rateKWh: number[];
-  readonly rateCost: number[];
+  readonly rates: RateMonths;
   readonly byTax: Map<string, number>;
 }
 
@@ -69,21 +75,28 @@ interface Ledger {
 export function bill(prepared: PreparedTariff, electricity: Float64Array): Bill {
   const ledger: Ledger = {
     months: new Float64Array(LEDGER_LENGTH),
-    rateKWh: prepared.rateNames.map(() => 0),
-    rateCost: prepared.rateNames.map(() => 0),
+    rates: {
+      kWh: new Float64Array(12 * prepared.rateNames.length),
+      cost: new Float64Array(12 * prepared.rateNames.length),
+    },
     byTax: new Map(),
   };
   for (const part of prepared.parts) chargePart(part, prepared, electricity, ledger);
-  const { months } = ledger;
+  const { months, rates } = ledger;
   const monthly: BillSums[] = [];
   for (let m = 0; m < 12; m++) monthly.push(sumsOf(months, m));
   const byRate = prepared.rateNames.map((name, r): [string, RateSums] => [
     name,
-    { kWh: ledger.rateKWh[r], hours: prepared.hoursOfRate[r], cost: ledger.rateCost[r] },
+    {
+      kWh: compensatedSum(rates.kWh, 12 * r, 12 * r + 12),
+      hours: prepared.hoursOfRate[r],
+      cost: compensatedSum(rates.cost, 12 * r, 12 * r + 12),
+    },
   ]);
   return {
     ...sumsOf(yearOf(months), 0),
     byRate: Object.fromEntries(byRate),
+    ofRateAndMonth: rates,
     byTax: Object.fromEntries(ledger.byTax),
     monthly,
   };
@@ -112,10 +125,11 @@ function chargePart(part: PreparedPart, prepared: PreparedTariff, electricity: F
   const { kWh, cost } = cells;
   const { months } = ledger;
   if (part.blocks) addBlocks(part, prepared.clock, cells);
-  part.rateOfRule.forEach((rate, rule) => {
-    ledger.rateKWh[rate] += compensatedSum(kWh, 12 * rule, 12 * rule + 12);
-    ledger.rateCost[rate] += compensatedSum(cost, 12 * rule, 12 * rule + 12);
-  });
+  for (let cell = 0; cell < kWh.length; cell++) {
+    const at = 12 * part.rateOfRule[(cell / 12) | 0] + (cell % 12);
+    ledger.rates.kWh[at] += kWh[cell];
+    ledger.rates.cost[at] += cost[cell];
+  }
   const peaks = part.demandPrice === 0 ? undefined : highestOfMonths(part, prepared.clock, electricity);
   let taxed = 0;
   for (let m = 0; m < 12; m++) {

@@ -6,6 +6,7 @@ import { costByMonth } from './costByMonth.ts';
 import { factorTable, monthTable, runningTable } from './factorTables.ts';
 import { loadDuration } from './loadDuration.ts';
 import { monthlyEnergy } from './monthlyEnergy.ts';
+import { ratesByMonth } from './ratesByMonth.ts';
 import type { ReportInput } from './reportInput.ts';
 import { whereSpent } from './whereSpent.ts';
 import { yearCarpets } from './yearCarpets.ts';
@@ -28,7 +29,7 @@ export function professionalPart(input: ReportInput): Markup {
     ]),
     section(said.money, [
       tariffsSideBySide(input),
-      charts([...costByMonth(input), wholeLifeFigure(input)]),
+      charts([...costByMonth(input), ...ratesByMonth(input), wholeLifeFigure(input)]),
       boilerTable(input),
       priceTable(input),
       carbonTable(input),

@@ -150,6 +150,9 @@ export const englishProfessional = {
       `What the heating adds to the electricity bill: ${cost} in the year, before credits.`,
     byMonthCaption: (currency: string) => `Cost of the heating by month, ${currency}`,
     byRate: 'The heating by rate, a year, before taxes on top',
+    byRateAndMonth: (tariff: string) => `The heating by rate and month on ${tariff}`,
+    byRateAndMonthSays: ({ rate, cost, kWh }: { rate: string; cost: string; kWh: string }) =>
+      `Most is paid in the rate ${rate}: ${cost} for ${kWh} in the year, before taxes on top.`,
     rate: 'Rate',
     rateHours: 'Hours',
   },

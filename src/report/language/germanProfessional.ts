@@ -148,6 +148,9 @@ export const germanProfessional: ProfessionalWords = {
     byMonthSays: (cost) => `Was die Heizung zur Stromrechnung beiträgt: ${cost} im Jahr, vor Gutschriften.`,
     byMonthCaption: (currency) => `Kosten der Heizung nach Monat, ${currency}`,
     byRate: 'Die Heizung nach Preisstufe, ein Jahr, ohne hinzukommende Steuern',
+    byRateAndMonth: (tariff) => `Die Heizung nach Preisstufe und Monat, ${tariff}`,
+    byRateAndMonthSays: ({ rate, cost, kWh }) =>
+      `Am meisten kostet die Preisstufe ${rate}: ${cost} für ${kWh} im Jahr, ohne hinzukommende Steuern.`,
     rate: 'Preisstufe',
     rateHours: 'Stunden',
   },

@@ -26,6 +26,16 @@ describe('energy', () => {
     expect(energy).toBeCloseTo(2336, DIGITS);
   });
 
+  test('is split by rate and month', () => {
+    // February: 28 · 8 h at 0.20 = 44.8 in the night, 28 · 16 h at 0.30 = 134.4 by day.
+    const { ofRateAndMonth, byRate } = bill(prepared(nightAndDay, berlin), steadyUse(berlin));
+    const [night, day] = ['night', 'day'].map((rate) => 12 * Object.keys(byRate).indexOf(rate) + 1);
+    expect(ofRateAndMonth.kWh[night!]).toBeCloseTo(224, DIGITS);
+    expect(ofRateAndMonth.cost[night!]).toBeCloseTo(44.8, DIGITS);
+    expect(ofRateAndMonth.cost[day!]).toBeCloseTo(134.4, DIGITS);
+    expect(ofRateAndMonth.cost.reduce((sum, cost) => sum + cost, 0)).toBeCloseTo(2336, DIGITS);
+  });
+
   test('of a step with two rates is split by minutes', () => {
     // One step of 6 kWh from 06:00 to 07:00, a third of it at 0.10.
     const tariff = ratesOf({ name: 'short', price: 0.1, from: '06:40', to: '07:00' }, { name: 'rest', price: 0.4 });

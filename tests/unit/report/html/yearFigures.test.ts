@@ -3,6 +3,7 @@ import { backupClasses } from '../../../../src/report/html/backupByTemperature.t
 import { coldestWeek } from '../../../../src/report/html/coldSpell.ts';
 import { durationOf } from '../../../../src/report/html/loadDuration.ts';
 import { beyondEdges } from '../../../../src/report/html/mapTables.ts';
+import { monthsOfRates } from '../../../../src/report/html/ratesByMonth.ts';
 import { whatIf } from '../../../../src/report/html/whatIf.ts';
 import { heatCells } from '../../../../src/report/html/whereSpent.ts';
 import { demoReport, houses, sampleReport } from './reportsOf.ts';
@@ -31,6 +32,22 @@ describe('where the year is spent', () => {
       const cells = heatCells(each);
       expect(sum(cells.map(({ amount }) => amount))).toBeCloseTo(each.totals.annual.heatPumpSpaceHeat, 6);
       expect(new Set(cells.map(({ x, y }) => `${x} ${y}`)).size).toBe(cells.length);
+    }
+  });
+});
+
+describe('the heating by rate and month', () => {
+  it('adds up to what each rate takes in the year, and over the rates to the months', () => {
+    for (const { bill, householdBill } of answer.costs) {
+      const rates = monthsOfRates(bill, householdBill);
+      for (const { rate, kWh, cost } of rates) {
+        expect(sum(kWh)).toBeCloseTo(bill.byRate[rate]!.kWh - householdBill.byRate[rate]!.kWh, 8);
+        expect(sum(cost)).toBeCloseTo(bill.byRate[rate]!.cost - householdBill.byRate[rate]!.cost, 8);
+      }
+      for (const month of [0, 6]) {
+        const added = bill.monthly[month]!.energy - householdBill.monthly[month]!.energy;
+        expect(sum(rates.map(({ cost }) => cost[month]!))).toBeCloseTo(added, 8);
+      }
     }
   });
 });
