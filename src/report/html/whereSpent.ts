@@ -1,4 +1,5 @@
 import { readMap } from '../../sim/heatPumpMap.ts';
+import { waterFlowTemperatures } from '../../sim/waterFlow.ts';
 import type { Field } from '../charts/contourLines.ts';
 import { densityField } from '../charts/densityField.ts';
 import { type Markup, markup } from '../charts/markup.ts';
@@ -10,7 +11,7 @@ import type { ReportInput } from './reportInput.ts';
 const CELL = 2;
 const LEVELS = [1.5, 2, 2.5, 3, 3.5, 4, 4.5, 5, 6, 7, 8];
 
-/** Heat to the rooms by cell of outdoor and flow temperature; kWh. */
+/** Heat of the unit by cell of outdoor and flow temperature; kWh. */
 export interface HeatCell {
   /** Colder and lower edge, °C. */
   readonly x: number;
@@ -19,25 +20,31 @@ export interface HeatCell {
 }
 
 /**
- * Where the year is spent: the unit's heat to the rooms by outdoor temperature and the flow that it gives.
+ * Where the year is spent: the unit's heat by outdoor temperature and the flow that it gives, to the rooms or the cylinder.
  *
- * @returns cells of 2 K × 2 K that hold heat, coldest first; their sum is the unit's heat to the rooms
+ * @returns cells of 2 K × 2 K that hold heat, coldest first; their sum is all heat of the unit
  */
 export function heatCells({ columns: c, plan }: ReportInput['answer']): HeatCell[] {
   const { highestFlow } = plan.unitOnWeather;
+  const waterFlow = waterFlowTemperatures(plan);
   const cells = new Map<string, HeatCell>();
-  for (let i = 0; i < c.hours; i++) {
-    const heat = c.heatPumpSpaceHeat[i];
-    if (heat <= 0) continue;
-    const x = CELL * Math.floor(plan.weather.temperature[i] / CELL);
-    const y = CELL * Math.floor(Math.min(c.flowTemperature[i], highestFlow[i]) / CELL);
+  const add = (outdoor: number, flow: number, heat: number) => {
+    const x = CELL * Math.floor(outdoor / CELL);
+    const y = CELL * Math.floor(flow / CELL);
     const key = `${x} ${y}`;
     cells.set(key, { x, y, amount: (cells.get(key)?.amount ?? 0) + heat });
+  };
+  for (let i = 0; i < c.hours; i++) {
+    const outdoor = plan.weather.temperature[i];
+    if (c.heatPumpSpaceHeat[i] > 0) {
+      add(outdoor, Math.min(c.flowTemperature[i], highestFlow[i]), c.heatPumpSpaceHeat[i]);
+    }
+    if (c.heatPumpWaterHeat[i] > 0) add(outdoor, waterFlow[i], c.heatPumpWaterHeat[i]);
   }
   return [...cells.values()].sort((a, b) => a.x - b.x || a.y - b.y);
 }
 
-/** The field with the unit's COP over it; a sentence where the unit gives no heat to the rooms. */
+/** The field with the unit's COP over it; a sentence where the unit gives no heat. */
 export function whereSpent(input: ReportInput): Markup {
   const { answer, words, figures } = input;
   const { spent: said } = words;

@@ -90,10 +90,10 @@ export const englishProfessional = {
   },
   spent: {
     title: 'Where the year is spent',
-    caption: 'Heat of the unit to the rooms by outdoor and flow temperature, kWh',
+    caption: 'Heat of the unit to rooms and cylinder by outdoor and flow temperature, kWh',
     outdoor: 'outdoor temperature, °C',
     flow: 'flow, °C',
-    none: 'The unit gives no heat to the rooms in this year.',
+    none: 'The unit gives no heat in this year.',
     says: ({ outdoor, flow }: Said) => `Most heat is given at ${outdoor} outdoors and a flow of ${flow}.`,
     reading: 'Lines are equal COP of the entered map at full load; dots its points, the dashed frame its edge.',
   },

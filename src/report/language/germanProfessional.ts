@@ -89,10 +89,10 @@ export const germanProfessional: ProfessionalWords = {
   },
   spent: {
     title: 'Wo das Jahr verbracht wird',
-    caption: 'Wärme des Geräts an die Räume nach Außen- und Vorlauftemperatur, kWh',
+    caption: 'Wärme des Geräts an Räume und Speicher nach Außen- und Vorlauftemperatur, kWh',
     outdoor: 'Außentemperatur, °C',
     flow: 'Vorlauf, °C',
-    none: 'Das Gerät gibt in diesem Jahr keine Wärme an die Räume.',
+    none: 'Das Gerät gibt in diesem Jahr keine Wärme.',
     says: ({ outdoor, flow }) => `Die meiste Wärme wird bei ${outdoor} außen und ${flow} Vorlauf gegeben.`,
     reading:
       'Linien sind gleiche Leistungszahl (COP) der Tabelle bei Volllast; Punkte ihre Messpunkte, der gestrichelte Rahmen ihr Rand.',

@@ -27,10 +27,13 @@ describe('the load-duration curve', () => {
 });
 
 describe('where the year is spent', () => {
-  it('holds all heat of the unit to the rooms', () => {
+  it('holds all heat of the unit, to the rooms and to the cylinder', () => {
     for (const each of [answer, hybrid, small]) {
       const cells = heatCells(each);
-      expect(sum(cells.map(({ amount }) => amount))).toBeCloseTo(each.totals.annual.heatPumpSpaceHeat, 6);
+      expect(sum(cells.map(({ amount }) => amount))).toBeCloseTo(
+        each.totals.annual.heatPumpSpaceHeat + each.totals.annual.heatPumpWaterHeat,
+        6,
+      );
       expect(new Set(cells.map(({ x, y }) => `${x} ${y}`)).size).toBe(cells.length);
     }
   });
