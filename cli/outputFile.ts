@@ -8,8 +8,8 @@ import type { FileIdentity } from './fileIdentity.ts';
 /** A file that is being written beside its place, and takes its name only when it is whole. */
 export interface OutputFile {
   readonly identity: FileIdentity;
-  /** Adds text. @throws OutputFault */
-  write(text: string): Promise<void>;
+  /** Adds text, or bytes. @throws OutputFault */
+  write(piece: string | Uint8Array): Promise<void>;
   /** Ends the writing and gives the file its name. @throws OutputFault */
   finish(): Promise<void>;
   /** Removes what was written; nothing after `finish`. Never throws. */
@@ -22,12 +22,17 @@ export class OutputFault extends Error {
 
   constructor(file: string, fault: unknown) {
     super(faultText(fault), { cause: fault });
-    this.problem = unwritable(file, faultText(fault));
+    this.problem = unwritable(file, fault);
   }
 }
 
-function unwritable(file: string, found: string): Problem {
-  return { code: 'file.unwritable', severity: 'error', file, found };
+/** Codes of a disk that takes no more. */
+const FULL = ['ENOSPC', 'EDQUOT'];
+
+function unwritable(file: string, fault: unknown): Problem {
+  const hint = 'make room on the disk, or choose a folder on another one, and run it again';
+  const cure = FULL.includes(faultCode(fault)) ? { hint } : {};
+  return { code: 'file.unwritable', severity: 'error', file, found: faultText(fault), ...cure };
 }
 
 /**
@@ -51,7 +56,7 @@ export async function openOutput(name: string): Promise<OutputFile | Problem> {
     if (stats !== undefined) fchmodSync(handle.fd, stats.mode & 0o777);
     return new OpenedFile(identity, handle, passing);
   } catch (fault) {
-    return unwritable(name, faultText(fault));
+    return unwritable(name, fault);
   }
 }
 
@@ -87,8 +92,8 @@ class OpenedFile implements OutputFile {
     this.#passing = passing;
   }
 
-  async write(text: string): Promise<void> {
-    await this.#tried(() => this.#handle.appendFile(text));
+  async write(piece: string | Uint8Array): Promise<void> {
+    await this.#tried(() => this.#handle.appendFile(piece));
   }
 
   async finish(): Promise<void> {

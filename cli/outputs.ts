@@ -97,6 +97,16 @@ export class Outputs {
     for (const piece of pieces) await (target.file ?? this.#stdout).write(piece);
   }
 
+  /**
+   * Writes a result of bytes into its file.
+   *
+   * @param name of the output as it was opened; one that is not text is never opened for the standard output
+   * @throws OutputFault
+   */
+  async writeBytes(name: string, bytes: Uint8Array): Promise<void> {
+    await this.#targets.find((known) => known.name === name)?.file?.write(bytes);
+  }
+
   /** Gives every file its name. @throws OutputFault */
   async finish(): Promise<void> {
     for (const { file } of this.#targets) await file?.finish();

@@ -24,34 +24,45 @@ export interface ChunkWork {
 
 /**
  * Runs chunks, a few at once. A chunk whose worker dies is run again job by job, so that only the job that killed it is lost.
+ * Chunks that are under way when the work ends by a fault are not kept: their workers are stopped, and no job killed them.
  *
  * @throws OutputFault where a chunk cannot be kept
  */
 export async function runChunks(work: ChunkWork): Promise<void> {
   const queue = work.tasks[Symbol.iterator]();
+  const state = { ended: false };
   const runNext = async (): Promise<void> => {
     for (let next = queue.next(); next.done !== true; next = queue.next()) {
-      await work.done(await runOne(next.value, work));
+      const kept = await runOne(next.value, work, state);
+      if (kept === undefined) return;
+      await work.done(kept);
     }
   };
   try {
     await Promise.all(Array.from({ length: work.atOnce }, runNext));
   } finally {
+    state.ended = true;
     queue.return?.();
   }
 }
 
-async function runOne(task: ChunkTask, { pool, lost, keep }: ChunkWork): Promise<ChunkKept> {
+/** @returns nothing where the work has ended meanwhile */
+async function runOne(
+  task: ChunkTask,
+  { pool, lost, keep }: ChunkWork,
+  state: { readonly ended: boolean },
+): Promise<ChunkKept | undefined> {
   try {
     return await pool.run(task);
   } catch (fault) {
     if (fault instanceof OutputFault) throw fault;
   }
   const parts: ChunkDone[] = [];
-  for (let i = 0; i < task.count; i++) {
+  for (let i = 0; i < task.count && !state.ended; i++) {
     const job = { ...task, first: task.first + i, count: 1 };
     parts.push(await pool.runApart(job).catch((fault: unknown) => lost(job, fault)));
   }
+  if (state.ended) return undefined;
   const whole = joined(task, parts);
   keep(whole);
   return whole;

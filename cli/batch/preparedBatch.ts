@@ -6,7 +6,7 @@ import type { Home } from '../../src/batch/homesTable.ts';
 import { JobFile } from '../../src/batch/jobFile.ts';
 import { faultsOfAll, mostTariffs, variedPlaces } from '../../src/batch/varied.ts';
 import { hasErrors, type Problem } from '../../src/core/problem.ts';
-import type { Assumption } from '../../src/scenario/answer/answer.ts';
+import type { Assumption } from '../../src/scenario/answer/assumption.ts';
 import { makeAnswer } from '../../src/scenario/answer/makeAnswer.ts';
 import { holdAgainst } from '../../src/scenario/entries/readEntries.ts';
 import { InputFiles, type InputRecord } from '../../src/scenario/inputFiles.ts';

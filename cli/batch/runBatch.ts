@@ -5,6 +5,7 @@ import { figureColumns } from '../../src/batch/rowColumns.ts';
 import type { Problem } from '../../src/core/problem.ts';
 import type { TableShape } from '../../src/report/batchCsv.ts';
 import { type BatchManifest, listedAxes, sortedInputs } from '../../src/report/batchManifest.ts';
+import { assumptionNote } from '../../src/report/englishNotes.ts';
 import type { InputRecord } from '../../src/scenario/inputFiles.ts';
 import { removeOnInterruption } from '../interruption.ts';
 import type { Io } from '../io.ts';
@@ -196,6 +197,6 @@ function manifestOf(batch: PreparedBatch, { version, part, rows, failed, inputs 
     ...{ rows, failed },
     columns: figureColumns(setup.tariffs),
     inputs: sortedInputs(inputs),
-    assumptions: assumptions.map(({ path, text }) => ({ path, text })),
+    assumptions: assumptions.map(assumptionNote),
   };
 }

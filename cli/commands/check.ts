@@ -12,6 +12,10 @@ const kindWords = {
   plan: 'a plan of a batch',
   weather: 'weather',
   priceSeries: 'a price series',
+  carbonFactors: 'carbon factors of electricity',
+  meter: 'the meter of a household',
+  readings: 'meter readings',
+  homes: 'a table of homes',
 } as const;
 
 /** Looks through input files: says what each was taken for, and lists all that is wrong with any of them. */
@@ -27,10 +31,18 @@ export async function run({ files }: CommandInput, io: Io): Promise<number> {
   return sound ? EXIT.done : EXIT.wrongInput;
 }
 
-/** A plan is looked through with its base scenario, its homes and its first year, as a batch would. */
+/**
+ * A plan is looked through with its base scenario, its homes and its first year, as a batch would; a table of homes alone has
+ * the names of its columns and the length of its rows looked at.
+ */
 async function checkWhole(file: string, source: DiskSource): Promise<CheckedFile> {
   const checked = checkFile(file, source);
-  if (checked.kind !== 'plan' || hasErrors(checked.problems)) return checked;
+  if (hasErrors(checked.problems)) return checked;
+  if (checked.kind === 'homes') {
+    const { homesProblems } = await import('../batch/homesProblems.ts');
+    return { ...checked, problems: homesProblems(file) };
+  }
+  if (checked.kind !== 'plan') return checked;
   const { prepareBatch } = await import('../batch/preparedBatch.ts');
   return { ...checked, problems: prepareBatch(file).problems };
 }

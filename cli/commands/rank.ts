@@ -1,16 +1,10 @@
-import { existsSync } from 'node:fs';
-import { join } from 'node:path';
-import { type Criterion, criteria, Ranking } from '../../src/batch/ranking.ts';
-import type { Row } from '../../src/batch/row.ts';
+import { type Criterion, criterionOf, Ranking, rankedValue } from '../../src/batch/ranking.ts';
 import { nearestName } from '../../src/core/nearest.ts';
 import type { Problem } from '../../src/core/problem.ts';
-import { rowOfJsonLine } from '../../src/report/batchJson.ts';
 import type { BatchManifest } from '../../src/report/batchManifest.ts';
 import { type RankedBatch, rankDocument, rankText } from '../../src/report/batchRankText.ts';
 import { documentText } from '../../src/report/documentText.ts';
-import { fileLines } from '../batch/fileLines.ts';
-import { manifestIn } from '../batch/manifestFile.ts';
-import { RESULT_FILES } from '../batch/resultsFiles.ts';
+import { finishedBatch, rowsIn } from '../batch/finishedBatch.ts';
 import { type CommandInput, EXIT, type Io } from '../io.ts';
 import { type Outputs, withOutputs } from '../outputs.ts';
 import { tellProblems } from '../tellProblems.ts';
@@ -26,20 +20,15 @@ export async function run({ files, options }: CommandInput, io: Io): Promise<num
     return wrongUse(`--top is '${options.top}'; it is a whole number from 1 to ${MOST_ROWS}`, 'rank', io);
   }
   const [folder] = files;
-  const manifest = manifestIn(folder);
-  if (manifest === undefined || !existsSync(join(folder, RESULT_FILES.lines))) {
-    await tellProblems([{ code: 'batch.no-results', severity: 'error', file: folder }], io);
+  const manifest = finishedBatch(folder);
+  if ('code' in manifest) {
+    await tellProblems([manifest], io);
     return EXIT.wrongInput;
   }
   const axes = manifest.axes.map(({ name }) => name);
   if (axis !== undefined && !axes.includes(axis)) return wrongUse(noSuchAxis(axis, axes), 'rank', io);
   const asked = { folder, manifest, by: criterionOf(options.by), axis, top };
   return withOutputs([json], io, (outputs) => rank(asked, { json, outputs, io }));
-}
-
-/** The command line admits no other words. */
-function criterionOf(word: string | undefined): Criterion {
-  return word === 'carbon' || word === 'seasonalFactor' || word === 'backupHours' ? word : 'cost';
 }
 
 function noSuchAxis(axis: string, axes: readonly string[]): string {
@@ -79,21 +68,12 @@ function rankedBatch({ folder, manifest, by, axis, top }: Asked): RankedBatch | 
   const ranking = new Ranking(by, axes, top);
   let rows = 0;
   let unranked = 0;
-  for (const group of fileLines(join(folder, RESULT_FILES.lines))) {
-    for (const line of group.toString('utf8').trimEnd().split('\n')) {
-      const row = rowOfJsonLine(line, axes);
-      if (row === undefined) return { code: 'batch.no-results', severity: 'error', file: folder };
-      const value = valueOfRow(row, by);
-      rows++;
-      if (value === undefined) unranked++;
-      else ranking.add({ job: row.job, home: row.home, axes: row.axes, value });
-    }
+  for (const row of rowsIn(folder, manifest)) {
+    if ('code' in row) return row;
+    const value = rankedValue(row, by);
+    rows++;
+    if (value === undefined) unranked++;
+    else ranking.add({ job: row.job, home: row.home, axes: row.axes, value });
   }
   return { by, axes, rows, unranked, result: ranking.result(axis) };
-}
-
-function valueOfRow({ result }: Pick<Row, 'result'>, by: Criterion): number | undefined {
-  if (by === 'cost') return result?.tariffs[0]?.systemTotal;
-  const value = result?.figures[criteria[by].figure];
-  return typeof value === 'number' ? value : undefined;
 }

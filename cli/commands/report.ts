@@ -1,26 +1,47 @@
+import { statSync } from 'node:fs';
 import { makeReport } from '../../src/report/html/makeReport.ts';
-import type { ReportInput } from '../../src/report/html/reportInput.ts';
 import { reportPage } from '../../src/report/html/reportPage.ts';
 import { reportText } from '../../src/report/html/reportText.ts';
 import { LANGUAGES, type Language } from '../../src/report/language/languages.ts';
 import { DiskSource } from '../diskSource.ts';
 import { type CommandInput, EXIT, type Io, STDOUT } from '../io.ts';
-import { type Outputs, withOutputs } from '../outputs.ts';
-import { type PdfOutput, withPdf } from '../pdf/pdfOutput.ts';
-import { printPdf } from '../pdf/printPdf.ts';
+import { withOutputs } from '../outputs.ts';
+import { withBrowser } from '../pdf/withBrowser.ts';
 import { tellProblems } from '../tellProblems.ts';
+import { type ReportPlaces, writeReport } from '../writtenReport.ts';
 import { wrongUse } from '../wrongUse.ts';
 
-/** Writes the report of a scenario as HTML, and as PDF where that is asked for. */
+/** Writes the report of a scenario, or of a batch, as HTML, and as PDF where that is asked for. */
 export async function run({ files, options }: CommandInput, io: Io): Promise<number> {
   const { out, pdf, date } = options;
   if (out === undefined) return wrongUse('--out FILE is missing: the report (HTML)', 'report', io);
   if (pdf === STDOUT) return wrongUse('a PDF needs a file: name one behind --pdf', 'report', io);
   if (date !== undefined && !isDate(date)) return wrongUse(`'${date}' is no date such as 2025-03-31`, 'report', io);
   const language = LANGUAGES.find((known) => known === options.language) ?? 'en';
-  return withOutputs([out], io, (outputs) =>
-    withPdf(pdf, io, (printed) => report({ scenario: files[0], out, date, language, outputs, printed }, io)),
+  const [name] = files;
+  const isBatch = isFolder(name);
+  const foreign = (['by', 'axes'] as const).find((option) => !isBatch && options[option] !== undefined);
+  if (foreign !== undefined) {
+    return wrongUse(`--${foreign} is for the results of a batch, and '${name}' is no folder`, 'report', io);
+  }
+  return withOutputs([out, pdf], io, (outputs) =>
+    withBrowser(pdf, io, async (browser) => {
+      const printed = pdf === undefined || browser === undefined ? undefined : { file: pdf, browser };
+      const places = { out, outputs, pdf: printed };
+      if (!isBatch) return report({ scenario: name, date, language }, places, io);
+      const { batchReport } = await import('./batchReport.ts');
+      return batchReport({ folder: name, date, language, by: options.by, axes: options.axes }, places, io);
+    }),
   );
+}
+
+/** Whether a name is that of a folder; what it is otherwise is told where it is read. */
+function isFolder(name: string): boolean {
+  try {
+    return statSync(name).isDirectory();
+  } catch {
+    return false;
+  }
 }
 
 /** A day that is on the calendar. */
@@ -31,36 +52,15 @@ function isDate(text: string): boolean {
 
 interface Asked {
   readonly scenario: string;
-  readonly out: string;
   readonly date: string | undefined;
   readonly language: Language;
-  readonly outputs: Outputs;
-  readonly printed: PdfOutput | undefined;
 }
 
-async function report({ scenario, out, date, language, outputs, printed }: Asked, io: Io): Promise<number> {
+async function report({ scenario, date, language }: Asked, places: ReportPlaces, io: Io): Promise<number> {
   const source = new DiskSource();
   const { input, problems } = makeReport(scenario, source, { language, date, version: io.version });
-  const clashes = [...outputs.overInputs(source.identities), ...(printed?.overFiles(source.identities, out) ?? [])];
+  const clashes = places.outputs.overInputs(source.identities);
   await tellProblems([...clashes, ...problems], io);
   if (input === undefined || clashes.length > 0) return EXIT.wrongInput;
-  return write(input, { out, outputs, printed }, io);
-}
-
-async function write(
-  input: ReportInput,
-  { out, outputs, printed }: Pick<Asked, 'out' | 'outputs' | 'printed'>,
-  io: Io,
-): Promise<number> {
-  const page = reportPage(input);
-  const failure = printed === undefined ? undefined : await printPdf(page, printed);
-  if (failure !== undefined) {
-    await tellProblems([failure], io);
-    return EXIT.notWritten;
-  }
-  await outputs.write(out, [page]);
-  await outputs.finish();
-  printed?.finish();
-  if (!outputs.takesStdout) await io.stdout.write(reportText(input));
-  return EXIT.done;
+  return writeReport({ page: reportPage(input), text: reportText(input) }, places, io);
 }

@@ -5,7 +5,7 @@ import { pathToFileURL } from 'node:url';
 import type { Problem } from '../../src/core/problem.ts';
 import { removeOnInterruption } from '../interruption.ts';
 import { BrowserPipe } from './browserPipe.ts';
-import type { PdfOutput } from './pdfOutput.ts';
+import type { Browser } from './findBrowser.ts';
 
 /** A browser that takes longer is taken for stuck, ms. */
 const LONGEST = 60_000;
@@ -35,33 +35,29 @@ const PRINTING = {
  * Prints a page by a browser.
  *
  * @param page HTML that needs nothing beside itself
- * @param output takes the bytes
- * @returns why it could not be printed; nothing where it was
- * @throws OutputFault
+ * @param file of the PDF, for the problem
+ * @returns the bytes of the PDF, or why it could not be printed
  */
-export async function printPdf(page: string, output: PdfOutput): Promise<Problem | undefined> {
-  const { program, env } = output.browser;
+export async function printPdf(page: string, chromium: Browser, file: string): Promise<Uint8Array | Problem> {
+  const { program, env } = chromium;
   const folder = mkdtempSync(join(tmpdir(), 'winterledger-print-'));
   const discard = () => rmSync(folder, { recursive: true, force: true, maxRetries: 3 });
   removeOnInterruption({ discard });
   // A browser refuses its sandbox to the superuser; the page holds no script and fetches nothing.
   const asRoot = process.getuid?.() === 0 ? ['--no-sandbox'] : [];
   let browser: BrowserPipe | undefined;
-  let printed: Uint8Array | Problem;
   try {
     const html = join(folder, 'report.html');
     writeFileSync(html, page);
     browser = new BrowserPipe(program, [...FLAGS, ...asRoot, `--user-data-dir=${join(folder, 'profile')}`], env);
-    printed = await withinTime(bytesOf(browser, pathToFileURL(html).href));
+    return await withinTime(bytesOf(browser, pathToFileURL(html).href));
   } catch (fault) {
-    printed = failure(output, fault instanceof Error ? fault.message : String(fault));
+    const found = fault instanceof Error ? fault.message : String(fault);
+    return { code: 'report.browser-failed', severity: 'error', file, path: program, found };
   } finally {
     await browser?.close();
     discard();
   }
-  if ('code' in printed) return printed;
-  output.write(printed);
-  return undefined;
 }
 
 async function bytesOf(browser: BrowserPipe, address: string): Promise<Uint8Array> {
@@ -82,8 +78,4 @@ function withinTime<T>(work: Promise<T>): Promise<T> {
     const stuck = setTimeout(() => reject(new Error(`it took longer than ${LONGEST / 1000} s`)), LONGEST);
     work.then(resolve, reject).finally(() => clearTimeout(stuck));
   });
-}
-
-function failure({ name, browser }: PdfOutput, found: string): Problem {
-  return { code: 'report.browser-failed', severity: 'error', file: name, path: browser.program, found };
 }

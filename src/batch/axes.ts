@@ -108,6 +108,7 @@ function rangeValues(entry: { from: number; to: number; step: number }, report: 
     report(['step'], {
       code: 'batch.bad-range',
       found: `${count} values are more than the ${MOST_RANGE_VALUES} of an axis`,
+      hint: 'take a larger step, or a shorter range',
     });
     return [];
   }

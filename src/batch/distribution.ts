@@ -21,7 +21,8 @@ export interface Distribution {
  * @returns undefined where there is no value
  * @example distribution(Float64Array.of(1, 2, 3, 4))?.median // 2.5
  *
- * Reference: quantiles as simple-statistics takes them: the mean of the two values beside a place that lies between two.
+ * Reference: Hyndman and Fan 1996, Sample quantiles in statistical packages, The American Statistician 50(4), 361–365,
+ * type 7: the quantile p of n sorted values stands at the place (n − 1)·p, counted from 0, by linear interpolation.
  */
 export function distribution(values: Float64Array): Distribution | undefined {
   const known = values.filter((value) => !Number.isNaN(value)).sort();

@@ -1,15 +1,28 @@
 import { type Distribution, distribution } from './distribution.ts';
 import { GrowingColumn } from './growingColumn.ts';
+import type { Row } from './row.ts';
 
-/** What rows may be ranked by, and whether little or much of it is good. */
+/** What rows may be ranked by, whether little or much of it is good, and the decimals it is written with. */
 export const criteria = {
-  cost: { figure: 'tariff1.systemTotal', best: 'least' },
-  carbon: { figure: 'carbonHeatPump', best: 'least' },
-  seasonalFactor: { figure: 'h4', best: 'most' },
-  backupHours: { figure: 'backupHours', best: 'least' },
+  cost: { figure: 'tariff1.systemTotal', best: 'least', decimals: 0 },
+  carbon: { figure: 'carbonHeatPump', best: 'least', decimals: 0 },
+  seasonalFactor: { figure: 'h4', best: 'most', decimals: 2 },
+  backupHours: { figure: 'backupHours', best: 'least', decimals: 0 },
 } as const;
 
 export type Criterion = keyof typeof criteria;
+
+/** The criterion that a word names; the cost where it names none. */
+export function criterionOf(word: string | undefined): Criterion {
+  return word === 'carbon' || word === 'seasonalFactor' || word === 'backupHours' ? word : 'cost';
+}
+
+/** The figure by which a row is ranked; undefined where the row has none, or a word in its place. */
+export function rankedValue({ result }: Pick<Row, 'result'>, by: Criterion): number | undefined {
+  if (by === 'cost') return result?.tariffs[0]?.systemTotal;
+  const value = result?.figures[criteria[by].figure];
+  return typeof value === 'number' ? value : undefined;
+}
 
 /** A row as far as it is ranked. */
 export interface RankedRow {

@@ -1,6 +1,6 @@
 import type { Problem } from '../core/problem.ts';
-import type { Warning } from '../scenario/answer/answer.ts';
 import type { YearAnswer } from '../scenario/answer/makeAnswer.ts';
+import type { Warning } from '../scenario/answer/warning.ts';
 import type { AxisValue } from './axes.ts';
 import { rowFigures, type TariffFigure } from './rowColumns.ts';
 

@@ -1,3 +1,4 @@
+import { wholePower } from '../core/power.ts';
 import type { CostParts } from './annualCost.ts';
 
 /** What a heat pump costs to buy, and how money and prices go on; rates are shares a year above inflation. */
@@ -67,7 +68,7 @@ export function wholeLife(heatPump: CostParts, boiler: CostParts, terms: WholeLi
   let balance = -netCapital;
   for (let year = 1; year <= terms.years; year++) {
     const saving = costIn(year, boiler, terms) - costIn(year, heatPump, terms);
-    const presentValue = saving / (1 + terms.discountRate) ** year;
+    const presentValue = saving / wholePower(1 + terms.discountRate, year);
     balance += presentValue;
     years.push({ year, saving, presentValue, balance });
   }
@@ -82,7 +83,7 @@ export function wholeLife(heatPump: CostParts, boiler: CostParts, terms: WholeLi
 
 /** Cost of one year at its real prices. */
 function costIn(year: number, { electricity, fuel, service }: CostParts, terms: WholeLifeTerms): number {
-  const grown = (drift: number) => (1 + drift) ** (year - 1);
+  const grown = (drift: number) => wholePower(1 + drift, year - 1);
   return electricity * grown(terms.electricityDrift) + fuel * grown(terms.fuelDrift) + service;
 }
 

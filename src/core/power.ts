@@ -20,7 +20,7 @@ export interface FixedPower {
 }
 
 const INTERVALS = 128;
-/** Arguments from 2^−64 up to 2^16; below, x^p counts as 0, above the general power is used. */
+/** Arguments from 2^−64 up to 2^16; below, x^p counts as 0, above in steps of 2^16. */
 const LOWEST_SCALE = -64;
 const HIGHEST_SCALE = 15;
 const SMALLEST = 2 ** LOWEST_SCALE;
@@ -39,20 +39,54 @@ const HIGH = asWords[1] === 0 ? 0 : 1;
  */
 export function fixedPower(exponent: number): FixedPower {
   const centres = Float64Array.from({ length: INTERVALS }, (_, j) => 1 + (j + 0.5) / INTERVALS);
-  const scales = Float64Array.from({ length: HIGHEST_SCALE - LOWEST_SCALE + 1 }, (_, k) => 2 ** (k + LOWEST_SCALE));
+  const steps = Array.from({ length: HIGHEST_SCALE - LOWEST_SCALE + 1 }, (_, k) => k + LOWEST_SCALE);
   const p = exponent;
   return {
     exponent,
-    ofInterval: centres.map((centre) => centre ** p),
+    ofInterval: centres.map((centre) => generalPower(centre, p)),
     perInterval: centres.map((centre) => 1 / centre),
-    ofScale: scales.map((scale) => scale ** p),
-    perScale: scales.map((scale) => 1 / scale),
+    ofScale: Float64Array.from(steps, (step) => powerOfTwo(step, p)),
+    perScale: Float64Array.from(steps, (step) => powerOfTwo(-step, 1)),
     c1: p,
     c2: (p * (p - 1)) / 2,
     c3: (p * (p - 1) * (p - 2)) / 6,
     c4: (p * (p - 1) * (p - 2) * (p - 3)) / 24,
     c5: (p * (p - 1) * (p - 2) * (p - 3) * (p - 4)) / 120,
   };
+}
+
+/**
+ * x^p, whatever p, by exponential and logarithm: unlike the power of the language these give the same last digit in the
+ * engines that this runs in.
+ *
+ * @param x above 0
+ * @param exponent such that |exponent · ln x| is a few units at most: the error is so many roundings
+ * @example generalPower(9, 0.5) // 3
+ */
+export function generalPower(x: number, exponent: number): number {
+  return Math.exp(exponent * Math.log(x));
+}
+
+/**
+ * x^n for a whole n, by squares.
+ *
+ * @param n 0 or above
+ * @example wholePower(1.5, 2) // 2.25
+ */
+export function wholePower(x: number, n: number): number {
+  let result = 1;
+  for (let rest = n, square = x; rest > 0; rest = Math.floor(rest / 2), square *= square) {
+    if (rest % 2 === 1) result *= square;
+  }
+  return result;
+}
+
+/** 2^(step · p) for |step| ≤ 64, to rounding: the product is split so that its whole part is exact. */
+function powerOfTwo(step: number, p: number): number {
+  const high = Math.fround(p);
+  const whole = Math.round(step * high);
+  const scale = whole < 0 ? 1 / wholePower(2, -whole) : wholePower(2, whole);
+  return scale * Math.exp(Math.LN2 * (step * high - whole + step * (p - high)));
 }
 
 /**
@@ -65,7 +99,7 @@ export function fixedPower(exponent: number): FixedPower {
  */
 export function powerOf(power: FixedPower, x: number): number {
   if (x < SMALLEST) return 0;
-  if (x >= LARGEST) return x ** power.exponent;
+  if (x >= LARGEST) return powerOf(power, x / LARGEST) * powerOfTwo(HIGHEST_SCALE + 1, power.exponent);
   asNumber[0] = x;
   const high = asWords[HIGH];
   const k = (high >>> 20) - 1023 - LOWEST_SCALE;

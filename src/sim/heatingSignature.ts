@@ -174,7 +174,7 @@ function bestLine(periods: readonly MeteredPeriod[], y: Float64Array, weight: Fl
 
 /** Whether the use is the same in all periods but for rounding. */
 function isFlat({ totalSum, meanY }: WeightedLine, weight: Float64Array): boolean {
-  return totalSum <= FLAT * compensatedSum(weight) * meanY ** 2;
+  return totalSum <= FLAT * compensatedSum(weight) * meanY * meanY;
 }
 
 function degreeDaysPerDay(dayMeans: Float64Array, base: number): number {

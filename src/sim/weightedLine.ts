@@ -39,10 +39,14 @@ export function weightedLine({ x, y, weight }: WeightedPoints): WeightedLine | u
   const all = over(() => 1);
   const meanX = over((i) => x[i]) / all;
   const meanY = over((i) => y[i]) / all;
-  const spread = over((i) => (x[i] - meanX) ** 2);
-  if (!(spread > LEAST_SPREAD * over((i) => x[i] ** 2))) return undefined;
+  const spread = over((i) => square(x[i] - meanX));
+  if (!(spread > LEAST_SPREAD * over((i) => square(x[i])))) return undefined;
   const slope = over((i) => (x[i] - meanX) * (y[i] - meanY)) / spread;
-  const residualSum = over((i) => (y[i] - meanY - slope * (x[i] - meanX)) ** 2);
-  const totalSum = over((i) => (y[i] - meanY) ** 2);
+  const residualSum = over((i) => square(y[i] - meanY - slope * (x[i] - meanX)));
+  const totalSum = over((i) => square(y[i] - meanY));
   return { intercept: meanY - slope * meanX, slope, spread, residualSum, totalSum, meanX, meanY };
+}
+
+function square(x: number): number {
+  return x * x;
 }

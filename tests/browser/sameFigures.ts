@@ -1,21 +1,11 @@
-const NUMBER = /-?\d+(?:\.\d+)?(?:e[-+]?\d+)?/g;
+/** Letters shown on either side of a difference. */
+const AROUND = 60;
 
-/**
- * Engines of JavaScript may differ in the last digits of powers and exponentials, which the language leaves open; so what a
- * browser and node write of the same files may differ by so much, and in nothing else.
- */
-const TOLERANCE = 1e-11;
-
-/** First difference of two texts beside the last digits of their numbers; undefined where there is none. */
+/** First difference of two texts, with what stands around it; undefined where they are the same to the last byte. */
 export function difference(text: string, expected: string): string | undefined {
-  const [words, expectedWords] = [text.split(NUMBER), expected.split(NUMBER)];
-  const word = words.findIndex((each, i) => each !== expectedWords[i]);
-  if (word >= 0 || words.length !== expectedWords.length) return `'${words[word]}' is not '${expectedWords[word]}'`;
-  const [numbers, expectedNumbers] = [text.match(NUMBER) ?? [], expected.match(NUMBER) ?? []];
-  const at = numbers.findIndex((each, i) => {
-    const other = expectedNumbers[i];
-    const size = Math.max(1, Math.abs(Number(other)));
-    return each !== other && !(Math.abs(Number(each) - Number(other)) <= TOLERANCE * size);
-  });
-  return at < 0 ? undefined : `${numbers[at]} is not ${expectedNumbers[at]}`;
+  if (text === expected) return undefined;
+  let at = 0;
+  while (text[at] === expected[at]) at++;
+  const around = (each: string) => each.slice(Math.max(0, at - AROUND), at + AROUND);
+  return `'${around(text)}' is not '${around(expected)}'`;
 }

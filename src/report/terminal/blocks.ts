@@ -15,13 +15,19 @@ export function lyingBar(value: number, most: number, width: number): string {
   return `${FULL.repeat(eighths >> 3)}${LYING[eighths & 7]}`;
 }
 
-/** The lowest and the highest of some values. */
+/** Ends of a scale. */
 export interface Range {
   readonly least: number;
   readonly most: number;
 }
 
-/** @example rangeOf([3, 1, 2]).least // 1 */
+/**
+ * The lowest and the highest of some values.
+ *
+ * @param values finite, at least one
+ * @returns both, in the unit of the values
+ * @example rangeOf([3, 1, 2]).least // 1
+ */
 export function rangeOf(values: readonly number[]): Range {
   return { least: Math.min(...values), most: Math.max(...values) };
 }

@@ -1,5 +1,6 @@
 import { WEEKDAY_NAMES } from '../../core/civilDate.ts';
 import { WATER_HEAT_CAPACITY } from '../../core/constants.ts';
+import { cosineOfTurns } from '../../core/turn.ts';
 import type { HotWaterPlan } from '../../sim/hotWaterPlan.ts';
 import { hourlyProfile } from '../../sim/tappingProfiles.ts';
 import type { CivilClock } from '../../tariffs/civilClock.ts';
@@ -49,8 +50,7 @@ export function prepareHotWater(entry: HotWaterEntry, clock: CivilClock, kept?: 
 function coldWaterOf({ coldWater }: HotWaterEntry, clock: CivilClock): Float64Array {
   const { mean, amplitude, warmestDay } = coldWater;
   return Float64Array.from(clock.civilDay, (day) => {
-    const turn = (2 * Math.PI * (day + 1 - warmestDay)) / DAYS_OF_THE_WAVE;
-    return mean + amplitude * Math.cos(turn);
+    return mean + amplitude * cosineOfTurns((day + 1 - warmestDay) / DAYS_OF_THE_WAVE);
   });
 }
 

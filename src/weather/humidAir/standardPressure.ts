@@ -1,4 +1,5 @@
 import { STANDARD_PRESSURE } from '../../core/constants.ts';
+import { generalPower } from '../../core/power.ts';
 
 /** Range of altitudes in which the equation is stated, m. */
 const LOWEST_ALTITUDE = -5000;
@@ -16,5 +17,5 @@ const HIGHEST_ALTITUDE = 11_000;
  */
 export function standardPressure(altitude: number): number {
   const height = Math.min(Math.max(altitude, LOWEST_ALTITUDE), HIGHEST_ALTITUDE);
-  return STANDARD_PRESSURE * (1 - 2.25577e-5 * height) ** 5.25588;
+  return STANDARD_PRESSURE * generalPower(1 - 2.25577e-5 * height, 5.25588);
 }
