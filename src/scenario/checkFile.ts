@@ -1,5 +1,5 @@
 import { type Problem, shown } from '../core/problem.ts';
-import { readPriceSeries } from '../tariffs/readPriceSeries.ts';
+import { checkTable, type Looked } from './checkTable.ts';
 import { listed } from './entries/allowedText.ts';
 import type { DefaultUsed } from './entries/defaultsUsed.ts';
 import { readEntries } from './entries/readEntries.ts';
@@ -9,10 +9,9 @@ import { InputFiles } from './inputFiles.ts';
 import { type LoadedScenario, scenarioOf } from './loadScenario.ts';
 import { tariffOf } from './loadTariff.ts';
 import { unitOf } from './loadUnit.ts';
-import { weatherFrom } from './loadWeather.ts';
 import { planSchema } from './planSchema.ts';
 import { readSchema } from './readSchema.ts';
-import { type FileKind, recogniseKind } from './recogniseKind.ts';
+import { type FileKind, recogniseKind, type StructuredKind } from './recogniseKind.ts';
 import { textOf } from './yaml/textOf.ts';
 
 /** What an input file was taken for, what was recognised in it, and everything wrong with it and the files that it names. */
@@ -38,21 +37,21 @@ export function checkFile(name: string, source: FileSource): CheckedFile {
   const { text, problems: textProblems } = textOf(input);
   if (text === undefined) return { about: [], problems: textProblems };
   if (text.trim() === '') return { about: [], problems: [{ code: 'file.empty', severity: 'error', file: input.name }] };
-  const { kind, keys } = recogniseKind(text);
+  const recognised = recogniseKind(text);
+  if (recognised.table !== undefined) {
+    const { about, problems: found } = checkTable({ input, text, table: recognised.table });
+    return { kind: recognised.kind, about, problems: inFileOrder(found) };
+  }
+  const { kind, keys } = recognised;
   if (kind === undefined) {
     const found = `its keys are ${listed(keys.slice(0, 8).map((key) => shown(key, 30)))}`;
     return { about: [], problems: [{ code: 'scenario.unknown-kind', severity: 'error', file: input.name, found }] };
   }
-  const { about, problems: found } = look[kind]({ input, text, files });
+  const { about, problems: found } = look[kind]({ input, files });
   return { kind, about, problems: inFileOrder(found) };
 }
 
-interface Looked {
-  readonly about: string[];
-  readonly problems: Problem[];
-}
-
-const look: Record<FileKind, (file: { input: InputBytes; text: string; files: InputFiles }) => Looked> = {
+const look: Record<StructuredKind, (file: { input: InputBytes; files: InputFiles }) => Looked> = {
   scenario: ({ input, files }) => {
     const { loaded, problems } = scenarioOf(input, files);
     return { about: loaded === undefined ? [] : aboutScenario(loaded), problems };
@@ -89,16 +88,6 @@ const look: Record<FileKind, (file: { input: InputBytes; text: string; files: In
     const varied = axes.map((axis) => shown(axis.name)).join(', ');
     const about = [`plan ${shown(name)}`, ...(varied === '' ? [] : [`varied: ${varied}`])];
     return { about, problems: [...problems, ...base.problems, ...(table?.problems ?? [])] };
-  },
-  weather: ({ input }) => {
-    const { recognised, problems } = weatherFrom(input, {}, {});
-    return { about: [...(recognised?.lines ?? [])], problems };
-  },
-  priceSeries: ({ input, text }) => {
-    const settings = { file: input.name, unit: 'perKWh', stamps: 'withOffset' } as const;
-    const { series, problems } = readPriceSeries({ text, file: input.name, settings, zone: 'UTC' });
-    if (series === undefined) return { about: [], problems };
-    return { about: [`${series.prices.length} prices, one every ${series.stepMinutes} minutes`], problems };
   },
 };
 

@@ -17,7 +17,7 @@ export type ElectricityCarbon =
 const HIGHEST_FACTOR = 5;
 
 /** What a file of carbon factors holds. */
-const FACTORS: Omit<SeriesKind, 'divisor'> = {
+export const FACTORS: Omit<SeriesKind, 'divisor'> = {
   one: 'factor',
   many: 'factors',
   section: 'carbon.electricity',
@@ -36,7 +36,7 @@ const FACTORS: Omit<SeriesKind, 'divisor'> = {
  */
 export function carbonFactorsOf(
   yaml: YamlFile,
-  { carbon, site }: Scenario,
+  { carbon, zone }: { readonly carbon: Scenario['carbon']; readonly zone: string | undefined },
   files: InputFiles,
   clock: CivilClock | undefined,
 ): { carbon?: ElectricityCarbon; problems: Problem[] } {
@@ -48,7 +48,7 @@ export function carbonFactorsOf(
   const kind = { ...FACTORS, divisor: unit === 'gPerKWh' ? 1000 : 1 };
   const settings = { stamps, timeColumn, valueColumn: factorColumn, decimal };
   const path = ['carbon', 'electricity', 'file'];
-  const read = namedSeries(yaml, { file, role: 'carbonFactors', path, settings, kind, zone: site.zone }, files);
+  const read = namedSeries(yaml, { file, role: 'carbonFactors', path, settings, kind, zone }, files);
   if (read.series === undefined || clock === undefined) return { problems: read.problems };
   const { hours, problems } = hourlyMeans(read.series, kind, clock);
   const found = [...read.problems, ...problems];

@@ -12,7 +12,7 @@ import type { YamlFile } from './yaml/yamlFile.ts';
 const HIGHEST_ENERGY = 10_000;
 
 /** What the meter of a household holds. */
-const READINGS: Omit<SeriesKind, 'divisor'> = {
+export const READINGS: Omit<SeriesKind, 'divisor'> = {
   one: 'reading',
   many: 'readings',
   section: 'household',
@@ -35,12 +35,12 @@ const READINGS: Omit<SeriesKind, 'divisor'> = {
  */
 export function householdOf(
   yaml: YamlFile,
-  { household, site }: Scenario,
+  { household, zone }: { readonly household: Scenario['household']; readonly zone: string | undefined },
   files: InputFiles,
   clock: CivilClock | undefined,
 ): { hours?: Float64Array; problems: Problem[] } {
   if (household === undefined) return clock === undefined ? { problems: [] } : { hours: none(clock), problems: [] };
-  if (household.given === 'meter') return fromMeter(yaml, household, { zone: site.zone, files, clock });
+  if (household.given === 'meter') return fromMeter(yaml, household, { zone, files, clock });
   if (clock === undefined) return { problems: [] };
   const hours = profileOfHousehold(household, clock);
   return hours === undefined ? { problems: [] } : { hours, problems: [] };
@@ -53,7 +53,7 @@ function none(clock: CivilClock): Float64Array {
 function fromMeter(
   yaml: YamlFile,
   meter: Extract<HouseholdEntry, { given: 'meter' }>,
-  { zone, files, clock }: { zone: string; files: InputFiles; clock: CivilClock | undefined },
+  { zone, files, clock }: { zone: string | undefined; files: InputFiles; clock: CivilClock | undefined },
 ): { hours?: Float64Array; problems: Problem[] } {
   const { file, unit, stamps, timeColumn, energyColumn, decimal } = meter;
   const kind = { ...READINGS, divisor: unit === 'Wh' ? 1000 : 1 };

@@ -1,25 +1,21 @@
 import { hasErrors, type Problem } from '../core/problem.ts';
-import { type CivilClock, civilClock } from '../tariffs/civilClock.ts';
+import type { CivilClock } from '../tariffs/civilClock.ts';
 import type { Recognised } from '../weather/read/readWeather.ts';
 import type { WeatherSeries } from '../weather/series.ts';
-import { checkHouse } from './checks/checkHouse.ts';
-import { checkPlant } from './checks/checkPlant.ts';
-import { checkSchedules } from './checks/checkSchedules.ts';
+import { crossChecks } from './checks/crossChecks.ts';
 import { explainSetBack } from './checks/setBackNeedsMass.ts';
 import type { DefaultUsed } from './entries/defaultsUsed.ts';
-import { pathText } from './entries/pathText.ts';
 import { type EntriesResult, readEntries } from './entries/readEntries.ts';
 import type { FileSource, InputBytes } from './fileSource.ts';
+import { furtherProblems } from './furtherProblems.ts';
 import { inFileOrder } from './inFileOrder.ts';
 import { InputFiles, type InputRecord } from './inputFiles.ts';
-import { KeptKind } from './kept.ts';
 import type { ElectricityCarbon } from './loadCarbon.ts';
-import { moneyOf } from './loadMoney.ts';
 import type { LoadedTariff } from './loadTariffs.ts';
-import { type LoadedUnit, type UnitResult, unitOf } from './loadUnit.ts';
-import { weatherOf } from './loadWeather.ts';
+import type { LoadedUnit } from './loadUnit.ts';
+import { type FileEntries, readFiles } from './readFiles.ts';
+import { partsOf } from './scenarioParts.ts';
 import { type Scenario, scenarioSchema } from './scenarioSchema.ts';
-import type { YamlFile } from './yaml/yamlFile.ts';
 
 /** A scenario with every file that it names: sound, complete, the defaults used by name. */
 export interface LoadedScenario {
@@ -75,32 +71,22 @@ export function scenarioFrom(
 ): { loaded?: LoadedScenario; problems: Problem[] } {
   if (own.yaml === undefined) return { problems: own.problems };
   const { yaml } = own;
-  if (own.entries === undefined) return { problems: explainSetBack(yaml, own.problems) };
+  if (own.entries === undefined) {
+    return { problems: [...explainSetBack(yaml, own.problems), ...furtherProblems(yaml, files, further)] };
+  }
   const scenario = own.entries.value;
-  const weather = weatherOf(yaml, scenario, files);
-  const unit = namedUnit(yaml, scenario, files);
-  const clock = clockOf(yaml, scenario, weather.read?.series, files);
-  const money = moneyOf(yaml, scenario, files, { clock: clock.clock, further });
-  const problems = [
-    ...own.problems,
-    ...checkHouse(yaml, scenario.house),
-    ...checkPlant(yaml, scenario),
-    ...checkSchedules(yaml, scenario, money.presentRates),
-    ...unit.problems,
-    ...weather.problems,
-    ...sunWithoutRadiation(yaml, scenario, weather.read),
-    ...clock.problems,
-    ...money.problems,
-  ];
+  const { unit, weather, clock, money, problems: ofFiles } = readFiles(yaml, fileEntriesOf(scenario), files, further);
+  const beside = { weather: weather.read, listed: money.listed, laid: money.laid };
+  const problems = [...own.problems, ...crossChecks(yaml, partsOf(scenario), beside), ...ofFiles];
   if (hasErrors(problems) || unit.loaded === undefined || weather.read === undefined) return { problems };
-  if (clock.clock === undefined || money.household === undefined) return { problems };
+  if (clock === undefined || money.household === undefined) return { problems };
   const loaded: LoadedScenario = {
     file: yaml.file,
     scenario,
     unit: unit.loaded,
     weather: weather.read,
-    clock: clock.clock,
-    tariffs: money.tariffs,
+    clock,
+    tariffs: money.laid.filter((tariff) => tariff !== undefined),
     household: money.household,
     ...(money.carbon === undefined ? {} : { carbon: money.carbon }),
     // the label is held against the map by a command of its own; no simulated year rests on it
@@ -123,41 +109,7 @@ function usedBeside(defaults: readonly DefaultUsed[], series: WeatherSeries): De
   return defaults.filter(({ path }) => !idle.has(path));
 }
 
-/** Units and civil clocks of a batch: more than these in turn are rare, and each unit holds its tables. */
-const units = new KeptKind<UnitResult>(64);
-const clocks = new KeptKind<ReturnType<typeof civilClock>>(16);
-
-function namedUnit(yaml: YamlFile, scenario: Scenario, files: InputFiles) {
-  const read = files.readNamed(scenario.heatPump.unit, 'unit', { yaml, path: ['heatPump', 'unit'] });
-  if (read.input === undefined) return { loaded: undefined, defaults: [], problems: read.problems };
-  const { input } = read;
-  return { loaded: undefined, ...units.of(files.kept, input.name, () => unitOf(input, files)) };
-}
-
-/** Civil time of the year; without the weather, that of 8760 hours in UTC, so that zone and tariffs are checked all the same. */
-function clockOf(yaml: YamlFile, scenario: Scenario, series: WeatherSeries | undefined, files: InputFiles) {
-  const { zone, calendarYear } = scenario.site;
-  const { hours, offsetMinutes } = series ?? { hours: 8760, offsetMinutes: 0 };
-  const asked = { hours, offsetMinutes, zone, calendarYear };
-  const { clock, problem } = clocks.of(files.kept, JSON.stringify(asked), () => civilClock(asked));
-  if (problem === undefined) return { clock, problems: [] };
-  const path = ['site', problem.path === 'zone' ? 'zone' : 'calendarYear'];
-  const place = { file: yaml.owner(path), ...yaml.place(path), path: pathText(path) };
-  return { clock: undefined, problems: [{ ...problem, ...place }] };
-}
-
-function sunWithoutRadiation(
-  yaml: YamlFile,
-  scenario: Scenario,
-  weather: LoadedScenario['weather'] | undefined,
-): Problem[] {
-  const { solarAperture } = scenario.house.need;
-  if (weather === undefined || solarAperture === 0 || weather.series.globalRadiation !== undefined) return [];
-  const path = ['house', 'need', 'solarAperture'];
-  const fault = {
-    code: 'scenario.sun-without-radiation',
-    found: String(solarAperture),
-    allowed: weather.file,
-  } as const;
-  return [yaml.problem(path, fault)];
+function fileEntriesOf(scenario: Scenario): FileEntries {
+  const { weather, heatPump, site, tariffs, household, carbon } = scenario;
+  return { weather, unit: heatPump.unit, site, tariffs, household, carbon };
 }

@@ -17,8 +17,8 @@ export interface NamedSeries {
   readonly path: EntryPath;
   readonly settings: SeriesSettings;
   readonly kind: SeriesKind;
-  /** Zone of stamps in local time. */
-  readonly zone: string;
+  /** Zone of stamps in local time; without it a file of such stamps is looked for, not read. */
+  readonly zone: string | undefined;
 }
 
 /** Reads a file of values over time. */
@@ -29,10 +29,11 @@ export function namedSeries(
 ): { series?: TimeSeries; problems: Problem[] } {
   const { input, problems } = files.readNamed(named.file, named.role, { yaml, path: named.path });
   if (input === undefined) return { problems };
+  const { settings, kind, zone } = named;
+  if (zone === undefined && settings.stamps === 'local') return { problems: [] };
   const { text, problems: textProblems } = textOf(input);
   if (text === undefined) return { problems: textProblems };
-  const { settings, kind, zone } = named;
-  return readSeries({ text, file: input.name, settings, kind, zone });
+  return readSeries({ text, file: input.name, settings, kind, zone: zone ?? 'UTC' });
 }
 
 /**

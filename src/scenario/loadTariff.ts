@@ -33,10 +33,10 @@ export interface TariffResult {
  * Reads a tariff from its bytes, and the price series that it names.
  *
  * @param input the tariff file
- * @param zone IANA zone for price series in local time
+ * @param zone IANA zone for price series in local time; without it such a series is looked for, not read
  * @param files for the price series
  */
-export function tariffOf(input: InputBytes, zone: string, files: InputFiles): TariffResult {
+export function tariffOf(input: InputBytes, zone: string | undefined, files: InputFiles): TariffResult {
   const { yaml, entries, problems } = readEntries(input, tariffSchema);
   if (yaml === undefined || entries === undefined) return { defaults: [], problems };
   const tariff: Tariff = entries.value;
@@ -44,9 +44,10 @@ export function tariffOf(input: InputBytes, zone: string, files: InputFiles): Ta
   if (tariff.series === undefined) return { read: { yaml, tariff, fingerprint: input.sha256 }, defaults, problems };
   const named = files.readNamed(tariff.series.file, 'priceSeries', { yaml, path: ['series', 'file'] });
   if (named.input === undefined) return { defaults, problems: [...problems, ...named.problems] };
+  if (zone === undefined && tariff.series.stamps === 'local') return { defaults, problems };
   const { text, problems: textProblems } = textOf(named.input);
   if (text === undefined) return { defaults, problems: [...problems, ...textProblems] };
-  const made = readPriceSeries({ text, file: named.input.name, settings: tariff.series, zone });
+  const made = readPriceSeries({ text, file: named.input.name, settings: tariff.series, zone: zone ?? 'UTC' });
   const found = [...problems, ...made.problems];
   if (made.series === undefined || hasErrors(found)) return { defaults, problems: found };
   const fingerprint = `${input.sha256} ${named.input.sha256}`;

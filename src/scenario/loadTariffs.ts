@@ -37,6 +37,9 @@ export interface LoadedTariff {
   readonly prepared: PreparedTariff;
 }
 
+/** Entries of a scenario's list of tariffs, undefined for one with faults. */
+export type TariffEntries = readonly (Scenario['tariffs'][number] | undefined)[];
+
 /** Tariffs whose files could be read, in their order, and what was found on the way. */
 export interface ListedTariffs {
   /** Undefined for one with errors, so that places in the scenario's list stay what they are. */
@@ -48,16 +51,17 @@ export interface ListedTariffs {
 /**
  * Reads the tariffs of a scenario, and those named beside it.
  *
+ * @param entries of the scenario's list, undefined for one with faults; and the zone of the house, where it is known
  * @param further names of tariff files that the user gave; one with the content of an earlier tariff is left out
  */
 export function readTariffs(
   yaml: YamlFile,
-  scenario: Scenario,
+  { entries, zone }: { readonly entries: TariffEntries; readonly zone: string | undefined },
   files: InputFiles,
   further: readonly string[],
 ): ListedTariffs {
-  const { zone } = scenario.site;
-  const results: (TariffResult & { listed: ListedTariff | undefined })[] = scenario.tariffs.map((entry, i) => {
+  const results: (TariffResult & { listed: ListedTariff | undefined })[] = entries.map((entry, i) => {
+    if (entry === undefined) return { listed: undefined, defaults: [], problems: [] };
     const path = ['tariffs', i];
     if (typeof entry === 'string') return alone(namedTariff(yaml, path, entry, { zone, files }), path);
     const reads = entry.supplies.map(({ file }, s) =>
@@ -99,7 +103,7 @@ function namedTariff(
   yaml: YamlFile,
   path: EntryPath,
   name: string,
-  { zone, files }: { zone: string; files: InputFiles },
+  { zone, files }: { zone: string | undefined; files: InputFiles },
 ): TariffResult {
   const named = files.readNamed(name, 'tariff', { yaml, path });
   if (named.input === undefined) return { defaults: [], problems: named.problems };

@@ -23,10 +23,10 @@ export interface ReadWeather {
 
 /** Where the weather is used, as far as that helps to understand its file. */
 export interface WeatherSite {
-  readonly zone?: string;
+  readonly zone?: string | undefined;
   /** m above sea level. */
-  readonly altitude?: number;
-  readonly calendarYear?: number;
+  readonly altitude?: number | undefined;
+  readonly calendarYear?: number | undefined;
 }
 
 /**
@@ -60,14 +60,18 @@ export type WeatherResult = ReturnType<typeof weatherFrom>;
 /** Weather files of a batch; each holds a year in a few columns. */
 export const weathers = new KeptKind<WeatherResult>(64);
 
-/** Reads the weather file that a scenario names. */
+/** What of a scenario its weather is read by. */
+export interface WeatherEntries {
+  readonly weather: Pick<Scenario['weather'], 'file' | 'read'>;
+  readonly site: WeatherSite;
+}
+
+/** Reads the weather file that a scenario names; what is not known of its site is left out. */
 export function weatherOf(
   yaml: YamlFile,
-  scenario: Scenario,
+  { weather, site: { zone, altitude, calendarYear } }: WeatherEntries,
   files: InputFiles,
 ): { read?: ReadWeather; problems: Problem[] } {
-  const { weather } = scenario;
-  const { zone, altitude, calendarYear } = scenario.site;
   const site = { zone, altitude, calendarYear };
   const named = files.readNamed(weather.file, 'weather', { yaml, path: ['weather', 'file'] });
   if (named.input === undefined) return { problems: named.problems };

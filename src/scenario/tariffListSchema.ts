@@ -17,15 +17,19 @@ const change = z.strictObject({
     .describe('The tariffs of the year in their order, each from its own date to that of the next.'),
 });
 
+/** Longest list of tariffs. */
+export const MOST_TARIFFS = 50;
+
+/** One tariff of a scenario. */
+export const tariffEntrySchema = z.union([
+  fileName('A tariff file.'),
+  change.describe('A year with a change of supplier: several tariff files, one after the other.'),
+]);
+
 /** Electricity tariffs of a scenario. */
 export const tariffListSchema = z
-  .array(
-    z.union([
-      fileName('A tariff file.'),
-      change.describe('A year with a change of supplier: several tariff files, one after the other.'),
-    ]),
-  )
-  .max(50)
+  .array(tariffEntrySchema)
+  .max(MOST_TARIFFS)
   .describe(
     'Electricity tariffs to compare, each the name of a file or a change of supplier; the first is the present one.',
   )

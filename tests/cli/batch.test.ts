@@ -125,34 +125,53 @@ describe('a batch', () => {
   });
 });
 
-describe('a batch with bad rows', () => {
+describe('a batch of ten thousand homes, seven of them bad', () => {
+  // a house of few sections, so that so many years take seconds
+  const lean = [
+    'name: Lean house',
+    'site: { zone: Europe/Berlin }',
+    'weather: { file: weather.csv, read: { stamps: begin, offset: "+01:00", clock: standard } }',
+    'house:',
+    '  heatLoss: { given: coefficient, value: 195 }',
+    '  design: { outdoorTemperature: -12 }',
+    '  need: { model: degreeHours }',
+    'flowTemperature:',
+    '  method: emitters',
+    '  flow: 50',
+    '  return: 42',
+    'heatPump: { unit: units/quarkenfels-8.yaml }',
+    '',
+  ].join('\n');
   const header = 'home,house.heatLoss.value,flowTemperature.return,heatPump.unit';
-  const homes = Array.from({ length: 500 }, (_, i) => `home ${i + 1},${100 + (i % 100)},,`);
+  const lossOf = (job: number) => 100 + (job % 100);
+  const homes = Array.from({ length: 10_000 }, (_, i) => `home ${i + 1},${lossOf(i + 1)},,`);
   const bad: Record<number, string> = {
     7: 'much,a lot,,',
     60: '=cmd|calc,-5,,',
     61: 'too many,150,,,,',
-    200: 'exchanged,150,60,',
-    300: 'no such unit,150,,units/none.yaml',
-    301: '@two faults,-5,99,',
-    499: 'percent,120 W/K,,',
+    2000: 'exchanged,150,60,',
+    3000: 'no such unit,150,,units/none.yaml',
+    7301: '@two faults,-5,99,',
+    9998: 'percent,120 W/K,,',
   };
-  homes.push('+last,150,,');
   for (const [i, row] of Object.entries(bad)) homes[Number(i)] = row;
+  homes[9999] = '+last,100,,';
+  const badJobs = Object.keys(bad).map((i) => Number(i) + 1);
 
-  it('has their problems in their rows, ends with 1, and simulates the others', async () => {
+  it('has exactly seven rows of problems among the results of the others, all in the order of the table', async () => {
+    writeFileSync(inFolder('data/demo/lean.yaml'), lean);
     writeFileSync(inFolder('data/demo/bad.csv'), `${header}\n${homes.join('\n')}\n`);
-    const plan = writePlan('bad.yaml', 'homes: { file: bad.csv }\n');
-    const { code, stdout, stderr } = await run(folder, 'batch', plan, '--out', 'bad');
+    writeFileSync(inFolder('data/demo/bad.yaml'), 'name: Bad\nscenario: lean.yaml\nhomes: { file: bad.csv }\n');
+    const { code, stdout, stderr } = await run(folder, 'batch', 'data/demo/bad.yaml', '--out', 'bad');
     expect({ code, stderr }).toEqual({ code: 1, stderr: '' });
-    expect(stdout).toContain('494 years simulated; 7 with a problem');
+    expect(stdout).toMatch(/^9.993 years simulated; 7 with a problem/m);
     const rows = rowsOf('bad');
-    expect(rows).toHaveLength(501);
+    expect(rows.map(({ job }) => job)).toEqual(Array.from({ length: 10_000 }, (_, i) => i + 1));
     const failed = rows.filter(({ problems }) => problems.length > 0);
-    expect(failed.map(({ job, homesLine }) => [job, homesLine])).toEqual(
-      [7, 60, 61, 200, 300, 301, 499].map((i) => [i + 1, i + 2]),
-    );
+    expect(failed.map(({ job, homesLine }) => [job, homesLine])).toEqual(badJobs.map((job) => [job, job + 1]));
     expect(failed.every(({ figures }) => figures === undefined)).toBe(true);
+    const good = rows.filter(({ problems }) => problems.length === 0);
+    expect(good.map(({ figures }) => figures.heatLoss)).toEqual(good.map(({ job }) => lossOf(job)));
     const texts = failed.map(({ problems }) =>
       problems.map((each: Record<string, string>) => `${each.place}  ${each.text}`),
     );
@@ -162,23 +181,28 @@ describe('a batch with bad rows', () => {
       ['data/demo/bad.csv:63  this row has 6 cells, the names of the columns are 4'],
       [
         expect.stringMatching(
-          /^data\/demo\/house.yaml:\d+:9 {2}flowTemperature.flow is 50 °C; it lies above the return temperature \(60 °C\)/,
+          /^data\/demo\/lean.yaml:10:9 {2}flowTemperature.flow is 50 °C; it lies above the return temperature \(60 °C\)/,
         ),
       ],
-      ['data/demo/units/none.yaml:302:19  there is no such file'],
+      ['data/demo/units/none.yaml:3002:19  there is no such file'],
       [
-        'data/demo/bad.csv:303:13  house.heatLoss.value is -5; a heat loss lies between 1 and 100000 W/K',
+        'data/demo/bad.csv:7303:13  house.heatLoss.value is -5; a heat loss lies between 1 and 100000 W/K',
         expect.stringContaining('flowTemperature.return is 99'),
       ],
-      ["data/demo/bad.csv:501:9  house.heatLoss.value is '120 W/K'; a heat loss lies between 1 and 100000 W/K"],
+      ["data/demo/bad.csv:10000:9  house.heatLoss.value is '120 W/K'; a heat loss lies between 1 and 100000 W/K"],
     ]);
+  });
+
+  it('has one line a home in the table, in the same order', () => {
+    const [, ...lines] = linesOf('bad');
+    expect(lines.map((line) => Number(line.split(',', 1)[0]))).toEqual(Array.from({ length: 10_000 }, (_, i) => i + 1));
   });
 
   it('has no text that a spreadsheet would take for a formula', () => {
     const lines = linesOf('bad');
     expect(lines[61]).toMatch(/^61,"'=cmd\|calc",62,/);
-    expect(lines[302]).toMatch(/^302,"'@two faults",/);
-    expect(lines[501]).toMatch(/^501,"'\+last",/);
+    expect(lines[7302]).toMatch(/^7302,"'@two faults",/);
+    expect(lines[10_000]).toMatch(/^10000,"'\+last",/);
   });
 });
 

@@ -123,6 +123,41 @@ describe('a chunk whose worker dies', () => {
     await expect(work).rejects.toThrow('the disk is full');
     expect(apart).toBe(0);
   });
+
+  it('is not kept where its worker is stopped because another could not write: no job killed it', async () => {
+    const stopped = new AbortController();
+    const abort = () =>
+      new Promise<never>((_, reject) => {
+        const fail = () => reject(new Error('The task has been aborted'));
+        if (stopped.signal.aborted) fail();
+        else stopped.signal.addEventListener('abort', fail);
+      });
+    const kept: ChunkDone[] = [];
+    let apart = 0;
+    const pool = {
+      run: async ({ chunk }: ChunkTask) => {
+        if (chunk > 0) return abort();
+        throw new OutputFault('chunk-000001', Object.assign(new Error(), { code: 'ENOSPC' }));
+      },
+      runApart: () => {
+        apart++;
+        return abort();
+      },
+    };
+    const work = runChunks({
+      pool,
+      tasks,
+      atOnce: 2,
+      lost,
+      keep: (each) => void kept.push(each),
+      done: async () => {},
+    });
+    await expect(work).rejects.toThrow('the disk is full');
+    stopped.abort();
+    // long enough for all that the stopped workers set off
+    await new Promise((resolve) => setTimeout(resolve, 20));
+    expect({ kept, apart }).toEqual({ kept: [], apart: 0 });
+  });
 });
 
 describe('the parts of a batch', () => {

@@ -132,7 +132,9 @@ describe('an output that cannot be written', () => {
   it('is told when the disk is full, with exit code 3', async () => {
     const full = Object.assign(new Error('no space'), { code: 'ENOSPC' });
     expect(await lastResort(new OutputFault('result.json', full), io)).toBe(3);
-    expect(said.stderr).toMatch(/^result\.json {2}the file cannot be written: the disk is full\n {4}→ .+\n$/);
+    expect(said.stderr).toMatch(
+      /^result\.json {2}the file cannot be written: the disk is full\n {4}→ make room on the disk.+\n$/,
+    );
   });
 });
 

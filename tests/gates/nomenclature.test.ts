@@ -1,6 +1,10 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import * as z from 'zod';
+import { distribution } from '../../src/batch/distribution.ts';
+import { rowFigures, tariffFigures } from '../../src/batch/rowColumns.ts';
+import { batchHeader, summaryHeader } from '../../src/report/batchCsv.ts';
+import { rankDocument } from '../../src/report/batchRankText.ts';
 import { hourColumns } from '../../src/report/hourColumns.ts';
 import { hourlyCsv } from '../../src/report/hourlyCsv.ts';
 import { resultSchema } from '../../src/report/resultSchema.ts';
@@ -8,7 +12,11 @@ import { english } from '../../src/report/words.ts';
 import { demoAnswer, HOT_WATER, WITH_MASS } from '../unit/report/demoAnswer.ts';
 
 const page = readFileSync(new URL('../../docs/nomenclature.md', import.meta.url), 'utf8');
-const rows = page
+const BATCH = '## In a batch\n';
+const sections = page.split(/^(?=## )/m);
+const rows = sections
+  .filter((section) => !section.startsWith(BATCH))
+  .join('')
   .split('\n')
   .filter((line) => line.startsWith('| ') && !line.startsWith('| Term'))
   .map((line) =>
@@ -99,6 +107,60 @@ describe('the nomenclature', () => {
     expect(labels.length).toBeGreaterThan(20);
     for (const label of labels) {
       for (const part of label.split(/…|: /)) expect(words, label).toContain(part.trim());
+    }
+  });
+});
+
+const batchRows = (sections.find((section) => section.startsWith(BATCH)) ?? '')
+  .split('\n')
+  .filter((line) => line.startsWith('| `'))
+  .map((line) => line.slice(2, -2).split(' | '))
+  .map(([name, where, unit, means]) => ({
+    name: inTicks(name)[0]!,
+    where: inTicks(where)[0]!,
+    unit: unit!.trim(),
+    means,
+  }));
+const namedIn = (where: string) => batchRows.filter((row) => row.where === where).map(({ name }) => name);
+
+/** Paths of all values in a document: `bestRows[].job`. */
+function pathsOf(value: unknown, path: string): string[] {
+  if (Array.isArray(value)) return value.flatMap((each) => pathsOf(each, `${path}[]`));
+  if (typeof value !== 'object' || value === null) return [path];
+  return Object.entries(value).flatMap(([key, each]) => pathsOf(each, path === '' ? key : `${path}.${key}`));
+}
+
+describe('the nomenclature of a batch', () => {
+  it('has every column of results.csv with its unit in their order, but for the axes', () => {
+    const header = batchHeader({ axes: [], homes: true, tariffs: 1 }).trim().split(',');
+    const written = batchRows
+      .filter(({ where }) => where === 'results.csv')
+      .map(({ name, unit }) => (unit === '' ? name : `${name} [${unit}]`));
+    expect(header.length).toBeGreaterThan(30);
+    expect(written).toEqual(header);
+  });
+
+  it('has every column of summary.csv', () => {
+    expect(namedIn('summary.csv')).toEqual(summaryHeader().trim().split(','));
+  });
+
+  it('has every key of a ranking', () => {
+    const spread = distribution(Float64Array.of(1, 2));
+    if (spread === undefined) throw new Error('two values have a spread');
+    const row = { job: 1, home: 'A', axes: [1], value: 1 };
+    const values = [{ value: 1, spread }];
+    const result = { spread, best: [row], worst: [row], axes: [{ axis: 'a', values }] };
+    const document = rankDocument({ by: 'cost', axes: ['a'], rows: 2, unranked: 0, result }, '1');
+    // the axes of a row stand under their own names
+    const paths = pathsOf(document, '').map((path) => path.replace(/Rows\[\]\.axes\.a$/, 'Rows[].axes'));
+    expect(namedIn('rank --json').sort()).toEqual(paths.sort());
+  });
+
+  it('gives each figure the term and the unit that it has elsewhere', () => {
+    const figures = [...rowFigures.map(({ name }) => name), ...tariffFigures.map((name) => `tariff1.${name}`)];
+    for (const figure of figures) {
+      const { means, unit } = batchRows.find(({ name, where }) => name === figure && where === 'results.csv')!;
+      expect(rows.find(({ term }) => term === means)?.unit, figure).toBe(unit);
     }
   });
 });

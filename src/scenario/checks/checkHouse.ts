@@ -10,19 +10,24 @@ type House = Scenario['house'];
 /** Shares of the heat loss may miss a sum of one by so much, for rounding in writing. */
 const SHARE_TOLERANCE = 0.001;
 
-/** What does not go together in the house: its heat loss, its design conditions, its need. */
-export function checkHouse(yaml: YamlFile, house: House): Problem[] {
-  const { design, heatLoss } = house;
-  const problems = notBelow(yaml, ['house', 'design', 'outdoorTemperature'], design.outdoorTemperature, {
-    name: 'the design room temperature',
-    value: design.roomTemperature,
-  });
-  if (heatLoss.given === 'load') {
-    const room = { name: 'the room temperature of that load', value: heatLoss.roomTemperature };
-    problems.push(...notBelow(yaml, ['house', 'heatLoss', 'outdoorTemperature'], heatLoss.outdoorTemperature, room));
-  }
-  problems.push(...checkNeed(yaml, house));
-  if (problems.length > 0) return problems;
+/** What does not go together in the design conditions. */
+export function checkDesign(yaml: YamlFile, design: House['design']): Problem[] {
+  const room = { name: 'the design room temperature', value: design.roomTemperature };
+  return notBelow(yaml, ['house', 'design', 'outdoorTemperature'], design.outdoorTemperature, room);
+}
+
+/** What does not go together in a heat loss that is given by a load. */
+export function checkLoad(yaml: YamlFile, heatLoss: House['heatLoss']): Problem[] {
+  if (heatLoss.given !== 'load') return [];
+  const room = { name: 'the room temperature of that load', value: heatLoss.roomTemperature };
+  return notBelow(yaml, ['house', 'heatLoss', 'outdoorTemperature'], heatLoss.outdoorTemperature, room);
+}
+
+/** Whether the house loses heat, and its mass takes it up; not asked where one of its parts contradicts itself. */
+export function checkLoss(yaml: YamlFile, house: House): Problem[] {
+  const { design, heatLoss, need, floorArea } = house;
+  const parts = [checkDesign(yaml, design), checkLoad(yaml, heatLoss), checkNeed(yaml, need, floorArea)];
+  if (parts.some((problems) => problems.length > 0)) return [];
   const { total } = heatLossOf(house);
   if (total <= 0) {
     const found = `${total.toFixed(1)} W/K`;
@@ -31,12 +36,12 @@ export function checkHouse(yaml: YamlFile, house: House): Problem[] {
   return checkMass(yaml, house);
 }
 
-function checkNeed(yaml: YamlFile, house: House): Problem[] {
-  const { need } = house;
+/** What does not go together in the need of the house. */
+export function checkNeed(yaml: YamlFile, need: House['need'], floorArea: House['floorArea']): Problem[] {
   const path = ['house', 'need'];
   if (need.model === 'lumped') {
     const problems: Problem[] = [];
-    if (house.floorArea === undefined) {
+    if (floorArea === undefined) {
       problems.push(yaml.problem([...path, 'model'], { code: 'scenario.needs-floor-area' }));
     }
     const shares = need.lossShares;

@@ -4,21 +4,8 @@ import type { PreparedTariff } from '../../tariffs/preparedTariff.ts';
 import type { Scenario } from '../scenarioSchema.ts';
 import type { YamlFile } from '../yaml/yamlFile.ts';
 
-/**
- * What does not go together in what the bills and the comparison are made of: household, boiler, carbon, whole life.
- *
- * @param present the first tariff laid on the year, where it could be
- */
-export function checkMoney(yaml: YamlFile, scenario: Scenario, present: PreparedTariff | undefined): Problem[] {
-  return [
-    ...checkHousehold(yaml, scenario),
-    ...checkBoiler(yaml, scenario),
-    ...checkCarbon(yaml, scenario, present),
-    ...checkWholeLife(yaml, scenario),
-  ];
-}
-
-function checkHousehold(yaml: YamlFile, { household }: Scenario): Problem[] {
+/** What does not go together in the profile of a household. */
+export function checkHousehold(yaml: YamlFile, household: Scenario['household']): Problem[] {
   if (household?.given !== 'profile') return [];
   const { shares, weekendShares } = household;
   const lists = { shares, weekendShares };
@@ -34,7 +21,11 @@ function checkHousehold(yaml: YamlFile, { household }: Scenario): Problem[] {
     .map(([key]) => yaml.problem(['household', key], { code: 'scenario.no-shares' }));
 }
 
-function checkBoiler(yaml: YamlFile, { boiler, hotWater, tariffs }: Scenario): Problem[] {
+/** What a boiler needs beside itself. */
+export function checkBoiler(
+  yaml: YamlFile,
+  { boiler, hotWater, tariffs }: Pick<Scenario, 'boiler' | 'hotWater' | 'tariffs'>,
+): Problem[] {
   if (boiler === undefined) return [];
   const problems: Problem[] = [];
   if (boiler.fuel.price === undefined && tariffs.length === 0) {
@@ -47,7 +38,16 @@ function checkBoiler(yaml: YamlFile, { boiler, hotWater, tariffs }: Scenario): P
   return problems;
 }
 
-function checkCarbon(yaml: YamlFile, { carbon, tariffs }: Scenario, present: PreparedTariff | undefined): Problem[] {
+/**
+ * Whether carbon factors by rate fit the rates of the first tariff.
+ *
+ * @param present that tariff laid on the year, where it could be
+ */
+export function checkCarbon(
+  yaml: YamlFile,
+  { carbon, tariffs }: Pick<Scenario, 'carbon' | 'tariffs'>,
+  present: PreparedTariff | undefined,
+): Problem[] {
   if (carbon === undefined || typeof carbon.electricity === 'number') return [];
   if (carbon.electricity.given !== 'byRate') return [];
   const { factors } = carbon.electricity;
@@ -81,7 +81,11 @@ function quoted(name: string): string {
   return `'${shown(name, 30)}'`;
 }
 
-function checkWholeLife(yaml: YamlFile, { wholeLife, boiler, tariffs }: Scenario): Problem[] {
+/** What a comparison over whole lives needs beside itself. */
+export function checkWholeLife(
+  yaml: YamlFile,
+  { wholeLife, boiler, tariffs }: Pick<Scenario, 'wholeLife' | 'boiler' | 'tariffs'>,
+): Problem[] {
   if (wholeLife === undefined) return [];
   const problems: Problem[] = [];
   if (boiler === undefined) {

@@ -5,28 +5,26 @@ import type { YamlFile } from '../yaml/yamlFile.ts';
 import { below, notAbove, pointsOutOfOrder } from './contradictions.ts';
 
 type FlowTemperature = Scenario['flowTemperature'];
-type HotWater = NonNullable<Scenario['hotWater']>;
 
-/** What does not go together in the plant: flow temperature, backup, hot water. */
-export function checkPlant(yaml: YamlFile, scenario: Scenario): Problem[] {
-  const { backup, boiler, hotWater } = scenario;
-  const designRoom = scenario.house.design.roomTemperature;
-  const problems = checkFlow(yaml, ['flowTemperature'], scenario.flowTemperature, designRoom);
-  if (typeof boiler?.efficiency === 'object') {
-    const { byReturnTemperature, flowTemperature } = boiler.efficiency;
-    const path = ['boiler', 'efficiency'];
-    problems.push(...pointsOutOfOrder(yaml, [...path, 'byReturnTemperature'], byReturnTemperature));
-    problems.push(...checkFlow(yaml, [...path, 'flowTemperature'], flowTemperature, designRoom));
-  }
-  if (hotWater !== undefined) problems.push(...checkHotWater(yaml, hotWater));
-  if (backup?.mode.kind === 'cheapest' && scenario.tariffs.length === 0) {
-    problems.push(yaml.problem(['backup', 'mode'], { code: 'scenario.cheapest-needs-tariff' }));
-  }
-  return problems;
+/** A choice by price needs a price. */
+export function checkBackup(yaml: YamlFile, { backup, tariffs }: Pick<Scenario, 'backup' | 'tariffs'>): Problem[] {
+  if (backup?.mode.kind !== 'cheapest' || tariffs.length > 0) return [];
+  return [yaml.problem(['backup', 'mode'], { code: 'scenario.cheapest-needs-tariff' })];
+}
+
+/** What does not go together in the efficiency of a boiler that follows its return temperature. */
+export function checkBoilerFlow(yaml: YamlFile, boiler: Scenario['boiler'], designRoom: number): Problem[] {
+  if (typeof boiler?.efficiency !== 'object') return [];
+  const { byReturnTemperature, flowTemperature } = boiler.efficiency;
+  const path = ['boiler', 'efficiency'];
+  return [
+    ...pointsOutOfOrder(yaml, [...path, 'byReturnTemperature'], byReturnTemperature),
+    ...checkFlow(yaml, [...path, 'flowTemperature'], flowTemperature, designRoom),
+  ];
 }
 
 /** What does not go together in a flow setting; the emitters' own room is the design room where none is given. */
-function checkFlow(yaml: YamlFile, path: EntryPath, setting: FlowTemperature, designRoom: number): Problem[] {
+export function checkFlow(yaml: YamlFile, path: EntryPath, setting: FlowTemperature, designRoom: number): Problem[] {
   if (setting.method === 'curve') return pointsOutOfOrder(yaml, [...path, 'points'], setting.points);
   if (setting.method === 'fixed') return [];
   const { flow } = setting;
@@ -53,7 +51,9 @@ function checkFlow(yaml: YamlFile, path: EntryPath, setting: FlowTemperature, de
   return problems;
 }
 
-function checkHotWater(yaml: YamlFile, hotWater: HotWater): Problem[] {
+/** What does not go together in the hot water. */
+export function checkHotWater(yaml: YamlFile, hotWater: Scenario['hotWater']): Problem[] {
+  if (hotWater === undefined) return [];
   const path = ['hotWater'];
   const { coldWater, draw, setPoint, hygiene } = hotWater;
   const warmest = { name: 'the warmest cold water', value: coldWater.mean + coldWater.amplitude };

@@ -11,43 +11,45 @@ const STATED: Record<TaxStatement, string> = {
   mixed: 'state the taxes in more than one way',
 };
 
+type Listed = readonly (ListedTariff | undefined)[];
+
 /**
- * What does not go together between a scenario and its tariffs: the currency, how taxes are stated, and a choice by price
- * without prices.
+ * A choice by price among tariffs without prices by the hour.
  *
- * @param listed in the scenario's order; undefined for one that could not be read
- * @param laid the same, laid on the year; undefined for one with errors
+ * @param laid in the scenario's order, laid on the year; undefined for one with errors
  */
-export function checkPrices(
+export function checkCheapest(
   yaml: YamlFile,
-  scenario: Scenario,
-  listed: readonly (ListedTariff | undefined)[],
+  { backup, tariffs }: Pick<Scenario, 'backup' | 'tariffs'>,
   laid: readonly (LoadedTariff | undefined)[],
 ): Problem[] {
-  const problems = listed.flatMap((each) => [
-    ...currencyProblems(scenario, each),
-    ...taxProblems(yaml, each, listed[0]),
-  ]);
-  if (scenario.backup?.mode.kind !== 'cheapest' || scenario.tariffs.length === 0) return problems;
-  laid.forEach((tariff, i) => {
-    if (tariff?.prepared.pricedByBlocksAlone !== true) return;
+  if (backup?.mode.kind !== 'cheapest' || tariffs.length === 0) return [];
+  return laid.flatMap((tariff, i) => {
+    if (tariff?.prepared.pricedByBlocksAlone !== true) return [];
     const fault = { code: 'scenario.cheapest-needs-price', found: `'${shown(tariff.name)}'` } as const;
     const mild = {
       severity: 'warning',
       hint: 'its own run takes electricity as free by the hour: read its cost with care',
     } as const;
-    problems.push(yaml.problem(['backup', 'mode'], i === 0 ? fault : { ...fault, ...mild }));
+    return [yaml.problem(['backup', 'mode'], i === 0 ? fault : { ...fault, ...mild })];
   });
-  return problems;
 }
 
-function currencyProblems(scenario: Scenario, listed: ListedTariff | undefined): Problem[] {
-  return (listed?.supplies ?? []).flatMap(({ read }) => {
-    const { currency } = read.tariff;
-    if (currency === undefined || currency.toUpperCase() === scenario.currency) return [];
-    const fault = { code: 'scenario.currency', found: shown(currency), allowed: scenario.currency } as const;
-    return [read.yaml.problem(['currency'], fault)];
-  });
+/** Tariffs in another currency than the scenario's; undefined stands for one that could not be read. */
+export function checkCurrency(currencyOfAll: string, listed: Listed): Problem[] {
+  return listed.flatMap((each) =>
+    (each?.supplies ?? []).flatMap(({ read }) => {
+      const { currency } = read.tariff;
+      if (currency === undefined || currency.toUpperCase() === currencyOfAll) return [];
+      const fault = { code: 'scenario.currency', found: shown(currency), allowed: currencyOfAll } as const;
+      return [read.yaml.problem(['currency'], fault)];
+    }),
+  );
+}
+
+/** Tariffs that state their taxes in another way than the first; undefined stands for one that could not be read. */
+export function checkTaxes(yaml: YamlFile, listed: Listed): Problem[] {
+  return listed.flatMap((each) => taxProblems(yaml, each, listed[0]));
 }
 
 /** Bills of tariffs that state their taxes differently are not alike: said, so that nobody compares them unawares. */

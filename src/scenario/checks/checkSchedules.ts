@@ -13,37 +13,49 @@ interface When {
   readonly to?: string | undefined;
 }
 
-/**
- * What does not go together in the rules of a scenario: set points, quiet hours, reheat windows.
- *
- * @param presentRates names of the rates of the first tariff, where it could be read
- */
-export function checkSchedules(
-  yaml: YamlFile,
-  scenario: Scenario,
-  presentRates: readonly string[] | undefined,
-): Problem[] {
-  const { need } = scenario.house;
-  const lists: { path: EntryPath; rules: readonly When[] }[] = [
-    { path: ['house', 'need', need.model === 'lumped' ? 'schedule' : 'days'], rules: rulesOf(need) },
-    { path: ['heatPump', 'quietHours'], rules: scenario.heatPump.quietHours },
-    { path: ['hotWater', 'reheatWindows'], rules: scenario.hotWater?.reheatWindows ?? [] },
-  ];
-  const problems = lists.flatMap(({ path, rules }) =>
-    rules.flatMap((rule, i) => [
-      ...checkTimes(yaml, [...path, i], rule),
-      ...checkDates(yaml, [...path, i], rule, scenario.site.calendarYear),
-    ]),
-  );
-  if (need.model !== 'lumped') return problems;
-  const setPoints = need.schedule.flatMap((rule, i) =>
-    checkSetPoint(yaml, ['house', 'need', 'schedule', i], rule, { listed: scenario.tariffs.length > 0, presentRates }),
-  );
-  return [...problems, ...setPoints];
+type Need = Scenario['house']['need'];
+
+/** What does not go together in the times and dates of a list of rules. */
+export function checkRules(yaml: YamlFile, path: EntryPath, rules: readonly When[], calendarYear: number): Problem[] {
+  return rules.flatMap((rule, i) => [
+    ...checkTimes(yaml, [...path, i], rule),
+    ...checkDates(yaml, [...path, i], rule, calendarYear),
+  ]);
 }
 
-function rulesOf(need: Scenario['house']['need']): readonly When[] {
-  return need.model === 'lumped' ? need.schedule : need.days;
+/** What does not go together in the times and dates of the set points. */
+export function checkNeedRules(yaml: YamlFile, need: Need, calendarYear: number): Problem[] {
+  const path = ['house', 'need', need.model === 'lumped' ? 'schedule' : 'days'];
+  return checkRules(yaml, path, need.model === 'lumped' ? need.schedule : need.days, calendarYear);
+}
+
+/** What does not go together in what each rule of the set points asks for. */
+export function checkSetPoints(yaml: YamlFile, need: Need): Problem[] {
+  if (need.model !== 'lumped') return [];
+  return need.schedule.flatMap((rule, i) => {
+    if ((rule.setPoint === undefined) !== (rule.raise === undefined)) return [];
+    const found = rule.setPoint === undefined ? 'neither setPoint nor raise' : 'both setPoint and raise';
+    return [yaml.problem(['house', 'need', 'schedule', i], { code: 'scenario.rule-set-point', found })];
+  });
+}
+
+/**
+ * Whether the rates by which set points change are rates of the first tariff.
+ *
+ * @param presentRates names of those rates, where the tariff could be read
+ */
+export function checkSetPointRates(
+  yaml: YamlFile,
+  need: Need,
+  { tariffs, presentRates }: { tariffs: Scenario['tariffs']; presentRates: readonly string[] | undefined },
+): Problem[] {
+  if (need.model !== 'lumped') return [];
+  return need.schedule.flatMap(({ rate }, i) => {
+    if (rate === undefined) return [];
+    const path = ['house', 'need', 'schedule', i, 'rate'];
+    if (tariffs.length === 0) return [yaml.problem(path, { code: 'scenario.rate-needs-tariff' })];
+    return presentRates === undefined ? [] : checkRate(yaml, path, rate, presentRates);
+  });
 }
 
 function checkTimes(yaml: YamlFile, path: EntryPath, { start, end }: When): Problem[] {
@@ -70,24 +82,6 @@ function checkDates(yaml: YamlFile, path: EntryPath, { from, to }: When, calenda
   if (years[0] <= calendarYear && years[1] >= calendarYear) return [];
   const allowed = String(calendarYear);
   return [yaml.problem([...path, 'from'], { code: 'scenario.other-year', severity: 'warning', found: from, allowed })];
-}
-
-function checkSetPoint(
-  yaml: YamlFile,
-  path: EntryPath,
-  rule: { setPoint?: number | undefined; raise?: number | undefined; rate?: string | undefined },
-  tariffs: { listed: boolean; presentRates: readonly string[] | undefined },
-): Problem[] {
-  const problems: Problem[] = [];
-  if ((rule.setPoint === undefined) === (rule.raise === undefined)) {
-    const found = rule.setPoint === undefined ? 'neither setPoint nor raise' : 'both setPoint and raise';
-    problems.push(yaml.problem(path, { code: 'scenario.rule-set-point', found }));
-  }
-  if (rule.rate === undefined) return problems;
-  if (!tariffs.listed) problems.push(yaml.problem([...path, 'rate'], { code: 'scenario.rate-needs-tariff' }));
-  const { presentRates } = tariffs;
-  if (presentRates !== undefined) problems.push(...checkRate(yaml, [...path, 'rate'], rule.rate, presentRates));
-  return problems;
 }
 
 function checkRate(yaml: YamlFile, path: EntryPath, rate: string, names: readonly string[]): Problem[] {

@@ -71,7 +71,7 @@ export function loadReadings(
 
 /** What is wrong with a file of readings by itself, where the scenario that it belongs to is not sound. */
 export function readingsProblems(name: string, source: FileSource): Problem[] {
-  return meterOf(source.read(name), {}, []).problems;
+  return inFileOrder(meterOf(source.read(name), {}, []).problems);
 }
 
 function meterOf(

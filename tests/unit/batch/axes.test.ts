@@ -77,7 +77,9 @@ describe('what is wrong with the axes of a plan', () => {
       /axes\[0\]\.step: from 19 to 21 in steps of -1 there is no way/,
     );
     expect(range('from: 19, to: 21, step: 0')).toMatch(/there is no way\n {4}→ let step lead/);
-    expect(range('from: 0, to: 20, step: 0.001')).toMatch(/20001 values are more than the 10000 of an axis/);
+    expect(range('from: 0, to: 20, step: 0.001')).toMatch(
+      /20001 values are more than the 10000 of an axis\n {4}→ take a larger step/,
+    );
   });
 
   it('is told of a plan in which nothing varies', () => {

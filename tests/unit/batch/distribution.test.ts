@@ -10,6 +10,10 @@ describe('the distribution of a figure', () => {
       ...{ count: 11, mean: 5, least: 0, q10: 1, q25: 2.5, median: 5, q75: 7.5, q90: 9, most: 10 },
     });
     expect(distribution(Float64Array.of(1, 2, 3, 4))?.median).toBe(2.5);
+    // n = 4: the places 0.3, 0.75, 2.25 and 2.7 lie between two values; the mean of the two would be 6, 6, 24 and 24
+    const uneven = distribution(Float64Array.of(4, 8, 16, 32));
+    const quantiles = [uneven?.q10, uneven?.q25, uneven?.q75, uneven?.q90];
+    for (const [i, expected] of [5.2, 7, 20, 27.2].entries()) expect(quantiles[i]).toBeCloseTo(expected, 12);
   });
 
   it('leaves out what is no number, and is nothing where nothing is left', () => {
