@@ -4,12 +4,12 @@ import { visibleText } from '../core/problem.ts';
 import { figure } from './figures.ts';
 import { type Column, heading, table } from './layout.ts';
 
-/** How a criterion is written: its name in a heading, and its decimals. */
-const words: Record<Criterion, { readonly name: string; readonly decimals: number }> = {
-  cost: { name: 'Running cost of the heating on the first tariff', decimals: 0 },
-  carbon: { name: 'Carbon dioxide, kg a year', decimals: 0 },
-  seasonalFactor: { name: 'Seasonal factor H4', decimals: 2 },
-  backupHours: { name: 'Backup hours', decimals: 0 },
+/** What a criterion is called in a heading. */
+const names: Record<Criterion, string> = {
+  cost: 'Running cost of the heating on the first tariff',
+  carbon: 'Carbon dioxide, kg a year',
+  seasonalFactor: 'Seasonal factor H4',
+  backupHours: 'Backup hours',
 };
 
 /** A ranking with what it is about. */
@@ -24,10 +24,10 @@ export interface RankedBatch {
 
 /** A ranking as text: the spread, the best and the worst rows, the values of each axis side by side. */
 export function rankText({ by, axes, rows, unranked, result }: RankedBatch): string {
-  const { decimals, name } = words[by];
+  const { decimals } = criteria[by];
   const { spread, best, worst } = result;
   const good = criteria[by].best === 'least' ? 'the least first' : 'the most first';
-  const title = heading(`${name}: ${figure(rows - unranked, 0)} years, ${good}`);
+  const title = heading(`${names[by]}: ${figure(rows - unranked, 0)} years, ${good}`);
   const left = unranked === 0 ? '' : `\n${figure(unranked, 0)} years have no such figure and are left out.`;
   if (spread === undefined) return `${title}${left}\n`;
   const blocks = [

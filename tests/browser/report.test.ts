@@ -1,16 +1,10 @@
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
-import { pathToFileURL } from 'node:url';
 import { AxeBuilder } from '@axe-core/playwright';
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { reportPage } from '../../src/report/html/reportPage.ts';
 import { demoReport, houses, sampleReport } from '../unit/report/html/reportsOf.ts';
 import { scenarioText } from '../unit/scenario/sampleFiles.ts';
-import { openBrowser } from './openBrowser.ts';
+import { openedReports } from './openedReports.ts';
 
-const folder = mkdtempSync(join(tmpdir(), 'winterledger-browser-test-'));
 const right = JSON.stringify(`בית <b>😀</b> ${'x'.repeat(40)}`);
 const pages: Readonly<Record<string, string>> = {
   english: reportPage(demoReport('en')),
@@ -20,34 +14,7 @@ const pages: Readonly<Record<string, string>> = {
   'a house of a strange name': reportPage(sampleReport(scenarioText.replace('Test house', right))),
 };
 
-let browser: Browser;
-beforeAll(async () => {
-  for (const [name, page] of Object.entries(pages)) writeFileSync(join(folder, `${name}.html`), page);
-  browser = await openBrowser();
-});
-afterAll(async () => {
-  await browser?.close();
-  rmSync(folder, { recursive: true, force: true });
-});
-
-/** What a browser said of a page, and asked for, while it was open. */
-interface Opened {
-  readonly page: Page;
-  readonly said: string[];
-  readonly asked: string[];
-}
-
-async function open(name: string, width: number, colorScheme: 'light' | 'dark' = 'light'): Promise<Opened> {
-  const context = await browser.newContext({ viewport: { width, height: 900 }, colorScheme });
-  const page = await context.newPage();
-  const said: string[] = [];
-  const asked: string[] = [];
-  page.on('console', (message) => said.push(message.text()));
-  page.on('pageerror', (fault) => said.push(fault.message));
-  page.on('request', (request) => asked.push(request.url()));
-  await page.goto(pathToFileURL(join(folder, `${name}.html`)).href);
-  return { page, said, asked };
-}
+const open = openedReports(pages);
 
 describe.each(Object.keys(pages))('the report, %s,', (name) => {
   it.each([360, 1280])('fits a window %d wide, says nothing and asks for nothing', async (width) => {

@@ -74,6 +74,10 @@ export const batchProblems = {
     says: 'the folder holds no finished results of a batch',
     cure: 'name the folder that “winterledger batch --out” or “winterledger gather --out” has finished',
   },
+  'batch.results-differ': {
+    says: 'these results are not what their manifest says: {found}',
+    cure: 'take the folder as it was written, or run the batch again into an empty one',
+  },
   'batch.parts-differ': {
     says: 'this part does not belong to the first one: {found}',
     cure: 'gather parts of one plan, made with the same files and the same version',

@@ -22,9 +22,13 @@ export interface StackedBars extends ChartText {
   /** What the bars stand for, under them; may be empty. */
   readonly categories: string;
   readonly written: Written;
+  /** Whether things are counted, so that no tick stands between whole numbers. */
+  readonly whole?: boolean;
 }
 
 const HEIGHT = 210;
+/** Ticks that are wished for. */
+const TICKS = 5;
 const MARGINS = { right: 6, top: 20, bottom: 32 };
 
 /**
@@ -35,7 +39,7 @@ const MARGINS = { right: 6, top: 20, bottom: 32 };
  * Reference: d3-shape, stack with diverging offset: negative values are stacked below the line.
  */
 export function stackedBars(chart: StackedBars): Markup {
-  const { labels, series, quantity, categories, written } = chart;
+  const { labels, series, quantity, categories, written, whole = false } = chart;
   const layers = stack<number, number>()
     .keys(series.map((_, i) => i))
     .value((bar, key) => series[key].values[bar])
@@ -43,8 +47,8 @@ export function stackedBars(chart: StackedBars): Markup {
   const ends = layers.flatMap((layer) => layer.flatMap(({ 0: from, 1: to }) => [from, to]));
   const least = Math.min(0, ...ends);
   const most = Math.max(0, ...ends);
-  const y = scaleLinear([least, most > least ? most : least + 1], [HEIGHT - MARGINS.bottom, MARGINS.top]).nice(5);
-  const ticks = ticksOf(y, 5, written);
+  const y = scaleLinear([least, most > least ? most : least + 1], [HEIGHT - MARGINS.bottom, MARGINS.top]).nice(TICKS);
+  const ticks = ticksOf(y, whole ? Math.min(TICKS, Math.max(1, most)) : TICKS, written);
   const left = leftRoom(ticks);
   const right = CHART_WIDTH - MARGINS.right;
   const x = scaleBand(

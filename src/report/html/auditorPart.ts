@@ -1,7 +1,11 @@
+import { recognisedLines } from '../../weather/read/recognisedLines.ts';
 import { type Markup, markup } from '../charts/markup.ts';
+import { assumptionText } from '../language/assumptionWords.ts';
+import { warningText } from '../language/warningWords.ts';
+import { weatherLines } from '../weatherLines.ts';
 import { dataTable, figureColumns, textColumns } from './dataTable.ts';
 import { mapTables } from './mapTables.ts';
-import { inEnglish, named, quoted } from './named.ts';
+import { named, quoted } from './named.ts';
 import { reportCommands } from './reportCommands.ts';
 import type { ReportInput } from './reportInput.ts';
 
@@ -42,34 +46,37 @@ function inputTexts({ texts, words }: ReportInput): Markup[] {
   );
 }
 
-function assumptionTable({ document, words }: ReportInput): Markup {
+function assumptionTable({ answer, words, messages }: ReportInput): Markup {
   const { auditor: said } = words;
-  if (document.assumptions.length === 0) return markup`<p>${said.noAssumptions}</p>`;
+  if (answer.assumptions.length === 0) return markup`<p>${said.noAssumptions}</p>`;
   return dataTable({
     caption: said.assumptionsCaption,
     columns: textColumns(said.place, said.assumed),
-    rows: document.assumptions.map(({ path, text }) => [markup`<code>${named(path)}</code>`, inEnglish(text)]),
-  });
-}
-
-function warningTable({ document, words }: ReportInput): Markup {
-  const { auditor: said } = words;
-  if (document.warnings.length === 0) return markup`<p>${words.client.noWarnings}</p>`;
-  return dataTable({
-    caption: said.warningsCaption,
-    columns: textColumns(said.kind, said.seen, said.remedy),
-    rows: document.warnings.map(({ code, text, remedy }) => [
-      markup`<code>${code}</code>`,
-      inEnglish(text),
-      inEnglish(remedy),
+    rows: answer.assumptions.map((assumption) => [
+      markup`<code>${named(assumption.path)}</code>`,
+      named(assumptionText(assumption, messages.assumptions)),
     ]),
   });
 }
 
-function weatherParts({ document, words, figures }: ReportInput): Markup[] {
+function warningTable({ answer, words, messages }: ReportInput): Markup {
   const { auditor: said } = words;
-  const { recognised, repairs } = document.weather;
-  const lines = recognised.map((line) => markup`<li>${inEnglish(line)}</li>`);
+  if (answer.warnings.length === 0) return markup`<p>${words.client.noWarnings}</p>`;
+  return dataTable({
+    caption: said.warningsCaption,
+    columns: textColumns(said.kind, said.seen, said.remedy),
+    rows: answer.warnings.map((warning) => {
+      const { text, remedy } = warningText(warning, messages.warnings, messages.problems);
+      return [markup`<code>${warning.code}</code>`, named(text), named(remedy)];
+    }),
+  });
+}
+
+function weatherParts({ answer, words, messages, figures }: ReportInput): Markup[] {
+  const { auditor: said } = words;
+  const { recognised } = answer.loaded.weather;
+  const lines = recognisedLines(recognised, messages.recognised).map((line) => markup`<li>${named(line)}</li>`);
+  const { repairs } = weatherLines(recognised);
   const mended =
     repairs.length === 0
       ? markup`<p>${said.noRepairs}</p>`
@@ -77,7 +84,7 @@ function weatherParts({ document, words, figures }: ReportInput): Markup[] {
           caption: said.repairs,
           columns: figureColumns(said.quantity, [said.filled, said.longest, said.held]),
           rows: repairs.map(({ quantity, hours, longest, held }) => [
-            inEnglish(quantity),
+            messages.recognised.quantity(quantity),
             ...[hours, longest, held].map((value) => figures.number(value, 0)),
           ]),
         });

@@ -1,10 +1,11 @@
 import { barStrip } from '../charts/barStrip.ts';
 import { type Markup, markup } from '../charts/markup.ts';
 import type { Look } from '../charts/texture.ts';
+import { warningText } from '../language/warningWords.ts';
 import { clientSentences } from './clientSentences.ts';
 import { breakEvenSentence } from './comparisonTables.ts';
 import { dataTable, figureColumns } from './dataTable.ts';
-import { inEnglish, named } from './named.ts';
+import { named } from './named.ts';
 import type { ReportInput } from './reportInput.ts';
 import { FLOW_CHANGE, PRICE_CHANGE, ROOM_CHANGE, whatIf } from './whatIf.ts';
 
@@ -92,13 +93,13 @@ function changes(input: ReportInput): Markup {
   return markup`${table}<p class="small">${breakEvenSentence(document, words, figures)}</p>`;
 }
 
-function cautions({ document, words, figures }: ReportInput): Markup {
+function cautions({ answer, words, messages, figures }: ReportInput): Markup {
   const { client: said } = words;
-  const { warnings } = document;
+  const { warnings } = answer;
   if (warnings.length === 0) return markup`<h3>${said.warningsTitle}</h3><p>${said.noWarnings}</p>`;
-  const items = warnings.slice(0, MOST_WARNINGS).map(({ code, text, remedy }) => {
-    const plain = words.plainWarnings[code];
-    return markup`<li>${plain === undefined ? undefined : markup`${plain} `}${inEnglish(text)} <em>${inEnglish(remedy)}</em></li>`;
+  const items = warnings.slice(0, MOST_WARNINGS).map((warning) => {
+    const { text, remedy } = warningText(warning, messages.warnings, messages.problems);
+    return markup`<li>${named(text)} <em>${named(remedy)}</em></li>`;
   });
   const rest = warnings.length - items.length;
   const more = rest > 0 ? markup`<p class="small">${said.moreWarnings(figures.number(rest, 0))}</p>` : undefined;

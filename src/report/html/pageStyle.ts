@@ -51,7 +51,7 @@ dd small{font:400 .8rem var(--sans);color:var(--ink2)}
 .signature .line{display:block;height:2.4rem;margin-bottom:.25rem;border-bottom:1px solid var(--ink);color:var(--ink);padding-top:.9rem}
 .part{margin-top:2.6rem;padding-top:1rem;border-top:3px double var(--ink2)}
 .charts{display:grid;grid-template-columns:repeat(auto-fit,minmax(min(100%,21rem),1fr));gap:1.4rem 2rem;margin:1rem 0}
-.charts>*{min-width:0}
+.charts>*{min-width:0;max-width:36rem}
 figure{margin:0}
 figcaption{margin-top:.35rem}
 .key{list-style:none;padding:0;margin:.3rem 0;font-size:.85rem;display:flex;flex-wrap:wrap;gap:.1rem 1rem}

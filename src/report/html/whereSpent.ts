@@ -1,15 +1,13 @@
-import { readMap } from '../../sim/heatPumpMap.ts';
 import { waterFlowTemperatures } from '../../sim/waterFlow.ts';
-import type { Field } from '../charts/contourLines.ts';
 import { densityField } from '../charts/densityField.ts';
 import { type Markup, markup } from '../charts/markup.ts';
 import { chartFigure } from './chartFigure.ts';
+import { COP_LEVELS, copField, wholeFives } from './copContours.ts';
 import { figureColumns } from './dataTable.ts';
 import type { ReportInput } from './reportInput.ts';
 
 /** Edge of a cell, K. */
 const CELL = 2;
-const LEVELS = [1.5, 2, 2.5, 3, 3.5, 4, 4.5, 5, 6, 7, 8];
 
 /** Heat of the unit by cell of outdoor and flow temperature; kWh. */
 export interface HeatCell {
@@ -51,8 +49,8 @@ export function whereSpent(input: ReportInput): Markup {
   const cells = heatCells(answer);
   if (cells.length === 0) return markup`<p>${said.none}</p>`;
   const { outdoor, flow } = answer.plan.unitOnWeather.unit.full;
-  const xRange = span([...cells.map(({ x }) => x), ...cells.map(({ x }) => x + CELL), outdoor[0]]);
-  const yRange = span([...cells.flatMap(({ y }) => [y, y + CELL]), ...flow]);
+  const xRange = wholeFives([...cells.map(({ x }) => x), ...cells.map(({ x }) => x + CELL), outdoor[0]]);
+  const yRange = wholeFives([...cells.flatMap(({ y }) => [y, y + CELL]), ...flow]);
   const { fullLoad } = answer.loaded.unit;
   const points = fullLoad.cop.flatMap((cop, i): [number, number][] => {
     const row = Math.floor(i / flow.length);
@@ -68,7 +66,7 @@ export function whereSpent(input: ReportInput): Markup {
     title: said.title,
     chart: densityField({
       ...{ id: 'where-spent', title: said.title, description: says, cells, cellWidth: CELL, cellHeight: CELL },
-      ...{ contours: copField(answer, xRange, yRange), levels: LEVELS, points, xRange, yRange },
+      ...{ contours: copField(answer.plan.unitOnWeather.unit.full, xRange, yRange), levels: COP_LEVELS, points, xRange, yRange },
       written: figures.number,
       ...{ xTitle: said.outdoor, yTitle: said.flow },
     }),
@@ -77,29 +75,6 @@ export function whereSpent(input: ReportInput): Markup {
     table: heatTable(cells, input),
     figures: words.figures,
   });
-}
-
-/** The least range of whole fives that holds all values. */
-function span(values: readonly number[]): [number, number] {
-  return [5 * Math.floor(Math.min(...values) / 5), 5 * Math.ceil(Math.max(...values) / 5)];
-}
-
-/** COP of the full-load map, kelvin by kelvin. */
-function copField(
-  { plan }: ReportInput['answer'],
-  [west, east]: readonly [number, number],
-  [south, north]: readonly [number, number],
-): Field {
-  const x = Array.from({ length: east - west + 1 }, (_, i) => west + i);
-  const y = Array.from({ length: north - south + 1 }, (_, i) => south + i);
-  const point = new Float64Array(2);
-  const values = y.flatMap((flow) =>
-    x.map((outdoor) => {
-      readMap(plan.unitOnWeather.unit.full, outdoor, flow, point, 0);
-      return point[1];
-    }),
-  );
-  return { x, y, values };
 }
 
 function heatTable(cells: readonly HeatCell[], { words, figures }: ReportInput) {

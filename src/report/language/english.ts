@@ -1,4 +1,5 @@
 import { englishAuditor } from './englishAuditor.ts';
+import { englishBatch } from './englishBatch.ts';
 import { englishFormulas } from './englishFormulas.ts';
 import { englishProfessional } from './englishProfessional.ts';
 import type { FormulaSource, Language } from './languages.ts';
@@ -23,8 +24,6 @@ export const english = {
   month: 'Month',
   year: 'Year',
   figures: 'Figures',
-  /** What a warning means in plain words, by its kind; where none stands here, its own text says it. */
-  plainWarnings: {} as Readonly<Record<string, string | undefined>>,
 
   client: {
     title: 'The answer',
@@ -54,6 +53,7 @@ export const english = {
       saved: 'Saved against the boiler',
       dearer: 'Dearer than the boiler',
       carbon: 'Carbon dioxide a year',
+      backupHours: 'Hours with backup',
     },
     costTitle: 'What a year of heating costs',
     costNote: 'Running cost with taxes, fuel and service as entered; the boiler with its pump on the first tariff.',
@@ -88,6 +88,7 @@ export const english = {
 
   ...englishProfessional,
   ...englishAuditor,
+  ...englishBatch,
   formulas: englishFormulas as readonly FormulaSource[],
 };
 

@@ -1,5 +1,6 @@
 import type { ReportWords } from './english.ts';
 import { germanAuditor } from './germanAuditor.ts';
+import { germanBatch } from './germanBatch.ts';
 import { germanFormulas } from './germanFormulas.ts';
 import { germanProfessional } from './germanProfessional.ts';
 
@@ -20,24 +21,6 @@ export const german: ReportWords = {
   month: 'Monat',
   year: 'Jahr',
   figures: 'Zahlen',
-  plainWarnings: {
-    'result.seasonal-factor': 'Die Jahresarbeitszahl liegt außerhalb dessen, was Häuser gezeigt haben.',
-    'result.much-backup': 'Die Zusatzheizung gibt einen großen Teil der Wärme.',
-    'result.unmet-heat': 'Ein Teil der Raumwärme fehlt: Räume würden kalt.',
-    'result.many-starts': 'Der Verdichter startet sehr oft.',
-    'size.far-under': 'Das Gerät ist viel kleiner, als das Haus es braucht.',
-    'size.far-over': 'Das Gerät ist viel größer, als das Haus es braucht.',
-    'map.outside': 'Das Gerät läuft oft außerhalb seiner Leistungstabelle.',
-    'map.flow-above-limit': 'Die Räume verlangen zeitweise heißeres Heizwasser, als das Gerät geben kann.',
-    'map.too-cold': 'Zeitweise ist es kälter, als das Gerät verträgt: dann steht es still.',
-    'weather.milder-than-design': 'Das Wetterjahr ist milder als die Auslegung.',
-    'weather.colder-than-design': 'Das Wetterjahr ist kälter als die Auslegung.',
-    'hot-water.legionella': 'Der Speicher ist lauwarm und wird nicht wöchentlich aufgeheizt: Legionellen.',
-    'hot-water.hygiene-run-cool': 'Das wöchentliche Aufheizen bleibt unter der üblichen Temperatur.',
-    'hot-water.scalding': 'Das Warmwasser kann so heiß werden, dass es verbrüht.',
-    'hot-water.colder-than-use': 'Der Speicher ist kälter als das verlangte Warmwasser.',
-    'hot-water.short': 'Zeitweise reicht das Warmwasser nicht.',
-  },
 
   client: {
     title: 'Die Antwort',
@@ -64,9 +47,10 @@ export const german: ReportWords = {
       electricity: 'Strom im Jahr',
       factor: 'Wärme je gekaufter kWh',
       cost: 'Heizung im Jahr',
-      saved: 'Gespart zum Kessel',
+      saved: 'Ersparnis zum Kessel',
       dearer: 'Teurer als der Kessel',
       carbon: 'Kohlendioxid im Jahr',
+      backupHours: 'Stunden mit Zusatzheizung',
     },
     costTitle: 'Was ein Jahr Heizen kostet',
     costNote:
@@ -102,5 +86,6 @@ export const german: ReportWords = {
 
   ...germanProfessional,
   ...germanAuditor,
+  ...germanBatch,
   formulas: germanFormulas,
 };

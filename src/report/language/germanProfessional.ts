@@ -74,7 +74,7 @@ export const germanProfessional: ProfessionalWords = {
     cylinderLoss: 'Verlust des Speichers',
   },
   duration: {
-    title: 'Lastdauer, und was das Gerät geben kann',
+    title: 'Jahresdauerlinie der Last, und was das Gerät geben kann',
     caption: 'Bedarf nach Rang, und Leistung um diesen Rang',
     rank: 'Stunden mit mehr Bedarf',
     hours: 'Stunden mit Bedarf, die größten zuerst',
@@ -88,7 +88,7 @@ export const germanProfessional: ProfessionalWords = {
       `In ${hours} Stunden brauchen die Räume mehr, als das Gerät geben kann; die wärmste davon hat ${temperature}. Dort, am Bivalenzpunkt, kreuzen sich die Linien.`,
   },
   spent: {
-    title: 'Wo das Jahr verbracht wird',
+    title: 'Bei welchen Temperaturen das Gerät das Jahr über läuft',
     caption: 'Wärme des Geräts an Räume und Speicher nach Außen- und Vorlauftemperatur, kWh',
     outdoor: 'Außentemperatur, °C',
     flow: 'Vorlauf, °C',
@@ -189,11 +189,11 @@ export const germanProfessional: ProfessionalWords = {
     caption: (currency) => `Jahr für Jahr, heutige ${currency}`,
     year: 'Jahr',
     saving: 'Gespart',
-    presentValue: 'Heutiger Wert',
-    balance: 'Stand',
+    presentValue: 'Barwert',
+    balance: 'Saldo',
     years: (count) => `${count} Jahre`,
     paybacks: { 'at once': 'sofort', never: 'nie' },
     says: ({ years, value, capital, simple, discounted }) =>
-      `Über ${years} Jahre ist die Wärmepumpe nach ihrem Kapital von netto ${capital} ${value} wert; Amortisation: einfach ${simple}, abgezinst ${discounted}.`,
+      `Über ${years} Jahre hat die Wärmepumpe einen Kapitalwert von ${value}, bei einem Kapital von netto ${capital}; Amortisation: einfach ${simple}, abgezinst ${discounted}.`,
   },
 };

@@ -1,11 +1,21 @@
+import { englishMessages } from './english/messages.ts';
 import { english, type ReportWords } from './english.ts';
+import { germanMessages } from './german/messages.ts';
 import { german } from './german.ts';
 import type { Language } from './languages.ts';
 import { type LocalFigures, localFigures } from './localFigures.ts';
+import type { Messages } from './messages.ts';
 
-/** Words of a language, and its way of writing figures. */
-export function inLanguage(language: Language): { words: ReportWords; figures: LocalFigures } {
+/** A language: the words of the report, what the program says beside them, and the way of writing figures. */
+export interface InLanguage {
+  readonly words: ReportWords;
+  readonly messages: Messages;
+  readonly figures: LocalFigures;
+}
+
+/** Everything that is said in a language. */
+export function inLanguage(language: Language): InLanguage {
   return language === 'de'
-    ? { words: german, figures: localFigures(',') }
-    : { words: english, figures: localFigures('.') };
+    ? { words: german, messages: germanMessages, figures: localFigures(',') }
+    : { words: english, messages: englishMessages, figures: localFigures('.') };
 }

@@ -4,9 +4,11 @@ import { describe, expect, it } from 'vitest';
 import { leftRoom, ticksOf } from '../../../../src/report/charts/axes.ts';
 import { barStrip } from '../../../../src/report/charts/barStrip.ts';
 import { carpet } from '../../../../src/report/charts/carpet.ts';
-import { RAMP_STEPS } from '../../../../src/report/charts/colourRamp.ts';
+import { colourRamp, RAMP_STEPS } from '../../../../src/report/charts/colourRamp.ts';
 import { densityField } from '../../../../src/report/charts/densityField.ts';
+import { heatMap, isDark, mostColumns } from '../../../../src/report/charts/heatMap.ts';
 import { lineChart } from '../../../../src/report/charts/lineChart.ts';
+import { quantileBoxes } from '../../../../src/report/charts/quantileBoxes.ts';
 import { stackedBars } from '../../../../src/report/charts/stackedBars.ts';
 import { strokesOf } from '../../../../src/report/charts/texture.ts';
 
@@ -190,5 +192,96 @@ describe('strokes of a texture', () => {
 
   it('are none on a plain surface', () => {
     expect(strokesOf({ x: 0, y: 0, width: 10, height: 10 }, 'plain')).toBe('');
+  });
+});
+
+describe('a chart of counts', () => {
+  it('has no tick between whole numbers', () => {
+    const ticksAt = (values: number[], whole: boolean) =>
+      [
+        ...stackedBars({
+          ...{ ...text, quantity: 'Homes', categories: '', written, whole, labels: values.map(() => '') },
+          series: [{ look: { tone: 1, texture: 'plain' }, values }],
+        }).text.matchAll(/class="end">([^<]*)</g),
+      ].map(([, label]) => Number(label));
+    expect(ticksAt([1, 1], true)).toEqual([0, 1]);
+    expect(ticksAt([3, 1], true)).toEqual([0, 1, 2, 3]);
+    expect(ticksAt([400, 1], true)).toEqual([0, 100, 200, 300, 400]);
+    expect(ticksAt([1, 1], false).some((value) => !Number.isInteger(value))).toBe(true);
+  });
+});
+
+describe('a map of figures', () => {
+  const map = (values: (number | undefined)[]) =>
+    heatMap({
+      ...{ ...text, rows: ['a', 'b'], columns: ['x', 'y'], rowTitle: 'r', columnTitle: 'c' },
+      ...{ values, ramp: 'warmth', decimals: 1, written },
+    }).text;
+
+  it('has the colours of the ends of its ramp at the least and the greatest value', () => {
+    const svg = map([1, 2, undefined, 3]);
+    const colours = [...svg.matchAll(/fill="rgb\(([^)]*)\)"/g)].map(([, colour]) => colour);
+    expect([colours[0], colours[2]]).toEqual(['20,24,66', '247,234,176']);
+    expect([...svg.matchAll(/class="mid(?: on-\w+)?">([\d.–]+)</g)].map(([, value]) => value)).toEqual([
+      '1.0',
+      '2.0',
+      '–',
+      '3.0',
+    ]);
+  });
+
+  it('writes in each cell so that the contrast is at least 4.5', () => {
+    // WCAG 2.2, success criterion 1.4.3; luminance by its definition, each channel linear.
+    const light = (channel: number) =>
+      channel / 255 <= 0.04045 ? channel / 3294.6 : ((channel / 255 + 0.055) / 1.055) ** 2.4;
+    const luminance = ([r, g, b]: readonly [number, number, number]) =>
+      0.2126 * light(r) + 0.7152 * light(g) + 0.0722 * light(b);
+    for (const ramp of ['energy', 'price', 'warmth'] as const) {
+      for (const colour of colourRamp(ramp)) {
+        const contrast = isDark(colour) ? 1.05 / (luminance(colour) + 0.05) : (luminance(colour) + 0.05) / 0.05;
+        expect(contrast).toBeGreaterThanOrEqual(4.5);
+      }
+    }
+  });
+
+  it('takes values that are all the same', () => {
+    expect(map([2, 2, 2, 2])).not.toMatch(/NaN|Infinity/);
+  });
+
+  it('has the more columns the shorter its figures are', () => {
+    expect(mostColumns('9')).toBeGreaterThan(mostColumns('12 345'));
+    expect(mostColumns('9'.repeat(500))).toBe(1);
+  });
+});
+
+describe('spreads below one another', () => {
+  const box = { name: 'a', q05: 10, q25: 20, median: 30, q75: 40, q95: 50 };
+  const svg = quantileBoxes({
+    ...text,
+    boxes: [box, { ...box, name: 'b', median: 25 }],
+    quantity: 'kWh',
+    decimals: 0,
+    written,
+  }).text;
+
+  it('have box and median at their places on the scale below', () => {
+    const ticks = [...svg.matchAll(/<text x="([\d.]+)" y="[\d.]+" class="mid">(\d+)</g)].map(
+      ([, x, label]) => [Number(x), Number(label)] as const,
+    );
+    expect(ticks.map(([, label]) => label)).toEqual([10, 20, 30, 40, 50]);
+    const placeOf = (value: number) => ticks.find(([, label]) => label === value)![0];
+    const [, from, to] = /<path d="M([\d.]+) [\d.]+H([\d.]+)v10H[\d.]+z" class="box"/.exec(svg)!;
+    expect([Number(from), Number(to)]).toEqual([placeOf(20), placeOf(40)]);
+    const medians = [...svg.matchAll(/<path d="M([\d.]+) [\d.]+v12" class="median"/g)].map(([, x]) => Number(x));
+    expect(medians[0]).toBe(placeOf(30));
+    // Half way between two ticks; a coordinate is rounded to tenths.
+    expect(medians[1]).toBeCloseTo((placeOf(20) + placeOf(30)) / 2, 0);
+  });
+
+  it('take a spread without width', () => {
+    const flat = { name: 'x', q05: 5, q25: 5, median: 5, q75: 5, q95: 5 };
+    expect(quantileBoxes({ ...text, boxes: [flat], quantity: '', decimals: 0, written }).text).not.toMatch(
+      /NaN|Infinity/,
+    );
   });
 });

@@ -1,0 +1,115 @@
+/** What the entries of a unit and of a tariff mean, by their places. */
+export const fieldsOfFiles: Readonly<Record<string, string>> = {
+  'unit.name': 'Name des Geräts.',
+  'unit.note': 'Woher die Werte stammen.',
+  'unit.map': 'Was das Gerät gibt und aufnimmt, über Außen- und Vorlauftemperatur.',
+  'unit.map.fullLoad': 'Leistung und COP, oder Leistung und elektrische Aufnahme, bei Volllast.',
+  'unit.map.fullLoad.capacity':
+    'Eine Tabelle, wie der Hersteller sie druckt: erste Zeile Vorlauftemperaturen, erste Spalte Außentemperaturen, in °C; ein Textblock oder eine Datei.',
+  'unit.map.fullLoad.capacity.1.file': 'CSV-Datei der Tabelle.',
+  'unit.map.lowestLevel': 'Die kleinste Stufe im Dauerbetrieb: eine eigene Tabelle oder ein Anteil der Volllast.',
+  'unit.map.lowestLevel.share.capacity':
+    'Kleinste Leistung im Dauerbetrieb als Anteil der vollen; 1 ist ein Gerät mit einer Stufe.',
+  'unit.map.lowestLevel.share.cop': 'COP der kleinsten Stufe als Vielfaches dessen bei Volllast.',
+  'unit.map.interpolation': 'Zwischen den Punkten ist der Anteil am Carnot-COP linear, oder der COP selbst.',
+  'unit.limits': 'Wo das Gerät laufen darf.',
+  'unit.limits.lowestOutdoorTemperature': 'Darunter läuft das Gerät nicht.',
+  'unit.limits.highestFlow':
+    'Höchste Vorlauftemperatur, eine Zahl oder über der Außentemperatur; fehlt sie, die höchste der Leistungstabelle.',
+  'unit.limits.highestFlow.1': 'Höchster Vorlauf über der Außentemperatur.',
+  'unit.defrost':
+    'Ob die Leistungstabelle den Verlust durch Abtauen enthält (integrierte Werte nach EN 14511), oder wie er gefunden wird.',
+  'unit.defrost.humidity.capacityLoss':
+    'Leistung, die das Abtauen zwischen frostfreier und integrierter Messung bei A2/W35 kostet.',
+  'unit.defrost.humidity.copLoss':
+    'COP, den das Abtauen zwischen frostfreier und integrierter Messung bei A2/W35 kostet.',
+  'unit.defrost.table.capacity':
+    'Faktor auf die Leistung über der Außentemperatur; jenseits der Enden bleibt er gleich.',
+  'unit.defrost.table.cop': 'Faktor auf den COP über der Außentemperatur; jenseits der Enden bleibt er gleich.',
+  'unit.cycling': 'Was der Betrieb unter der kleinsten Stufe kostet.',
+  'unit.cycling.degradation.coefficient':
+    'Verlust an COP beim Takten, C_d (EN 14825 für Luft-Luft, AHRI 210/240: 0,25).',
+  'unit.cycling.offPower.power': 'Leistungsaufnahme in den Pausen beim Takten.',
+  'unit.standbyPower': 'Leistungsaufnahme, während der Verdichter nichts tut.',
+  'unit.crankcase': 'Ölsumpfheizung.',
+  'unit.crankcase.power': 'Leistung der Ölsumpfheizung, während der Verdichter nichts tut.',
+  'unit.crankcase.belowTemperature': 'Sie läuft unter dieser Außentemperatur; ohne Angabe immer.',
+  'unit.label':
+    'Was Energielabel und Datenblatt angeben; es wird gegen die Leistungstabelle gehalten und ändert kein gerechnetes Jahr.',
+  'unit.label.reversible': 'Ob das Gerät auch kühlt; davon hängen die Stunden ab, in denen es ruht.',
+  'unit.label.idlePowers': 'Was das Gerät aufnimmt, wenn es keine Wärme gibt, wie Label oder Datenblatt es angeben.',
+  'unit.label.idlePowers.off': 'Leistungsaufnahme im Aus-Zustand.',
+  'unit.label.idlePowers.thermostatOff': 'Leistungsaufnahme, während der Temperaturregler keine Wärme verlangt.',
+  'unit.label.idlePowers.standby': 'Leistungsaufnahme in Bereitschaft.',
+  'unit.label.idlePowers.crankcase': 'Leistung der Ölsumpfheizung.',
+  'unit.label.seasons': 'Was für jedes Klima und jede Anwendung angegeben ist.',
+  'unit.label.seasons.climate': 'Heizperiode des Labels: das Klima, für das sie steht.',
+  'unit.label.seasons.application':
+    'Wassertemperatur der Angabe bei der Auslegungstemperatur: 35 niedrig, 45 mittel, 55 mittelhoch, 65 hoch.',
+  'unit.label.seasons.designLoad': 'Angegebene Heizlast P_design.',
+  'unit.label.seasons.bivalentTemperature':
+    'Bivalenztemperatur T_biv: Bis zu ihr hinab trägt das Gerät die Last allein.',
+  'unit.label.seasons.operatingLimit': 'Betriebsgrenze TOL: Darunter gibt das Gerät keine Wärme.',
+  'unit.label.seasons.degradation':
+    'Minderungsbeiwert C_c: was Starten und Stoppen vom COP übrig lassen; 1 ist kein Verlust (EN 14825: 0,9).',
+  'unit.label.seasons.scop': 'Angegebener SCOP.',
+  'unit.label.seasons.efficiency': 'Angegebene jahreszeitbedingte Raumheizungs-Energieeffizienz η_s.',
+  'unit.label.seasons.points': 'Angegebene Leistung und COP über der Außentemperatur.',
+  'unit.label.seasons.points.outdoor': 'Außentemperatur des Punkts.',
+  'unit.label.seasons.points.capacity': 'Angegebene Heizleistung.',
+  'unit.label.seasons.points.cop': 'Angegebener COP bei dieser Leistung.',
+  'unit.label.seasons.points.degradation': 'Minderungsbeiwert C_c dieses Punkts, wo er nicht der der Heizperiode ist.',
+  'unit.label.outlets':
+    'Austrittstemperaturen eines Klimas und einer Anwendung, die das Programm nicht kennt oder die abweichen.',
+  'unit.label.outlets.points':
+    'Wasseraustrittstemperatur über der Außentemperatur, für Temperaturen über der Auslegungstemperatur.',
+
+  tariff: 'Was ein Lieferant für Strom verlangt.',
+  'tariff.name': 'Wie Ergebnisse und Berichte diesen Tarif nennen.',
+  'tariff.currency': 'Währung aller Beträge der Datei, nur zum Zeigen.',
+  'tariff.note': 'Woher die Preise stammen und von wann; steht bei den Ergebnissen.',
+  'tariff.rates': 'Arbeitspreise nach Ortszeit; zusammen müssen sie jede Minute des Jahres abdecken.',
+  'tariff.rates[]':
+    'Ein Arbeitspreis, und wann er gilt; die erste Preisstufe der Liste, die auf eine Minute passt, bestimmt ihren Preis.',
+  'tariff.rates.name': 'Wie die Rechnung diese Preisstufe nennt; Preisstufen eines Namens zählen als eine.',
+  'tariff.rates.price': 'Preis einer Kilowattstunde, solange die Preisstufe gilt; er darf negativ sein.',
+  'tariff.rates.from': 'Ortszeit, zu der sie jeden Tag beginnt; fehlt sie, um Mitternacht.',
+  'tariff.rates.to': 'Ortszeit, zu der sie endet; früher als der Beginn heißt über Mitternacht.',
+  'tariff.rates.weekdays': 'Wochentage, an denen sie gilt, der jeder Minute, auch nach Mitternacht; fehlen sie, alle.',
+  'tariff.rates.months': 'Monate, in denen sie gilt, 1 bis 12; fehlen sie, alle.',
+  'tariff.rates.dates': 'Zeitraum, in dem sie gilt, jedes Jahr derselbe; fehlt er, das ganze Jahr.',
+  'tariff.rates.dates.from': 'Erster Tag des Zeitraums.',
+  'tariff.rates.dates.to': 'Letzter Tag des Zeitraums, einschließlich; er darf im nächsten Jahr liegen.',
+  'tariff.rates.holidays':
+    'Ob sie nur an Feiertagen gilt, nie, oder auch ungeachtet des Wochentags; ohne Angabe sind Feiertage gewöhnliche Tage.',
+  'tariff.series': 'Preise, die sich über die Zeit ändern; wo es auch Preisstufen gibt, kommen sie hinzu.',
+  'tariff.series.file':
+    'CSV-Datei mit einer Spalte der Zeitstempel und einer der Preise, in einem Zeitschritt von höchstens einer Stunde.',
+  'tariff.series.unit': 'Einheit der Preise: Geld je kWh, Geld je MWh oder Cent je kWh.',
+  'tariff.series.priceColumn': 'Name der Spalte der Preise; unnötig bei einer Datei mit zwei Spalten.',
+  'tariff.series.decimal': 'Dezimalzeichen der Preise; fehlt es, zeigt es die Datei.',
+  'tariff.blocks':
+    'Preise nach Menge, auf allen Strom der Rechnung; wo es Preisstufen oder eine Preisreihe gibt, kommen sie hinzu.',
+  'tariff.blocks.per': 'Zeitraum, nach dem die Mengenstufen neu beginnen.',
+  'tariff.blocks.prices': 'Die Mengenstufen, aufsteigend.',
+  'tariff.blocks.prices[]': 'Eine Mengenstufe.',
+  'tariff.blocks.prices.upTo': 'Wo die Mengenstufe endet, gezählt ab Beginn des Zeitraums; entfällt bei der letzten.',
+  'tariff.blocks.prices.price': 'Preis einer Kilowattstunde in der Mengenstufe.',
+  'tariff.standing': 'Grundpreise, was immer verbraucht wird; die angegebenen addieren sich.',
+  'tariff.standing.perDay': 'Betrag je Tag.',
+  'tariff.standing.perMonth': 'Betrag je Monat.',
+  'tariff.standing.perYear': 'Betrag für das Jahr.',
+  'tariff.demand': 'Leistungspreis auf die höchste Stundenleistung jedes Monats, für allen Strom der Rechnung.',
+  'tariff.demand.perKW': 'Preis jedes Kilowatts der höchsten Stunde eines Kalendermonats.',
+  'tariff.taxes': 'Steuern in Prozent auf Arbeitspreis, Grundpreis und Leistungspreis; sie addieren sich.',
+  'tariff.taxes[]': 'Eine Steuer.',
+  'tariff.taxes.name': 'Wie die Rechnung diese Steuer nennt.',
+  'tariff.taxes.percent': 'Ihr Anteil an Arbeitspreis, Grundpreis und Leistungspreis.',
+  'tariff.credits': 'Feste Beträge, die nach Steuer abgezogen werden; die Rechnung darf unter null fallen.',
+  'tariff.credits[]': 'Eine Gutschrift.',
+  'tariff.credits.name': 'Wie die Rechnung diese Gutschrift nennt.',
+  'tariff.credits.amount': 'Betrag, der jedes Jahr abgezogen wird.',
+  'tariff.holidays': 'Feiertage; sie zählen für Preisstufen mit der Angabe „holidays“.',
+  'tariff.holidays[]': 'Ein Feiertag.',
+  'tariff.pricesStated': 'Ob die genannten Steuern in allen Preisen enthalten sind oder obendrauf kommen.',
+};
