@@ -15,11 +15,11 @@ const table = {
 const HOURS = 48;
 
 /** The map of an hour in which the unit heats rooms at an outdoor and a flow temperature. */
-function mapAt(outdoor: number, flow: number): ExplainedStage {
+function mapAt(outdoor: number, flow: number, of: typeof table = table): ExplainedStage {
   const plan = planOf({
     hours: HOURS,
     temperature: new Float64Array(HOURS).fill(outdoor),
-    table,
+    table: of,
     flow: { at: [0], value: [flow] },
     unit: { highestFlow: { at: [0], value: [70] } },
   });
@@ -52,4 +52,16 @@ test.each([
 test('the fall of capacity below the coldest row is shown below it, and nowhere else', () => {
   expect(hasFigure(mapAt(-9, 40), 'coldSlope')).toBe(true);
   for (const outdoor of [-7, -3, 4]) expect(hasFigure(mapAt(outdoor, 40), 'coldSlope')).toBe(false);
+});
+
+test('only a table of one flow column is said to be one', () => {
+  const columns = (count: number) => ({
+    ...table,
+    flow: table.flow.slice(0, count),
+    capacity: table.capacity.filter((_, i) => i % 3 < count),
+    cop: table.cop.filter((_, i) => i % 3 < count),
+  });
+  for (const count of [1, 2, 3]) {
+    expect(mapAt(2, 35, columns(count)).findings.includes('oneFlowColumn')).toBe(count === 1);
+  }
 });

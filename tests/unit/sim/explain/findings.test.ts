@@ -88,3 +88,31 @@ test('only a cylinder that the heat pump did not heat is said to be above its re
   }
   expect(above).toBeGreaterThan(0);
 });
+
+test('the flow is said to be held in just the hours in which the emitters stand at an end of their range', () => {
+  const said = { lowest: 0, highest: 0, between: 0 };
+  for (const one of explainedCases(1)) {
+    const { flow } = one.plan;
+    const stage = stageOf(one, 'flow');
+    if (stage === undefined || stage.findings.includes('noHeatAsked')) continue;
+    const found = one.year.flowTemperature[one.i]!;
+    const ends = flow.set === null ? { lowest: found === flow.lowest, highest: found === flow.highest } : {};
+    expect(stage.findings.includes('heldAtLowestFlow'), `${one.name} ${one.i}`).toBe(ends.lowest ?? false);
+    expect(stage.findings.includes('heldAtHighestFlow'), `${one.name} ${one.i}`).toBe(ends.highest ?? false);
+    said[ends.lowest ? 'lowest' : ends.highest ? 'highest' : 'between']++;
+  }
+  expect(Math.min(said.lowest, said.between)).toBeGreaterThan(20);
+});
+
+test('how frost grows is shown in just the hours with a coil below freezing', () => {
+  const shown = { frost: 0, above: 0, justAbove: 0 };
+  for (const one of explainedCases(1)) {
+    const air = stageOf(one, 'air')!;
+    const coil = figureOf(air, 'coilTemperature');
+    const names = air.figures.map(({ name }) => name);
+    expect(names.includes('coilHumidityRatio'), `${one.name} ${one.i}`).toBe(coil < 0);
+    shown[coil < 0 ? 'frost' : 'above']++;
+    if (coil >= 0 && coil < 1) shown.justAbove++;
+  }
+  expect(Math.min(shown.frost, shown.above, shown.justAbove)).toBeGreaterThan(5);
+});
