@@ -178,7 +178,7 @@ describe('a batch of ten thousand homes, seven of them bad', () => {
     expect(texts).toEqual([
       ["data/demo/bad.csv:9:6  house.heatLoss.value is 'a lot'; a heat loss lies between 1 and 100000 W/K"],
       ['data/demo/bad.csv:62:11  house.heatLoss.value is -5; a heat loss lies between 1 and 100000 W/K'],
-      ['data/demo/bad.csv:63  this row has 6 cells, the names of the columns are 4'],
+      ['data/demo/bad.csv:63  cells in this row: 6; names of columns: 4'],
       [
         expect.stringMatching(
           /^data\/demo\/lean.yaml:10:9 {2}flowTemperature.flow is 50 °C; it lies above the return temperature \(60 °C\)/,

@@ -45,7 +45,7 @@ describe('check', () => {
     const wrong = await run(folder, 'check', 'homes.csv', 'rows.csv');
     expect(wrong.code).toBe(2);
     expect(wrong.stderr).toContain("homes.csv:1:6  column 'house.heatLos.value' is no place in a scenario");
-    expect(wrong.stderr).toContain('rows.csv:3  this row has 1 cells, the names of the columns are 2');
+    expect(wrong.stderr).toContain('rows.csv:3  cells in this row: 1; names of columns: 2');
     expect(wrong.stderr).toContain('rows.csv:4  this row has 3 cells');
   });
 

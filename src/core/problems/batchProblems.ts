@@ -43,7 +43,7 @@ export const batchProblems = {
     cure: 'write a row for each home below the names of the columns',
   },
   'batch.row-length': {
-    says: 'this row has {found} cells, the names of the columns are {allowed}',
+    says: 'cells in this row: {found}; names of columns: {allowed}',
     cure: 'look for a delimiter too many, or put a text that holds one in quotes',
   },
   'batch.open-quote': {

@@ -156,7 +156,7 @@ export const scenarioProblems = {
     cure: 'state all prices in one currency',
   },
   'scenario.unknown-kind': {
-    says: 'this is no scenario, unit, tariff, read settings, weather or price file: {found}',
+    says: 'this is no scenario, unit, tariff, plan, read settings, and no table that is read here: {found}',
     cure: 'compare it with the examples in docs/formats.md',
   },
   'house.opaque-loss': {

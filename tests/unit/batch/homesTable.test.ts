@@ -72,8 +72,8 @@ describe('the row of a home', () => {
   it('with too many or too few cells has that for its problem', () => {
     const { homes } = table('home,site.altitude\nA,1,2\nB\n');
     expect(homes.map(({ problems }) => problems.map(problemText))).toEqual([
-      [expect.stringMatching(/^homes.csv:2 {2}this row has 3 cells, the names of the columns are 2\n/)],
-      [expect.stringMatching(/^homes.csv:3 {2}this row has 1 cells/)],
+      [expect.stringMatching(/^homes.csv:2 {2}cells in this row: 3; names of columns: 2\n/)],
+      [expect.stringMatching(/^homes.csv:3 {2}cells in this row: 1;/)],
     ]);
   });
 

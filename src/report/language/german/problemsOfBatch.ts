@@ -49,7 +49,7 @@ export const problemsOfBatch: Readonly<Record<keyof typeof batchProblems, Proble
     cure: 'schreiben Sie unter die Namen der Spalten eine Zeile je Haus',
   },
   'batch.row-length': {
-    says: 'diese Zeile hat {found} Zellen, die Namen der Spalten sind {allowed}',
+    says: 'Zellen in dieser Zeile: {found}; Namen von Spalten: {allowed}',
     cure: 'suchen Sie ein überzähliges Trennzeichen, oder setzen Sie einen Text, der eines enthält, in Anführungszeichen',
   },
   'batch.open-quote': {

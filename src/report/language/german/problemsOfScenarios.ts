@@ -180,7 +180,7 @@ export const problemsOfScenarios: Readonly<Record<keyof typeof scenarioProblems,
     cure: 'geben Sie alle Preise in einer Währung an',
   },
   'scenario.unknown-kind': {
-    says: 'dies ist weder Szenario, Gerät, Tarif, Leseangabe noch Wetter- oder Preisdatei: {found}',
+    says: 'dies ist weder Szenario, Gerät, Tarif, Plan, Leseangabe noch eine Tabelle, die hier gelesen wird: {found}',
     cure: 'vergleichen Sie es mit den Beispielen in docs/formats.md',
   },
   'house.opaque-loss': {
