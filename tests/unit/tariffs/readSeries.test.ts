@@ -36,6 +36,12 @@ describe('values over time of any kind', () => {
     ]);
   });
 
+  test('may be the least and the most that is possible', () => {
+    const { series, problems } = read(lines('2025-01-01T00:00,0', '2025-01-01T00:15,10000'));
+    expect(problems).toEqual([]);
+    expect(series?.values).toEqual(Float64Array.of(0, 10));
+  });
+
   test.each([
     [
       'a step that is too long',
