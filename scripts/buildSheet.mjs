@@ -5,7 +5,6 @@ import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import { build } from 'vite';
 import { viteSingleFile } from 'vite-plugin-singlefile';
-import { packTable } from './packTable.mjs';
 
 const root = fileURLToPath(new URL('../web', import.meta.url));
 const dist = fileURLToPath(new URL('../dist', import.meta.url));
@@ -15,16 +14,6 @@ const chartStyle = /`([\s\S]*)`/.exec(
   readFileSync(new URL('../src/report/charts/chartStyle.ts', import.meta.url), 'utf8'),
 )[1];
 const page = `${dist}/sheet.html`;
-
-/** `…csv?packed` is the table in little room. */
-const packed = {
-  name: 'packed-tables',
-  enforce: 'pre',
-  load(id) {
-    const file = id.replace(/\?packed$/, '');
-    return file === id ? undefined : `export default ${JSON.stringify(packTable(readFileSync(file, 'utf8')))}`;
-  },
-};
 
 const chartLook = {
   name: 'chart-style',
@@ -40,8 +29,8 @@ await build({
   configFile: false,
   logLevel: 'error',
   ...jsx,
-  plugins: [packed, chartLook, viteSingleFile({ removeViteModuleLoader: true })],
-  worker: { format: 'iife', plugins: () => [packed] },
+  plugins: [chartLook, viteSingleFile({ removeViteModuleLoader: true })],
+  worker: { format: 'iife' },
   build: {
     outDir: `${dist}/sheet`,
     emptyOutDir: true,

@@ -1,5 +1,6 @@
-import { DateTime } from 'luxon';
+import { MINUTES_PER_DAY } from '../../src/core/civilDate.ts';
 import { HOURS_PER_DAY } from '../../src/core/constants.ts';
+import { zoneOffsets } from '../../src/core/zoneOffsets.ts';
 import { persistentNoise, smoothHours } from './persistentNoise.ts';
 import { seededDraws } from './seededDraws.ts';
 import type { TownWeather } from './townWeather.ts';
@@ -50,11 +51,13 @@ export function inventPrices(weather: TownWeather, seed: string): HalfHourlyPric
   const length = 2 * weather.temperature.length;
   const wind = smoothHours(persistentNoise(draws, length / HALF_HOURS_OF_DAY, 0.6));
   const noise = persistentNoise(draws, length, 0.7);
+  const civilMinutes = civilMinutesOf(length);
   const price = new Float64Array(length);
   for (let i = 0; i < length; i++) {
     const hour = Math.floor(i / 2);
-    const civil = DateTime.fromMillis(START + i * HALF_HOUR, { zone: ZONE });
-    const weekend = civil.weekday > 5;
+    const civil = civilMinutes[i];
+    // 1 January 1970 was a Thursday
+    const weekend = (Math.floor(civil / MINUTES_PER_DAY) + 3) % 7 > 4;
     const weatherShare =
       market.coldExtra * Math.max(0, 3 - weather.temperature[hour]) -
       market.sunDiscount * radiationOfHalfHour(weather.globalRadiation, i) -
@@ -62,12 +65,22 @@ export function inventPrices(weather: TownWeather, seed: string): HalfHourlyPric
     const perMegawattHour =
       market.mean +
       season(hour) +
-      shapeOfDay(civil.hour + civil.minute / 60 + 0.25, weekend) +
+      shapeOfDay((civil % MINUTES_PER_DAY) / 60 + 0.25, weekend) +
       weatherShare +
       5 * noise[i];
     price[i] = Math.max(market.least, perMegawattHour) / 1000;
   }
   return { start: START, price };
+}
+
+/** Civil time at the begin of each half-hour, minutes as if its clock were UTC. */
+function civilMinutesOf(length: number): number[] {
+  const minuteOf = (i: number) => (START + i * HALF_HOUR) / 60_000;
+  const spans = zoneOffsets(ZONE, minuteOf(0), minuteOf(length)) ?? [];
+  return Array.from({ length }, (_, i) => {
+    const minute = minuteOf(i);
+    return minute + (spans.findLast(({ fromMinute }) => fromMinute <= minute)?.offsetMinutes ?? 0);
+  });
 }
 
 function season(hour: number): number {

@@ -5,6 +5,7 @@ import { seasonalFactors } from '../sim/seasonalFactors.ts';
 import type { EnergyTotals } from '../sim/totals.ts';
 import type { BillSums } from '../tariffs/bill.ts';
 import { comparisonDocument } from './comparisonDocument.ts';
+import { assumptionNote, warningNote } from './englishNotes.ts';
 import type { ResultDocument } from './resultSchema.ts';
 import { weatherLines } from './weatherLines.ts';
 
@@ -57,8 +58,8 @@ export function resultDocument(answer: Answer, version: string): ResultDocument 
       heatLossPerArea: perArea(answer.heatLoss, scenario.house.floorArea),
       degreeDayBase: answer.degreeDays.base,
     },
-    assumptions: answer.assumptions.map(({ path, text }) => ({ path, text })),
-    warnings: answer.warnings.map(({ code, text, remedy }) => ({ code, text, remedy })),
+    assumptions: answer.assumptions.map(assumptionNote),
+    warnings: answer.warnings.map(warningNote),
     weather: { file: loaded.weather.file, ...weatherLines(loaded.weather.recognised) },
     inputs: loaded.inputs.map(({ file, role, sha256 }) => ({ file, role, sha256 })),
   };

@@ -5,6 +5,7 @@ import { outletHeld } from '../scenario/season/outletsOf.ts';
 import type { CaseRating, MapRating, SeasonAnswer, SeasonRating } from '../scenario/season/seasonAnswer.ts';
 import type { SeasonBinResult } from '../sim/season/seasonalSum.ts';
 import { standardSeasons } from '../weather/seasonBins.ts';
+import { assumptionNote, warningNote } from './englishNotes.ts';
 import type { SeasonDocument, SeasonEntry } from './seasonSchema.ts';
 
 /**
@@ -20,8 +21,8 @@ export function seasonDocument(answer: SeasonAnswer, version: string): SeasonDoc
     heatPumpUnit: answer.unitName,
     reversible: answer.reversible,
     seasons: answer.seasons.map((season) => entryOf(season, answer.reversible)),
-    warnings: answer.warnings.map(({ code, text, remedy }) => ({ code, text, remedy })),
-    assumptions: answer.assumptions.map(({ path, text }) => ({ path, text })),
+    warnings: answer.warnings.map((warning) => ('problem' in warning ? warningNote(warning) : { ...warning })),
+    assumptions: answer.assumptions.map((each) => ('used' in each ? assumptionNote(each) : { ...each })),
     inputs: answer.inputs.map(({ file, role, sha256 }) => ({ file, role, sha256 })),
   };
 }

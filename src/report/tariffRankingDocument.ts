@@ -1,5 +1,6 @@
 import type { Answer } from '../scenario/answer/answer.ts';
 import type { Neighbours, RankedTariff, TariffRanking } from '../scenario/answer/rankTariffs.ts';
+import { assumptionNote, warningNote } from './englishNotes.ts';
 import type { TariffRankingDocument } from './tariffRankingSchema.ts';
 
 type Entry = TariffRankingDocument['rankings'][number];
@@ -31,8 +32,8 @@ export function tariffRankingDocument(
       tariffs: tariffs.map((ranked) => entryOf(ranked, tariffs)),
       changesOfPlace: neighbours.map(changeOf),
     })),
-    warnings: answer.warnings.map(({ code, text, remedy }) => ({ code, text, remedy })),
-    assumptions: answer.assumptions.map(({ path, text }) => ({ path, text })),
+    warnings: answer.warnings.map(warningNote),
+    assumptions: answer.assumptions.map(assumptionNote),
     inputs: loaded.inputs.map(({ file, role, sha256 }) => ({ file, role, sha256 })),
   };
 }

@@ -1,3 +1,4 @@
+import type { Quantity } from '../weather/read/quantities.ts';
 import type { Recognised } from '../weather/read/readWeather.ts';
 
 /** How a weather file was understood, as plain data. What the file does not settle is left out. */
@@ -13,7 +14,7 @@ export interface WeatherLines {
   /** All of it in sentences, without their full stops. */
   readonly recognised: string[];
   /** What was mended, a column each. */
-  readonly repairs: { quantity: string; hours: number; longest: number; held: number }[];
+  readonly repairs: { quantity: Quantity; hours: number; longest: number; held: number }[];
 }
 
 /** What a reader of weather recognised and mended, for a document. */

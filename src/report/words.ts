@@ -1,3 +1,5 @@
+import { englishCommon } from './language/english/common.ts';
+
 /** Figures of a sentence, already written with their units. */
 type Said = Readonly<Record<string, string>>;
 
@@ -6,38 +8,25 @@ type Said = Readonly<Record<string, string>>;
  */
 export const english = {
   of: 'Unit',
-  months: ['January', 'February', 'March', 'April', 'May', 'June', 'July', 'August', 'September', 'October'].concat(
-    'November',
-    'December',
-  ),
-  year: 'Year',
+  months: englishCommon.months,
+  year: englishCommon.year,
   headings: {
     costs: 'Cost of a year on each tariff',
     comparison: (tariff: string) => `Against the boiler, on ${tariff}`,
     months: 'Month by month, kWh',
     hoursOfDay: (unit: string) => `What one kWh more costs by the hour of the day, in the mean of the year${unit}`,
-    warnings: 'Look at this before you sign',
-    assumptions: 'Assumed, because no file says otherwise',
+    warnings: englishCommon.beforeYouSign,
+    assumptions: englishCommon.assumed,
     weather: 'How the weather file was understood',
     inputs: 'Files this rests on (beginning of their SHA-256)',
   },
   columns: {
-    tariff: 'Tariff',
-    energy: 'Energy',
-    standing: 'Standing',
-    demand: 'Demand',
+    ...englishCommon.columns,
+    ...englishCommon.monthColumns,
     taxes: 'Taxes',
-    credits: 'Credits',
     bill: 'Bill',
-    household: 'Household alone',
-    heating: 'Heating',
-    boiler: 'Boiler',
-    saving: 'Saved',
-    month: 'Month',
+    month: englishCommon.month,
     need: 'Need',
-    heatPumpHeat: 'Heat pump heat',
-    backupHeat: 'Backup heat',
-    electricity: 'Electricity',
     factor: 'H4',
   },
   heatingByHour: 'Heating takes',
@@ -56,7 +45,7 @@ export const english = {
 
   backup: ({ hours, heat }: Said) => `The backup would run in ${hours} hours and give ${heat}`,
   backupForWater: (heat: string) => `, ${heat} of it for hot water`,
-  noBackup: 'The backup would never run',
+  noBackup: englishCommon.noBackup,
   unmet: (heat: string) => `; ${heat} that the rooms need would be missing.`,
   lessThanOne: 'less than 1 kWh',
   noUnmet: ', and no heat would be missing.',

@@ -40,8 +40,7 @@ const carbons = new KeptKind<ReturnType<typeof carbonFactorsOf>>(64);
 /**
  * Reads tariffs, household and carbon factors of a scenario, and lays them on its year.
  *
- * @param clock civil time of the year; without it the files are checked all the same
- * @param further tariff files to compare beside those of the scenario, as the user gives them
+ * @param laidOn the year it is laid on
  */
 export function moneyOf(yaml: YamlFile, entries: MoneyEntries, files: InputFiles, laidOn: LaidOn): LoadedMoney {
   const { kept } = files;
@@ -52,7 +51,9 @@ export function moneyOf(yaml: YamlFile, entries: MoneyEntries, files: InputFiles
 
 /** Where the money of a scenario is laid. */
 interface LaidOn {
+  /** Civil time of the year; without it the files are checked all the same. */
   readonly clock: CivilClock | undefined;
+  /** Tariff files to compare beside those of the scenario, as the user gives them. */
   readonly further: readonly string[];
 }
 

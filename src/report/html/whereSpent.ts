@@ -66,7 +66,13 @@ export function whereSpent(input: ReportInput): Markup {
     title: said.title,
     chart: densityField({
       ...{ id: 'where-spent', title: said.title, description: says, cells, cellWidth: CELL, cellHeight: CELL },
-      ...{ contours: copField(answer.plan.unitOnWeather.unit.full, xRange, yRange), levels: COP_LEVELS, points, xRange, yRange },
+      ...{
+        contours: copField(answer.plan.unitOnWeather.unit.full, xRange, yRange),
+        levels: COP_LEVELS,
+        points,
+        xRange,
+        yRange,
+      },
       written: figures.number,
       ...{ xTitle: said.outdoor, yTitle: said.flow },
     }),

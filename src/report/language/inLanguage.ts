@@ -1,7 +1,7 @@
 import { englishMessages } from './english/messages.ts';
-import { english, type ReportWords } from './english.ts';
+import { english, type ReportWords } from './english/report.ts';
 import { germanMessages } from './german/messages.ts';
-import { german } from './german.ts';
+import { german } from './german/report.ts';
 import type { Language } from './languages.ts';
 import { type LocalFigures, localFigures } from './localFigures.ts';
 import type { Messages } from './messages.ts';

@@ -7,7 +7,9 @@ import type { YearPlan } from '../../sim/yearPlan.ts';
 import type { Bill } from '../../tariffs/bill.ts';
 import type { LoadedScenario } from '../loadScenario.ts';
 import type { LoadedTariff } from '../loadTariffs.ts';
+import type { Assumption } from './assumption.ts';
 import type { Comparison } from './comparison.ts';
+import type { Warning } from './warning.ts';
 
 /** One tariff: the whole bill, and the heating's part of it beside the boiler's on the same tariff. */
 export interface TariffCost {
@@ -36,22 +38,6 @@ export interface TariffCost {
 
 /** Carbon of a year, kg; or why it is not known. */
 export type Carbon = number | 'no factor' | 'no boiler';
-
-/** A kind of thing that an assessor should look at before signing. */
-export interface Warning {
-  readonly code: string;
-  /** What was seen, with its figure and unit. */
-  readonly text: string;
-  /** What usually helps. */
-  readonly remedy: string;
-}
-
-/** Something the result rests on. */
-export interface Assumption {
-  /** Place in the scenario or unit file, or the name of a rule of the model. */
-  readonly path: string;
-  readonly text: string;
-}
 
 /** Everything that was found for one scenario, before it is printed or written. */
 export interface Answer {

@@ -2,74 +2,68 @@ import { type BoilerFuel, carbonFactorOf } from '../../compare/fuel.ts';
 import type { YearPlan } from '../../sim/yearPlan.ts';
 import type { DefaultUsed } from '../entries/defaultsUsed.ts';
 import type { LoadedScenario } from '../loadScenario.ts';
-import type { Assumption } from './answer.ts';
+import type { Assumption, DefaultAssumption, RuleAssumption } from './assumption.ts';
 
 /** What the result rests on: every default that was used, and the rules of the model that filled a gap. */
 export function assumptionsOf(loaded: LoadedScenario, plan: YearPlan): Assumption[] {
-  return [...loaded.defaults.map(asAssumption), ...ofModel(loaded, plan), ...ofMoney(loaded)];
+  return [...loaded.defaults.map(defaultAssumption), ...ofModel(loaded, plan), ...ofMoney(loaded)];
 }
 
 /** A default that was used, as something the result rests on. */
-export function asAssumption({ path, value, unit, says }: DefaultUsed): Assumption {
-  return { path, text: `${String(value)}${unit === undefined ? '' : ` ${unit}`}. ${says}`.trimEnd() };
+export function defaultAssumption(used: DefaultUsed): DefaultAssumption {
+  return { path: used.path, code: 'default', used };
 }
 
-function ofModel(loaded: LoadedScenario, plan: YearPlan): Assumption[] {
+function ofModel(loaded: LoadedScenario, plan: YearPlan): RuleAssumption[] {
   const { scenario, weather, unit } = loaded;
-  const list: Assumption[] = [];
-  const add = (path: string, text: string) => list.push({ path, text });
+  const list: RuleAssumption[] = [];
   if (weather.series.humidity === undefined) {
-    add('weather.file', `The file has no humidity: ${scenario.weather.relativeHumidity} % in every hour.`);
+    const values = { humidity: scenario.weather.relativeHumidity };
+    list.push({ path: 'weather.file', code: 'weather.no-humidity', values });
   }
   if (weather.series.pressure === undefined) {
-    add('weather.file', `The file has no pressure: the standard atmosphere at ${scenario.site.altitude} m.`);
+    list.push({ path: 'weather.file', code: 'weather.no-pressure', values: { altitude: scenario.site.altitude } });
   }
   if (scenario.house.need.model === 'degreeHours' && scenario.house.need.baseTemperature === undefined) {
-    add(
-      'house.need',
-      'The base temperature follows from set point, gains and heat loss; the house stores a day’s sun.',
-    );
+    list.push({ path: 'house.need', code: 'house.base-from-gains', values: {} });
   }
   if (unit.unit.limits.highestFlow === undefined) {
-    add('limits.highestFlow', `${plan.unitOnWeather.highestFlow[0]} °C, the highest flow of the unit’s map.`);
+    const values = { flow: plan.unitOnWeather.highestFlow[0] };
+    list.push({ path: 'limits.highestFlow', code: 'limits.flow-of-map', values });
   }
   if (unit.unit.limits.lowestOutdoorTemperature === undefined) {
-    add('limits.lowestOutdoorTemperature', 'None is entered: the unit runs however cold it is.');
+    list.push({ path: 'limits.lowestOutdoorTemperature', code: 'limits.no-lowest-outdoor', values: {} });
   }
   if (scenario.circulation.waterContent === undefined) {
-    add(
-      'circulation.waterContent',
-      `${plan.cycleWater.toFixed(0)} L, by rule of thumb (20 L a kW, at least 100 L; common practice, no source). Only the estimate of starts depends on it.`,
-    );
+    const values = { water: plan.cycleWater };
+    list.push({ path: 'circulation.waterContent', code: 'circulation.water-by-rule', values });
   }
   if (scenario.hotWater?.draw.given === 'litres' && scenario.hotWater.draw.shares === undefined) {
-    add('hotWater.draw.shares', 'Spread over the day as in tapping profile M.');
+    list.push({ path: 'hotWater.draw.shares', code: 'hot-water.profile-of-day', values: {} });
   }
-  if (scenario.backup === undefined) add('backup', 'There is no backup heater.');
+  if (scenario.backup === undefined) list.push({ path: 'backup', code: 'backup.none', values: {} });
   return list;
 }
 
 /** What the bills and the comparison with the boiler rest on. */
-function ofMoney({ scenario, tariffs }: LoadedScenario): Assumption[] {
+function ofMoney({ scenario, tariffs }: LoadedScenario): RuleAssumption[] {
   const { household, boiler, backup, hotWater, carbon } = scenario;
-  const list: Assumption[] = [];
-  const add = (path: string, text: string) => list.push({ path, text });
+  const list: RuleAssumption[] = [];
   if (household === undefined && tariffs.length > 0) {
-    add('household', 'No electricity of a household is entered: the bill is that of the heating alone.');
+    list.push({ path: 'household', code: 'household.none', values: {} });
   }
   if (household?.given === 'profile' && household.shares === undefined) {
-    add('household.shares', 'Even over the hours of the day.');
+    list.push({ path: 'household.shares', code: 'household.even', values: {} });
   }
   if (backup?.mode.kind === 'cheapest' && tariffs.length > 1) {
-    add(
-      'backup.mode',
-      'The first tariff drives the year; every further tariff has a run of its own, for its costs alone.',
-    );
+    list.push({ path: 'backup.mode', code: 'backup.first-tariff-drives', values: {} });
   }
   if (boiler !== undefined && hotWater !== undefined) {
-    if (boiler.cylinderLoss === undefined) add('boiler.cylinderLoss', 'That of the heat pump’s run.');
+    if (boiler.cylinderLoss === undefined) {
+      list.push({ path: 'boiler.cylinderLoss', code: 'boiler.cylinder-loss', values: {} });
+    }
     if (boiler.hotWaterEfficiency === undefined) {
-      add('boiler.hotWaterEfficiency', 'That for space heat, of a condensing boiler at its hottest return.');
+      list.push({ path: 'boiler.hotWaterEfficiency', code: 'boiler.hot-water-efficiency', values: {} });
     }
   }
   if (carbon === undefined) return list;
@@ -78,10 +72,10 @@ function ofMoney({ scenario, tariffs }: LoadedScenario): Assumption[] {
   return list;
 }
 
-function publishedFactor(path: string, fuel: BoilerFuel | undefined): Assumption[] {
+function publishedFactor(path: string, fuel: BoilerFuel | undefined): RuleAssumption[] {
   if (fuel === undefined || fuel.carbonFactor !== undefined) return [];
   const factor = carbonFactorOf(fuel);
   if (factor === undefined) return [];
-  const says = `Regulation (EU) 2018/2066, on ${fuel.calorificValue} calorific value.`;
-  return [{ path: `${path}.carbonFactor`, text: `${factor.toFixed(3)} kg/kWh. ${says}` }];
+  const { calorificValue } = fuel;
+  return [{ path: `${path}.carbonFactor`, code: 'fuel.published-factor', values: { factor, calorificValue } }];
 }

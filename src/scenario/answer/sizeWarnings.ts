@@ -2,7 +2,8 @@ import { polylineAt } from '../../core/polyline.ts';
 import { readMap } from '../../sim/heatPumpMap.ts';
 import { polylineOf } from '../prepare/prepareUnit.ts';
 import type { Scenario } from '../scenarioSchema.ts';
-import type { BareAnswer, Warning } from './answer.ts';
+import type { BareAnswer } from './answer.ts';
+import type { SeenWarning } from './warning.ts';
 
 /** Capacity at design conditions over design load: outside these the unit is far too small or too large (common practice, no source). */
 const FAR_UNDER = 0.75;
@@ -12,45 +13,20 @@ const FAR_OVER = 1.5;
  * Whether the unit fits the design load: its full capacity at the design temperature, at the flow that the emitters ask for
  * there or the highest that the unit gives, whichever is lower. Without frost, as the map has it.
  */
-export function sizeWarnings({ plan, loaded, designLoad }: BareAnswer): Warning[] {
+export function sizeWarnings({ plan, loaded, designLoad }: BareAnswer): SeenWarning[] {
   const { flowTemperature, house } = loaded.scenario;
   const outdoor = house.design.outdoorTemperature;
   const { unit } = plan.unitOnWeather;
-  if (outdoor < unit.lowestOutdoorTemperature) {
-    return [
-      {
-        code: 'size.cannot-run',
-        text: `The unit cannot run at the design temperature: ${outdoor} °C is colder than its lowest, ${unit.lowestOutdoorTemperature} °C.`,
-        remedy: `The backup must then carry the whole design load of ${designLoad.toFixed(1)} kW; else take a unit that runs in such cold.`,
-      },
-    ];
-  }
+  const lowest = unit.lowestOutdoorTemperature;
+  if (outdoor < lowest) return [{ code: 'size.cannot-run', values: { outdoor, lowest, designLoad } }];
   const asked = designFlow(flowTemperature, outdoor);
   const flow = Math.min(asked, polylineAt(unit.highestFlow, outdoor));
   const point = new Float64Array(2);
   readMap(unit.full, outdoor, flow, point, 0);
-  const share = point[0] / designLoad;
-  const limited = flow < asked ? ', the highest it gives there' : '';
-  const figures = `${point[0].toFixed(1)} kW at ${outdoor} °C and ${Number(flow.toFixed(1))} °C flow${limited}, the design load is ${designLoad.toFixed(1)} kW`;
-  if (share < FAR_UNDER) {
-    return [
-      {
-        code: 'size.far-under',
-        text: `The unit is far smaller than the house needs: ${figures}.`,
-        remedy: 'Take the next size, or make sure that backup power and cost are accepted.',
-      },
-    ];
-  }
-  if (share > FAR_OVER) {
-    return [
-      {
-        code: 'size.far-over',
-        text: `The unit is far larger than the house needs: ${figures}.`,
-        remedy: 'A smaller unit starts and stops less and costs less.',
-      },
-    ];
-  }
-  return [];
+  const [capacity] = point;
+  const values = { capacity, outdoor, flow, limited: flow < asked, designLoad };
+  if (capacity / designLoad < FAR_UNDER) return [{ code: 'size.far-under', values }];
+  return capacity / designLoad > FAR_OVER ? [{ code: 'size.far-over', values }] : [];
 }
 
 /** The flow that is asked for at the design temperature, °C. */

@@ -1,8 +1,8 @@
-import { type Problem, visibleText } from '../../core/problem.ts';
-import { problemCure, problemSentence } from '../../core/problemText.ts';
-import type { BareAnswer, Warning } from './answer.ts';
+import type { Problem } from '../../core/problem.ts';
+import type { BareAnswer } from './answer.ts';
 import { hotWaterCautions } from './hotWaterCautions.ts';
 import { sizeWarnings } from './sizeWarnings.ts';
+import type { LoadingWarning, SeenWarning, Warning } from './warning.ts';
 
 /** Seasonal factors that homes have shown lie between these; outside, an entry is more likely wrong than the house. */
 const LOWEST_PLAUSIBLE_FACTOR = 1.8;
@@ -30,7 +30,7 @@ function oncePerColumn<C extends object>(of: (column: C) => number): (column: C)
   };
 }
 
-/** What an assessor should look at before signing, each with its cause and a usual remedy. */
+/** What an assessor should look at before signing, as kinds and figures. */
 export function warningsOf(answer: BareAnswer, found: readonly Problem[]): Warning[] {
   return [
     ...found.map(fromLoading),
@@ -43,100 +43,46 @@ export function warningsOf(answer: BareAnswer, found: readonly Problem[]): Warni
 }
 
 /** A problem of loading as something to look at. */
-export function fromLoading(problem: Problem): Warning {
-  const place = [problem.file, problem.line].filter((part) => part !== undefined).join(':');
-  return {
-    code: problem.code,
-    text: `${visibleText(place)}: ${problemSentence(problem)}`,
-    remedy: problemCure(problem),
-  };
+export function fromLoading(problem: Problem): LoadingWarning {
+  return { code: problem.code, problem };
 }
 
-function performanceWarnings({ factors, totals }: BareAnswer): Warning[] {
-  const list: Warning[] = [];
-  const { annual, hours } = totals;
+function performanceWarnings({ factors, totals }: BareAnswer): SeenWarning[] {
+  const list: SeenWarning[] = [];
+  const { annual, hours, starts } = totals;
   const { h4 } = factors;
   if (h4 !== 'no heat' && (h4 < LOWEST_PLAUSIBLE_FACTOR || h4 > HIGHEST_PLAUSIBLE_FACTOR)) {
-    list.push({
-      code: 'result.seasonal-factor',
-      text: `The seasonal factor H4 of ${h4.toFixed(2)} lies outside ${LOWEST_PLAUSIBLE_FACTOR}–${HIGHEST_PLAUSIBLE_FACTOR}, what homes have shown.`,
-      remedy: 'Look at the flow temperatures, the COP table and the pump power for a slip of the pen.',
-    });
+    const values = { factor: h4, least: LOWEST_PLAUSIBLE_FACTOR, most: HIGHEST_PLAUSIBLE_FACTOR };
+    list.push({ code: 'result.seasonal-factor', values });
   }
   const backup = annual.backupSpaceHeat + annual.backupWaterHeat;
   const heat = annual.heatPumpSpaceHeat + annual.heatPumpWaterHeat + backup;
   if (heat > 0 && backup > MUCH_BACKUP * heat) {
-    list.push({
-      code: 'result.much-backup',
-      text: `The backup gives ${((100 * backup) / heat).toFixed(0)} % of the heat, in ${hours.backup} hours.`,
-      remedy: 'A larger unit, larger emitters for a lower flow, or less heat loss; check the switch temperature.',
-    });
+    list.push({ code: 'result.much-backup', values: { share: backup / heat, hours: hours.backup } });
   }
   if (annual.unmetHeat > 0.001 * annual.spaceHeatNeed && annual.unmetHeat > 1) {
-    list.push({
-      code: 'result.unmet-heat',
-      text: `${annual.unmetHeat.toFixed(0)} kWh of space heat could not be given (${hours.unmet} hours): rooms would get cold.`,
-      remedy: 'More backup, a larger unit, or less heat loss. Do not sign a size that leaves the house cold.',
-    });
+    list.push({ code: 'result.unmet-heat', values: { heat: annual.unmetHeat, hours: hours.unmet } });
   }
-  if (totals.starts > MANY_STARTS) {
-    list.push({
-      code: 'result.many-starts',
-      text: `About ${(Math.round(totals.starts / 100) * 100).toFixed(0)} compressor starts a year (an estimate).`,
-      remedy: 'A unit with a lower lowest level, or more water in the circuit that it works on.',
-    });
-  }
+  if (starts > MANY_STARTS) list.push({ code: 'result.many-starts', values: { starts } });
   return list;
 }
 
-function mapWarnings({ totals, plan }: BareAnswer): Warning[] {
-  const list: Warning[] = [];
+function mapWarnings({ totals, plan }: BareAnswer): SeenWarning[] {
+  const list: SeenWarning[] = [];
   const { hours } = totals;
   if (hours.outsideMap > MUCH_OUTSIDE * Math.max(1, hours.heating)) {
-    list.push({
-      code: 'map.outside',
-      text: `In ${hours.outsideMap} hours the unit ran colder, warmer or hotter than its table reaches.`,
-      remedy: 'Ask the maker for the missing rows or columns; the values there are extended by rule.',
-    });
+    list.push({ code: 'map.outside', values: { hours: hours.outsideMap } });
   }
-  if (hours.flowAboveLimit > 0) {
-    list.push({
-      code: 'map.flow-above-limit',
-      text: `In ${hours.flowAboveLimit} hours the rooms ask for a higher flow than the unit can give.`,
-      remedy: 'Larger emitters or a lower heating curve; the backup lifts the rest.',
-    });
-  }
+  if (hours.flowAboveLimit > 0) list.push({ code: 'map.flow-above-limit', values: { hours: hours.flowAboveLimit } });
   const tooCold = hoursMarked(plan.unitOnWeather.tooCold);
-  if (tooCold > 0) {
-    list.push({
-      code: 'map.too-cold',
-      text: `In ${tooCold} hours it is colder than the unit’s lowest outdoor temperature: it stands still.`,
-      remedy: 'Make sure that the backup carries the house alone in those hours.',
-    });
-  }
+  if (tooCold > 0) list.push({ code: 'map.too-cold', values: { hours: tooCold } });
   return list;
 }
 
-function weatherWarnings({ plan, loaded }: BareAnswer): Warning[] {
+function weatherWarnings({ plan, loaded }: BareAnswer): SeenWarning[] {
   const coldest = lowestOf(plan.weather.trailingMeanTemperature);
   const design = loaded.scenario.house.design.outdoorTemperature;
-  if (coldest > design + WEATHER_MARGIN) {
-    return [
-      {
-        code: 'weather.milder-than-design',
-        text: `The coldest day of the weather has ${coldest.toFixed(1)} °C, the design temperature is ${design} °C: the year is milder than the design.`,
-        remedy: 'Fit for energy, not for sizing: do not conclude from it that a smaller unit is enough.',
-      },
-    ];
-  }
-  if (coldest < design - WEATHER_MARGIN) {
-    return [
-      {
-        code: 'weather.colder-than-design',
-        text: `The coldest day of the weather has ${coldest.toFixed(1)} °C, the design temperature is ${design} °C: the year is colder than the design.`,
-        remedy: 'Check the place of the weather file and the design temperature.',
-      },
-    ];
-  }
+  if (coldest > design + WEATHER_MARGIN) return [{ code: 'weather.milder-than-design', values: { coldest, design } }];
+  if (coldest < design - WEATHER_MARGIN) return [{ code: 'weather.colder-than-design', values: { coldest, design } }];
   return [];
 }

@@ -2,7 +2,8 @@ import type { OutletPoints } from '../../sim/season/outletTemperature.ts';
 import type { SeasonResult } from '../../sim/season/seasonalSum.ts';
 import type { Application, SeasonCase } from '../../sim/season/seasonCase.ts';
 import type { SeasonName } from '../../weather/seasonBins.ts';
-import type { Assumption, Warning } from '../answer/answer.ts';
+import type { DefaultAssumption } from '../answer/assumption.ts';
+import type { LoadingWarning } from '../answer/warning.ts';
 import type { InputRecord } from '../inputFiles.ts';
 import type { DeclaredSeason } from '../labelSchema.ts';
 import type { Comparison } from './compareSeason.ts';
@@ -40,12 +41,25 @@ export interface SeasonRating extends Rating {
   readonly comparison: Comparison;
 }
 
+/** What to look at before a label or a map is believed. */
+export interface SeasonWarning {
+  readonly code: string;
+  readonly text: string;
+  readonly remedy: string;
+}
+
+/** A rule that filled a gap of a label. */
+export interface SeasonRule {
+  readonly path: string;
+  readonly text: string;
+}
+
 /** The label check of a unit. */
 export interface SeasonAnswer {
   readonly unitName: string;
   readonly reversible: boolean;
   readonly seasons: readonly SeasonRating[];
-  readonly warnings: readonly Warning[];
-  readonly assumptions: readonly Assumption[];
+  readonly warnings: readonly (SeasonWarning | LoadingWarning)[];
+  readonly assumptions: readonly (SeasonRule | DefaultAssumption)[];
   readonly inputs: readonly InputRecord[];
 }

@@ -1,19 +1,22 @@
 import { standardSeasons } from '../../weather/seasonBins.ts';
-import type { Assumption } from '../answer/answer.ts';
-import { asAssumption } from '../answer/assumptions.ts';
+import type { DefaultAssumption } from '../answer/assumption.ts';
+import { defaultAssumption } from '../answer/assumptions.ts';
 import { shownNumber } from '../entries/allowedText.ts';
 import type { LoadedLabel } from './loadLabel.ts';
-import type { SeasonRating } from './seasonAnswer.ts';
+import type { SeasonRating, SeasonRule } from './seasonAnswer.ts';
 import { USUAL_DEGRADATION } from './undeclaredCase.ts';
 
 /** Defaults of a unit file that a season never looks at: the years of a house do. */
 const NOT_OF_SEASONS = ['cycling.', 'standbyPower', 'crankcase.'];
 
 /** What the rating rests on: the defaults that were used, and the rules that filled a gap. */
-export function seasonAssumptions(loaded: LoadedLabel, seasons: readonly SeasonRating[]): Assumption[] {
+export function seasonAssumptions(
+  loaded: LoadedLabel,
+  seasons: readonly SeasonRating[],
+): (SeasonRule | DefaultAssumption)[] {
   const { label } = loaded.unit.unit;
   const used = loaded.defaults.filter(({ path }) => !NOT_OF_SEASONS.some((start) => path.startsWith(start)));
-  const list = used.map(asAssumption);
+  const list: (SeasonRule | DefaultAssumption)[] = used.map(defaultAssumption);
   if (label === undefined) {
     list.push({ path: 'label.reversible', text: 'false, as no label is entered: the unit is taken to heat only.' });
   }
@@ -27,9 +30,9 @@ export function seasonAssumptions(loaded: LoadedLabel, seasons: readonly SeasonR
   return [...list, ...seasons.flatMap((season) => ofSeason(season, loaded))];
 }
 
-function ofSeason({ climate, application, declared, map }: SeasonRating, { unit }: LoadedLabel): Assumption[] {
+function ofSeason({ climate, application, declared, map }: SeasonRating, { unit }: LoadedLabel): SeasonRule[] {
   const path = `${climate} ${application} °C`;
-  const list: Assumption[] = [];
+  const list: SeasonRule[] = [];
   if (map === undefined) return list;
   const entered = unit.unit.label?.outlets.some((each) => each.climate === climate && each.application === application);
   if (!entered) {

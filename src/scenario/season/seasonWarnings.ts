@@ -1,18 +1,21 @@
 import type { Problem } from '../../core/problem.ts';
-import type { Warning } from '../answer/answer.ts';
+import type { LoadingWarning } from '../answer/warning.ts';
 import { fromLoading } from '../answer/warnings.ts';
 import { shownNumber } from '../entries/allowedText.ts';
 import type { Deviation } from './compareSeason.ts';
 import { LABEL_TOLERANCE, POINTS_TOLERANCE } from './compareSeason.ts';
 import { lowestPermitted } from './lowestPermitted.ts';
 import type { PointBesideMap } from './mapAtPoints.ts';
-import type { SeasonRating } from './seasonAnswer.ts';
+import type { SeasonRating, SeasonWarning } from './seasonAnswer.ts';
 
 /** Share of the season's heating hours above which reading outside the map weighs on the result. */
 const MUCH_OUTSIDE = 0.02;
 
 /** What to look at before the label is believed, or the map; what was odd in the file first. */
-export function seasonWarnings(seasons: readonly SeasonRating[], found: readonly Problem[]): Warning[] {
+export function seasonWarnings(
+  seasons: readonly SeasonRating[],
+  found: readonly Problem[],
+): (SeasonWarning | LoadingWarning)[] {
   return [
     ...found.map(fromLoading),
     ...seasons.flatMap((season) => [
@@ -29,9 +32,9 @@ function nameOf({ climate, application }: SeasonRating): string {
   return `${climate[0].toUpperCase()}${climate.slice(1)} climate, ${application} °C`;
 }
 
-function disagreements(season: SeasonRating): Warning[] {
+function disagreements(season: SeasonRating): SeasonWarning[] {
   const { map, points } = season.comparison;
-  const list: Warning[] = [];
+  const list: SeasonWarning[] = [];
   if (map !== undefined && !map.agrees) {
     list.push({
       code: 'season.map-off-label',
@@ -57,7 +60,7 @@ function figures({ of, against, found, expected, share }: Deviation): string {
 }
 
 /** Of points that do not fit: the one that lies farthest off the map, by COP or capacity. */
-function worstPoint(season: SeasonRating): Warning[] {
+function worstPoint(season: SeasonRating): SeasonWarning[] {
   const { map, points } = season.comparison;
   if (map?.agrees !== false && points?.agrees !== false) return [];
   const worst = farthestOff(season.pointsBesideMap);
@@ -86,7 +89,7 @@ function farthestOff(points: readonly PointBesideMap[]) {
 }
 
 /** By the label's own figure; where it gives none, by the points, else by the map. */
-function belowPermitted(season: SeasonRating): Warning[] {
+function belowPermitted(season: SeasonRating): SeasonWarning[] {
   const lowest = lowestPermitted(season);
   const { declared, points, map } = season;
   const efficiency = declared?.efficiency ?? points?.result.efficiency ?? map?.result.efficiency;
@@ -100,11 +103,11 @@ function belowPermitted(season: SeasonRating): Warning[] {
   ];
 }
 
-function extendedMap(season: SeasonRating): Warning[] {
+function extendedMap(season: SeasonRating): SeasonWarning[] {
   if (season.map === undefined) return [];
   const { hours, result } = season.map;
   const all = result.bins.reduce((sum, bin) => sum + bin.hours, 0);
-  const list: Warning[] = [];
+  const list: SeasonWarning[] = [];
   if (hours.belowLowestFlow > MUCH_OUTSIDE * all) {
     list.push({
       code: 'season.below-lowest-flow',

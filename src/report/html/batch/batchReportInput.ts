@@ -1,6 +1,6 @@
 import type { Criterion } from '../../../batch/ranking.ts';
 import type { BatchManifest } from '../../batchManifest.ts';
-import type { ReportWords } from '../../language/english.ts';
+import type { ReportWords } from '../../language/english/report.ts';
 import type { LocalFigures } from '../../language/localFigures.ts';
 import type { GatheredYears } from './gatheredYears.ts';
 

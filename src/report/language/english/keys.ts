@@ -18,6 +18,7 @@ export const englishKeys: Readonly<Record<string, string>> = {
   return: 'Return temperature',
   naturalGas: 'Natural gas',
   lpg: 'LPG',
+  stamp: 'Date and time',
   read: 'How to read it',
   unit: 'File of the unit',
   file: 'File',

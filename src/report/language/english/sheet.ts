@@ -1,3 +1,5 @@
+import { englishCommon } from './common.ts';
+
 /** Words of the sheet in English; those of the answer are the report's. */
 export const englishSheet = {
   title: 'The sheet',
@@ -17,6 +19,7 @@ export const englishSheet = {
   draftNone: 'No draft is kept in this browser.',
   draftFull: 'The files are too large for a draft: save them before you close the page.',
   refused: (names: string) => `Too large to be opened: ${names}.`,
+  unreadable: 'This browser does not hand over what was dropped: use “Open a folder” or “Open files”.',
   language: 'Language',
   entries: 'What the house is',
   parts: {
@@ -33,6 +36,7 @@ export const englishSheet = {
   assumed: (value: string) => `${value} is assumed`,
   leftOut: 'may be left out',
   choose: 'Choose …',
+  nothing: '– left out –',
   yes: 'Yes',
   no: 'No',
   add: (what: string) => `Add: ${what}`,
@@ -57,6 +61,11 @@ export const englishSheet = {
   },
   weatherLines: 'How the weather file is understood',
   weatherHead: 'Its first lines',
+  columns: 'Columns of the weather file',
+  columnsSay: 'The first rows of the file. Where a column was taken for something else, choose here what it holds.',
+  column: (n: number) => `Column ${n}`,
+  columnUse: (name: string) => `Column ${name} holds`,
+  unused: 'not used',
   answer: 'The answer',
   noAnswer: 'There is no answer yet: put these right first.',
   problems: 'To be put right',
@@ -68,7 +77,7 @@ export const englishSheet = {
   pickDay: 'Day of the year',
   pickHour: 'Hour',
   show: 'Explain this hour',
-  assumptions: 'Assumed, because no file says otherwise',
+  assumptions: englishCommon.assumed,
   whatIf: 'What if',
   whatIfSays:
     'Temperatures, heat loss and size run the year anew; prices scale what the kilowatt-hours cost, as the report does. A unit of another size keeps its COP. Below each figure stands its difference from the files.',

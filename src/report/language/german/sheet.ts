@@ -20,6 +20,8 @@ export const germanSheet: SheetWords = {
   draftNone: 'In diesem Browser liegt kein Entwurf.',
   draftFull: 'Die Dateien sind zu groß für einen Entwurf: vor dem Schließen sichern.',
   refused: (names) => `Zu groß zum Öffnen: ${names}.`,
+  unreadable:
+    'Dieser Browser gibt nicht heraus, was hereingezogen wurde: „Ordner öffnen“ oder „Dateien öffnen“ nehmen.',
   language: 'Sprache',
   entries: 'Was das Haus ist',
   parts: {
@@ -36,6 +38,7 @@ export const germanSheet: SheetWords = {
   assumed: (value) => `angenommen: ${value}`,
   leftOut: 'darf fehlen',
   choose: 'Wählen …',
+  nothing: '– weggelassen –',
   yes: 'Ja',
   no: 'Nein',
   add: (what) => `Hinzufügen: ${what}`,
@@ -60,6 +63,11 @@ export const germanSheet: SheetWords = {
   },
   weatherLines: 'Wie die Wetterdatei verstanden wird',
   weatherHead: 'Ihre ersten Zeilen',
+  columns: 'Spalten der Wetterdatei',
+  columnsSay: 'Die ersten Zeilen der Datei. Ist eine Spalte etwas anderes, hier wählen, was sie enthält.',
+  column: (n) => `Spalte ${n}`,
+  columnUse: (name) => `Spalte ${name} enthält`,
+  unused: 'nicht benutzt',
   answer: 'Die Antwort',
   noAnswer: 'Noch keine Antwort: erst dies richtigstellen.',
   problems: 'Richtigzustellen',

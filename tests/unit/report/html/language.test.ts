@@ -1,8 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { quotedWord } from '../../../../src/report/html/reportCommands.ts';
-import { english } from '../../../../src/report/language/english.ts';
-import { german } from '../../../../src/report/language/german.ts';
+import { english } from '../../../../src/report/language/english/report.ts';
+import { german } from '../../../../src/report/language/german/report.ts';
 import { localFigures } from '../../../../src/report/language/localFigures.ts';
 
 /** Every sentence of a language by its place; one with gaps is written with their names in them. */

@@ -1,12 +1,14 @@
 import { describe, expect, test } from 'vitest';
-import { asAssumption } from '../../../../src/scenario/answer/assumptions.ts';
+import { assumptionNote } from '../../../../src/report/englishNotes.ts';
+import { defaultAssumption } from '../../../../src/scenario/answer/assumptions.ts';
 import { sampleFiles } from '../sampleFiles.ts';
 import { type Change, changedAnswer, houseWith, unitWith } from './changedAnswer.ts';
 
 /** Texts of the assumptions at a path. */
 const saidAt = (path: string, changes: readonly Change[] = [], files: Record<string, string> = {}) =>
   changedAnswer(changes, files)
-    .assumptions.filter((assumption) => assumption.path === path)
+    .assumptions.map(assumptionNote)
+    .filter((assumption) => assumption.path === path)
     .map(({ text }) => text);
 
 const read: Change = ['house.yaml', 'stamps: begin }', 'stamps: begin }\n  relativeHumidity: 78'];
@@ -29,7 +31,8 @@ describe('what a result rests on', () => {
   });
 
   test('shows a default without a sentence by its value alone', () => {
-    expect(asAssumption({ file: 'house.yaml', path: 'backup.mode.kind', value: 'parallel', says: '' })).toEqual({
+    const used = { file: 'house.yaml', path: 'backup.mode.kind', value: 'parallel', says: '' };
+    expect(assumptionNote(defaultAssumption(used))).toEqual({
       path: 'backup.mode.kind',
       text: 'parallel.',
     });

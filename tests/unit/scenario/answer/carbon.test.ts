@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { assumptionNote } from '../../../../src/report/englishNotes.ts';
 import { answerOf, there } from './sampleAnswer.ts';
 
 const gas = 'boiler: { efficiency: 0.9, fuel: { kind: naturalGas, price: 0.1, calorificValue: net }, pumpPower: 60 }';
@@ -73,7 +74,7 @@ describe('the carbon of a year', () => {
   });
 
   test('names the published factors that it takes', () => {
-    const texts = answerOf({ sections: `carbon: { electricity: 0.3 }\n${gas}` }).assumptions;
+    const texts = answerOf({ sections: `carbon: { electricity: 0.3 }\n${gas}` }).assumptions.map(assumptionNote);
     expect(texts.find(({ path }) => path === 'boiler.fuel.carbonFactor')?.text).toBe(
       '0.202 kg/kWh. Regulation (EU) 2018/2066, on net calorific value.',
     );

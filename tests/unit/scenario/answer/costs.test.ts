@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { assumptionNote, warningNote } from '../../../../src/report/englishNotes.ts';
 import { newColumns } from '../../../../src/sim/columns.ts';
 import { simulateYear } from '../../../../src/sim/year.ts';
 import { bill } from '../../../../src/tariffs/bill.ts';
@@ -69,7 +70,10 @@ describe('the year on a tariff', () => {
   });
 
   test('names what it assumes of the household', () => {
-    const texts = (sections: string) => answerOf({ sections }).assumptions.map(({ path, text }) => `${path} ${text}`);
+    const texts = (sections: string) =>
+      answerOf({ sections })
+        .assumptions.map(assumptionNote)
+        .map(({ path, text }) => `${path} ${text}`);
     expect(texts('').join('\n')).toContain('household No electricity of a household is entered');
     expect(texts(profile).join('\n')).toContain('household.shares Even over the hours of the day.');
   });
@@ -102,13 +106,14 @@ describe('a hybrid that takes the cheaper source', () => {
   });
 
   test('says so', () => {
-    expect(answer.assumptions.find(({ path }) => path === 'backup.mode')?.text).toContain('a run of its own');
+    const notes = answer.assumptions.map(assumptionNote);
+    expect(notes.find(({ path }) => path === 'backup.mode')?.text).toContain('a run of its own');
   });
 
   test('warns of a further tariff that is priced by blocks alone', () => {
     const blocks = { 'b.yaml': 'name: Blocks\nblocks: { per: year, prices: [{ price: 0.3 }] }\n' };
     const { warnings } = answerOf({ hybrid: true, tariffs: '[tariff.yaml, b.yaml]', files: blocks });
-    const found = warnings.find(({ code }) => code === 'scenario.cheapest-needs-price');
+    const found = warnings.map(warningNote).find(({ code }) => code === 'scenario.cheapest-needs-price');
     expect(found?.text).toContain("the tariff 'Blocks' is priced by blocks alone");
     expect(found?.remedy).toContain('takes electricity as free');
   });

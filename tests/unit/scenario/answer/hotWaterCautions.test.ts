@@ -1,11 +1,12 @@
 import { describe, expect, test } from 'vitest';
+import { warningNote } from '../../../../src/report/englishNotes.ts';
 import { changedAnswer, houseWith } from './changedAnswer.ts';
 
 /** The cautions of the sample house with a cylinder whose entries are given. */
 function cautionsOf(entries: string, volume = 200) {
   const section = `hotWater:\n  volume: ${volume}\n  loss: { given: coefficient, value: 1.5 }\n${entries}`;
   const answer = changedAnswer([houseWith(section)]);
-  return { answer, cautions: answer.warnings.filter(({ code }) => code.startsWith('hot-water.')) };
+  return { answer, cautions: answer.warnings.map(warningNote).filter(({ code }) => code.startsWith('hot-water.')) };
 }
 
 const M = '  draw: { given: profile, profile: M }\n';

@@ -1,9 +1,12 @@
 import { describe, expect, test } from 'vitest';
+import { warningNote } from '../../../../src/report/englishNotes.ts';
 import { type Change, changedAnswer, heatLossOf, unitWith } from './changedAnswer.ts';
 
 /** The warnings of size of the sample house with changes: code, text and remedy. */
 function sizesOf(...changes: Change[]) {
-  return changedAnswer(changes).warnings.filter(({ code }) => code.startsWith('size.'));
+  return changedAnswer(changes)
+    .warnings.map(warningNote)
+    .filter(({ code }) => code.startsWith('size.'));
 }
 
 /*

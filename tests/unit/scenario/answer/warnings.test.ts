@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { warningNote } from '../../../../src/report/englishNotes.ts';
 import type { Answer } from '../../../../src/scenario/answer/answer.ts';
 import { sampleFiles } from '../sampleFiles.ts';
 import { type Change, changedAnswer, heatLossOf, houseWith, unitWith } from './changedAnswer.ts';
@@ -8,7 +9,7 @@ const backup = 'backup: { source: electric, power: 6 }';
 /** The one warning of a code, and the answer it is of. */
 function warned(code: string, ...changes: Change[]) {
   const answer = changedAnswer(changes);
-  const found = answer.warnings.filter((warning) => warning.code === code);
+  const found = answer.warnings.map(warningNote).filter((warning) => warning.code === code);
   expect(found, code).toHaveLength(1);
   return { answer, text: found[0]!.text, remedy: found[0]!.remedy };
 }
@@ -157,7 +158,7 @@ describe('a warning about the weather', () => {
 });
 
 test('what loading found stands first, with its place and its cure', () => {
-  const [first] = changedAnswer([['unit.yaml', '3.6  2.9  2.4', '4.9  2.9  2.4']]).warnings;
+  const [first] = changedAnswer([['unit.yaml', '3.6  2.9  2.4', '4.9  2.9  2.4']]).warnings.map(warningNote);
   expect(first).toMatchObject({ code: 'map.looks-mistyped' });
   expect(first?.text).toMatch(/^unit\.yaml:14: the COP at map\.fullLoad\.cop\[A2\/W35\] is far off/);
   expect(first?.remedy).not.toBe('');

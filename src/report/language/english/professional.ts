@@ -1,3 +1,5 @@
+import { englishCommon } from './common.ts';
+
 /** Figures of a sentence, already written with their units. */
 type Said = Readonly<Record<string, string>>;
 
@@ -36,10 +38,10 @@ export const englishProfessional = {
     caption: 'Month by month; energies in kWh',
     degreeDays: 'Degree days, K·d',
     need: 'Need of the rooms',
-    heatPumpHeat: 'Heat pump heat',
-    backupHeat: 'Backup heat',
+    heatPumpHeat: englishCommon.monthColumns.heatPumpHeat,
+    backupHeat: englishCommon.monthColumns.backupHeat,
     unmet: 'Missing',
-    electricity: 'Electricity',
+    electricity: englishCommon.monthColumns.electricity,
     fuel: 'Fuel',
     base: (base: string) =>
       `Degree days are degree hours to ${base}, the base of this house (ISO 15927-6). Months are those of standard time.`,
@@ -125,19 +127,11 @@ export const englishProfessional = {
     says: ({ hours, heat }: Said) => `The backup runs in ${hours} hours and gives ${heat}.`,
   },
   columns: {
-    tariff: 'Tariff',
-    energy: 'Energy',
-    standing: 'Standing',
-    demand: 'Demand',
+    ...englishCommon.columns,
     taxes: 'Taxes on top',
-    credits: 'Credits',
     bill: 'Whole bill',
-    household: 'Household alone',
     fuel: 'Fuel of the hybrid',
     service: 'Service',
-    heating: 'Heating',
-    boiler: 'Boiler',
-    saving: 'Saved',
     sum: 'Sum',
   },
   costs: {

@@ -1,4 +1,4 @@
-import type { AuditorWords } from './englishAuditor.ts';
+import type { AuditorWords } from '../english/auditor.ts';
 
 /** Words of the part for the auditor, in German. */
 export const germanAuditor: AuditorWords = {

@@ -1,8 +1,9 @@
-import { englishAuditor } from './englishAuditor.ts';
-import { englishBatch } from './englishBatch.ts';
-import { englishFormulas } from './englishFormulas.ts';
-import { englishProfessional } from './englishProfessional.ts';
-import type { FormulaSource, Language } from './languages.ts';
+import type { FormulaSource, Language } from '../languages.ts';
+import { englishAuditor } from './auditor.ts';
+import { englishBatch } from './batch.ts';
+import { englishCommon } from './common.ts';
+import { englishFormulas } from './formulas.ts';
+import { englishProfessional } from './professional.ts';
 
 /** Figures of a sentence, already written with their units. */
 type Said = Readonly<Record<string, string>>;
@@ -14,15 +15,11 @@ export const english = {
   skip: 'To the answer',
   contents: 'Parts of this report',
   footer: (version: string) => `Made by Winterledger ${version}. An estimate, no guarantee.`,
-  months: ['January', 'February', 'March', 'April', 'May', 'June', 'July', 'August', 'September'].concat([
-    'October',
-    'November',
-    'December',
-  ]),
+  months: englishCommon.months,
   monthsShort: ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'],
   monthLetters: ['J', 'F', 'M', 'A', 'M', 'J', 'J', 'A', 'S', 'O', 'N', 'D'],
-  month: 'Month',
-  year: 'Year',
+  month: englishCommon.month,
+  year: englishCommon.year,
   figures: 'Figures',
 
   client: {
@@ -43,7 +40,7 @@ export const english = {
     boilerAlone: (cost: string) =>
       `The boiler for the same house would cost ${cost} a year; no electricity tariff is entered to compare.`,
     backup: ({ hours, share }: Said) => `The backup would help in ${hours} hours and give ${share} of the heat`,
-    noBackup: 'The backup would never run',
+    noBackup: englishCommon.noBackup,
     cold: ({ hours, heat }: Said) => `, yet in ${hours} hours the rooms would lack heat, ${heat} in all.`,
     warm: ', and the rooms would lack no heat.',
     tiles: {
@@ -62,7 +59,7 @@ export const english = {
     changesCaption: (currency: string) => `More or less in a year, ${currency}`,
     changesCaptionEnergy: 'Electricity more in a year',
     change: 'If …',
-    heatingCost: 'Heating',
+    heatingCost: englishCommon.columns.heating,
     saving: 'Saving',
     nothingChanges: 'No heat is asked, so nothing is to be changed.',
     changes: {
@@ -71,7 +68,7 @@ export const english = {
       flow: (kelvin: string) => `the heating water ran ${kelvin} K hotter`,
       rooms: (kelvin: string) => `the rooms were ${kelvin} K warmer`,
     },
-    warningsTitle: 'Look at this before you sign',
+    warningsTitle: englishCommon.beforeYouSign,
     noWarnings: 'Nothing out of the ordinary was seen in the entries and in the result.',
     moreWarnings: (count: string) => `And ${count} more, in the part for the auditor.`,
     notTitle: 'What this is not',

@@ -1,4 +1,4 @@
-import type { BatchWords } from './englishBatch.ts';
+import type { BatchWords } from '../english/batch.ts';
 
 /** Words of the report of a batch, in German. */
 export const germanBatch: BatchWords = {

@@ -1,4 +1,4 @@
-import type { FormulaSource } from './languages.ts';
+import type { FormulaSource } from '../languages.ts';
 
 /** What is computed by section of the model, and its source. */
 export const germanFormulas: readonly FormulaSource[] = [

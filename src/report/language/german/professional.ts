@@ -1,4 +1,4 @@
-import type { ProfessionalWords } from './englishProfessional.ts';
+import type { ProfessionalWords } from '../english/professional.ts';
 
 /** Words of the part for the professional, in German. */
 export const germanProfessional: ProfessionalWords = {

@@ -1,8 +1,8 @@
-import type { ReportWords } from './english.ts';
-import { germanAuditor } from './germanAuditor.ts';
-import { germanBatch } from './germanBatch.ts';
-import { germanFormulas } from './germanFormulas.ts';
-import { germanProfessional } from './germanProfessional.ts';
+import type { ReportWords } from '../english/report.ts';
+import { germanAuditor } from './auditor.ts';
+import { germanBatch } from './batch.ts';
+import { germanFormulas } from './formulas.ts';
+import { germanProfessional } from './professional.ts';
 
 /** Every word of the report, in German. */
 export const german: ReportWords = {

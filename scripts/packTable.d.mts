@@ -1,3 +1,0 @@
-import type { PackedTable } from '../web/model/unpackTable.ts';
-
-export function packTable(text: string): PackedTable;
