@@ -1,7 +1,7 @@
 import { signal } from '@preact/signals';
 import { render } from 'preact';
 import { droppedFiles } from './droppedFiles.ts';
-import { begin, takeFiles, words } from './sheet.ts';
+import { begin, takeDropped, words } from './sheet.ts';
 import './sheet.css';
 import { AnswerPane } from './view/Answer.tsx';
 import { Foot, Head } from './view/Head.tsx';
@@ -33,7 +33,7 @@ window.addEventListener('dragleave', (event) => {
 window.addEventListener('drop', (event) => {
   event.preventDefault();
   dragging.value = false;
-  if (event.dataTransfer !== null) void droppedFiles(event.dataTransfer).then(takeFiles);
+  if (event.dataTransfer !== null) takeDropped(droppedFiles(event.dataTransfer));
 });
 
 const root = document.getElementById('sheet');

@@ -14,13 +14,15 @@ import { sheetWords } from './words.ts';
 export const state = signal<SheetState | undefined>(undefined);
 export const pictures = signal<Pictures | undefined>(undefined);
 export const explainedHour = signal<ExplainDocument | undefined>(undefined);
-export const language = signal<Language>('en');
+export const language = signal<Language>(navigator.language.startsWith('de') ? 'de' : 'en');
 export const words = computed(() => sheetWords(language.value));
 /** Whether the invented house stands there as it came. */
 export const isDemo = signal(true);
 /** Whether a draft is kept: yes, no, or there is no room for it. */
 export const draft = signal<'none' | 'kept' | 'full'>('none');
 export const refused = signal<readonly string[]>([]);
+/** Whether the browser did not hand over what was dropped. */
+export const unreadable = signal(false);
 export const fault = signal<string | undefined>(undefined);
 /** Counts the changes of the files, so that what rests on them is made anew. */
 export const revision = signal(0);
@@ -58,6 +60,8 @@ export function begin(): void {
       const kept = keptDraft();
       isDemo.value = kept === undefined;
       draft.value = kept === undefined ? 'none' : 'kept';
+      document.documentElement.lang = language.value;
+      await ask('language', language.value);
       show(kept === undefined ? await ask('demo') : await ask('open', kept));
     })(),
   );
@@ -65,11 +69,13 @@ export function begin(): void {
 
 export function showDemo(): void {
   isDemo.value = true;
+  pictures.value = undefined;
   guarded(ask('demo').then(show));
 }
 
 export function startBlank(): void {
   isDemo.value = false;
+  pictures.value = undefined;
   guarded(ask('blank', Intl.DateTimeFormat().resolvedOptions().timeZone ?? 'UTC').then(show));
 }
 
@@ -87,6 +93,14 @@ export function takeFiles(files: readonly SheetFile[]): void {
       show(taken.state);
     }),
   );
+}
+
+/** Takes files that are still being read; a folder that cannot be read is said, with another way. */
+export function takeDropped(reading: Promise<readonly SheetFile[]>): void {
+  unreadable.value = false;
+  reading.then(takeFiles, () => {
+    unreadable.value = true;
+  });
 }
 
 export function speak(next: Language): void {

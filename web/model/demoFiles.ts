@@ -1,23 +1,27 @@
+/// <reference types="vite/client" />
 import house from '../../data/demo/house.yaml?raw';
 import flat from '../../data/demo/tariffs/flat.yaml?raw';
 import halfHourly from '../../data/demo/tariffs/half-hourly.yaml?raw';
 import night from '../../data/demo/tariffs/night.yaml?raw';
-import prices from '../../data/demo/tariffs/prices.csv?packed';
 import threeBand from '../../data/demo/tariffs/three-band.yaml?raw';
 import unit from '../../data/demo/units/quarkenfels-8.yaml?raw';
-import weather from '../../data/demo/weather.csv?packed';
+import { inventPrices, PRICE_SEED } from '../../scripts/demo/dayAheadPrices.ts';
+import { priceCsv } from '../../scripts/demo/priceCsv.ts';
+import { inventWeather, WEATHER_SEED } from '../../scripts/demo/townWeather.ts';
+import { weatherCsv } from '../../scripts/demo/weatherCsv.ts';
 import type { SheetFile } from './memorySource.ts';
 import { fileOf } from './startFiles.ts';
-import { unpackTable } from './unpackTable.ts';
 
-/** The invented house with all that it names. */
+const town = inventWeather(WEATHER_SEED);
+
+/** The invented house with all that it names; its tables are invented anew, the same as those of `data/demo`. */
 export const demoFiles: readonly SheetFile[] = [
   fileOf('house.yaml', house),
-  fileOf('weather.csv', unpackTable(weather)),
+  fileOf('weather.csv', weatherCsv(town)),
   fileOf('units/quarkenfels-8.yaml', unit),
   fileOf('tariffs/flat.yaml', flat),
   fileOf('tariffs/night.yaml', night),
   fileOf('tariffs/three-band.yaml', threeBand),
   fileOf('tariffs/half-hourly.yaml', halfHourly),
-  fileOf('tariffs/prices.csv', unpackTable(prices)),
+  fileOf('tariffs/prices.csv', priceCsv(inventPrices(town, PRICE_SEED))),
 ];

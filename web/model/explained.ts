@@ -12,5 +12,5 @@ export function explained(model: SheetModel, hour: number): ExplainDocument | un
   const { answer } = model.answer;
   if (answer === undefined || !Number.isInteger(hour) || hour < 0 || hour >= answer.columns.hours) return undefined;
   const text = civilStamps(answer.loaded.clock)[hour] ?? '';
-  return explainDocument(answer, { hour, isBeginning: true, text }, model.version);
+  return explainDocument(answer, { hour, isBeginning: true, text }, model.version, model.messages.explained);
 }

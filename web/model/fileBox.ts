@@ -9,6 +9,7 @@ export class FileBox {
   #files = new Map<string, SheetFile>();
   readonly #hashes = new WeakMap<Uint8Array, string>();
   readonly #changed = new Set<string>();
+  readonly #changedSince = new Set<string>();
   /** Counts the changes of every file but the scenario. */
   othersChanged = 0;
   scenario = '';
@@ -27,18 +28,28 @@ export class FileBox {
     return new MemorySource(this.#files, this.#hashes);
   }
 
-  /** The files with another text of the scenario. */
-  sourceWith(text: string): MemorySource {
-    const changed = { name: this.scenario, bytes: new TextEncoder().encode(text) };
-    return new MemorySource(new Map([...this.#files, [this.scenario, changed]]), this.#hashes);
-  }
-
   has(name: string): boolean {
     return this.#files.has(name);
   }
 
+  /** Names of the files that have changed since this was asked last. */
+  takeChanged(): ReadonlySet<string> {
+    const names = new Set(this.#changedSince);
+    this.#changedSince.clear();
+    return names;
+  }
+
+  /** The files with others laid over them. */
+  sourceOver(files: readonly SheetFile[]): MemorySource {
+    return new MemorySource(
+      new Map([...this.#files, ...files.map((file) => [file.name, file] as const)]),
+      this.#hashes,
+    );
+  }
+
   /** Begins anew with these files; the scenario is the one that is given, else the one that lies highest. */
   replace(files: readonly SheetFile[], scenario?: string): void {
+    for (const name of [...this.#files.keys(), ...files.map((file) => file.name)]) this.#changedSince.add(name);
     this.#files = new Map(files.map((file) => [file.name, file]));
     this.#changed.clear();
     this.othersChanged++;
@@ -52,6 +63,7 @@ export class FileBox {
   put(file: SheetFile): void {
     this.#files.set(file.name, file);
     this.#changed.add(file.name);
+    this.#changedSince.add(file.name);
     if (file.name !== this.scenario) this.othersChanged++;
   }
 
@@ -84,6 +96,11 @@ export class FileBox {
 }
 
 /** What a file is, by what stands in it. */
-export function kindOf({ bytes }: SheetFile): FileKind | undefined {
-  return recogniseKind(decodeText(bytes.subarray(0, 20_000)).text).kind;
+export function kindOf(file: SheetFile): FileKind | undefined {
+  return recogniseKind(startOf(file)).kind;
+}
+
+/** The beginning of a file, which shows what it is. */
+export function startOf({ bytes }: SheetFile): string {
+  return decodeText(bytes.subarray(0, 20_000)).text;
 }

@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import type { Messages } from '../../src/report/language/messages.ts';
 import { shownUnit } from '../../src/scenario/entries/allowedText.ts';
 import { type EntryPath, pathText } from '../../src/scenario/entries/pathText.ts';
 import { bare, chooseForm, entryOf, type Field, kindOf } from '../../src/scenario/entries/schemaField.ts';
@@ -12,6 +13,8 @@ export interface FormContext {
   readonly problems: readonly Told[];
   /** A key or a word of a choice as people say it. */
   readonly named: (word: string) => string;
+  /** Sentences, units and usual ranges in the language of the page. */
+  readonly said: Pick<Messages, 'field' | 'unit' | 'range'>;
   readonly decimalSign: '.' | ',';
 }
 
@@ -44,7 +47,12 @@ function isSection(schema: z.core.$ZodType): boolean {
 function entryBase(schema: z.core.$ZodType, field: Field, { path, context }: Place) {
   const required = !isOptional(schema);
   return {
-    ...{ file: context.file, path, label: context.named(String(path.at(-1) ?? '')), says: field.says ?? '' },
+    ...{
+      file: context.file,
+      path,
+      label: context.named(String(path.at(-1) ?? '')),
+      says: context.said.field(field.says ?? ''),
+    },
     folded: !required && !isMainEntry(path),
   };
 }
@@ -135,8 +143,8 @@ function leafOf(schema: z.core.$ZodType, field: Field, raw: unknown, place: Plac
     kind: 'field',
     ...entryBase(schema, field, place),
     input,
-    ...(unit === undefined ? {} : { unit }),
-    ...(field.usual === undefined ? {} : { usual: field.usual }),
+    ...(unit === undefined ? {} : { unit: context.said.unit(unit) }),
+    ...(field.usual === undefined ? {} : { usual: context.said.range(field.usual) }),
     ...(words === undefined ? {} : { choices: words.map((value) => ({ value, label: context.named(value) })) }),
     written: fieldText(raw, decimal),
     ...(assumed === undefined || isEmptyList(assumed) ? {} : { assumed: assumedText(assumed, input, context) }),

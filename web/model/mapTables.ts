@@ -1,5 +1,5 @@
 import type { Problem } from '../../src/core/problem.ts';
-import { problemCure, problemSentence } from '../../src/core/problemText.ts';
+import { type ProblemLanguage, saidIn } from '../../src/core/problemText.ts';
 import type { EntryPath } from '../../src/scenario/entries/pathText.ts';
 import { entryOf } from '../../src/scenario/entries/schemaField.ts';
 import { splitTable, type TableCell } from '../../src/scenario/map/splitTable.ts';
@@ -12,6 +12,14 @@ export interface MapGrid {
   readonly level: 'fullLoad' | 'lowestLevel';
   readonly quantity: 'capacity' | 'cop' | 'inputPower';
   readonly cells: readonly (readonly MapCell[])[];
+  /** The file in which it stands, where it is not the unit's own. */
+  readonly own?: string;
+}
+
+/** A table in a file of its own: the name that problems give it, and its text. */
+export interface OwnTable {
+  readonly path: string;
+  readonly text: string;
 }
 
 export interface MapCell {
@@ -23,41 +31,56 @@ export interface MapCell {
 const QUANTITIES = ['capacity', 'cop', 'inputPower'] as const;
 
 /**
- * The tables of a unit file as grids; tables in files of their own, and entries that are no text, are left out.
+ * The tables of a unit as grids, those in files of their own too; what is neither text nor a file that is there is left out.
  *
  * @param yaml the unit file
- * @param problems of it, whose places mark the cells
+ * @param problems whose places mark the cells
+ * @param language in which they are said
+ * @param ownTable a table in a file of its own, by the name in the unit file
  */
-export function mapGrids(yaml: YamlFile, problems: readonly Problem[]): MapGrid[] {
+export function mapGrids(
+  yaml: YamlFile,
+  problems: readonly Problem[],
+  language: ProblemLanguage,
+  ownTable: (name: string) => OwnTable | undefined,
+): MapGrid[] {
   return (['fullLoad', 'lowestLevel'] as const).flatMap((level) =>
     QUANTITIES.flatMap((quantity): MapGrid[] => {
       const path = ['map', level, quantity];
-      const text = path.reduce<unknown>((value, key) => entryOf(value, key), yaml.raw);
-      if (typeof text !== 'string') return [];
-      return [{ file: yaml.file, path, level, quantity, cells: cellsOf(text, { yaml, path, problems }) }];
+      const entry = path.reduce<unknown>((value, key) => entryOf(value, key), yaml.raw);
+      const base = { file: yaml.file, path, level, quantity };
+      const toldAt = (of: string, line: number, column: number): string[] =>
+        problems
+          .filter((p) => p.file === of && p.line === line && p.column === column)
+          .map((problem) => toldShort(saidIn(language, problem)));
+      if (typeof entry === 'string') {
+        const placeOf = yaml.isLiteralBlock(path) ? yaml.textPlaces(path) : undefined;
+        const told = ({ line, column }: TableCell) => {
+          const place = placeOf?.(line, column);
+          return place === undefined ? [] : toldAt(yaml.file, place.line, place.column);
+        };
+        return [{ ...base, cells: cellsOf(entry, told) }];
+      }
+      const file = entryOf(entry, 'file');
+      const own = typeof file === 'string' ? ownTable(file) : undefined;
+      if (own === undefined) return [];
+      const told = ({ line, column }: TableCell) => toldAt(own.path, line, column);
+      return [{ ...base, own: own.path, cells: cellsOf(own.text, told) }];
     }),
   );
 }
 
-interface Placed {
-  readonly yaml: YamlFile;
-  readonly path: EntryPath;
-  readonly problems: readonly Problem[];
-}
-
-function cellsOf(text: string, { yaml, path, problems }: Placed): MapCell[][] {
+function cellsOf(text: string, told: (cell: TableCell) => string[]): MapCell[][] {
   const { flows, rows } = splitTable(text);
-  const placeOf = yaml.textPlaces(path);
-  const literal = yaml.isLiteralBlock(path);
-  const cellOf = (cell: TableCell): MapCell => {
-    const { line, column } = placeOf(cell.line, cell.column);
-    const told = problems.filter((p) => literal && p.file === yaml.file && p.line === line && p.column === column);
-    return { text: cell.text, told: told.map((p) => `${problemSentence(p)}: ${problemCure(p)}`) };
-  };
+  const cellOf = (cell: TableCell): MapCell => ({ text: cell.text, told: told(cell) });
   return [
     [{ text: 'outdoor', told: [] }, ...flows.map(cellOf)],
     ...rows.map(({ label, cells }) => [cellOf(label), ...cells.map(cellOf)]),
   ];
+}
+
+function toldShort({ says, cure }: { readonly says: string; readonly cure: string }): string {
+  return `${says}: ${cure}`;
 }
 
 /**

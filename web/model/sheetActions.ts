@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import type { BlankWords } from '../../src/report/language/english/blankFiles.ts';
 import type { EntryPath } from '../../src/scenario/entries/pathText.ts';
 import { bare, choicesOf, entryOf, fieldAt } from '../../src/scenario/entries/schemaField.ts';
 import { scenarioSchema } from '../../src/scenario/scenarioSchema.ts';
@@ -7,8 +8,8 @@ import { unitSchema } from '../../src/scenario/unitSchema.ts';
 import { parseYaml } from '../../src/scenario/yaml/parseYaml.ts';
 import { type FileBox, kindOf } from './fileBox.ts';
 import { tableText } from './mapTables.ts';
-import { baseOf, LARGEST_FILE, type SheetFile } from './memorySource.ts';
 import { blankTariff } from './startFiles.ts';
+import { type ColumnUse, MAY_BE_UNUSED, type WeatherColumn } from './weatherColumns.ts';
 import { type InputKind, writtenValue } from './writtenValue.ts';
 import type { Written } from './yamlEdit.ts';
 
@@ -32,11 +33,17 @@ export type Action =
       readonly cells: readonly (readonly string[])[];
     }
   | { readonly do: 'second'; readonly file: string; readonly path: EntryPath; readonly quantity: 'cop' | 'inputPower' }
+  | {
+      /** What a column of the weather file is used for; nothing leaves it unused. */
+      readonly do: 'column';
+      readonly column: WeatherColumn;
+      readonly use?: ColumnUse;
+    }
   | { readonly do: 'addTariff' }
   | { readonly do: 'removeTariff'; readonly name: string };
 
-/** Does to the files what a user asked for. */
-export function act(box: FileBox, action: Action): void {
+/** Does to the files what a user asked for; what is added has the words of a language. */
+export function act(box: FileBox, action: Action, words: BlankWords): void {
   if (action.do === 'write') box.write(action.file, action.path, writtenValue(action.text, action.input));
   else if (action.do === 'form') chooseForm(box, action);
   else if (action.do === 'add') addEntry(box, action);
@@ -44,7 +51,8 @@ export function act(box: FileBox, action: Action): void {
   else if (action.do === 'text') box.setText(action.file, action.text);
   else if (action.do === 'table') writeTable(box, action);
   else if (action.do === 'second') renameSecond(box, action);
-  else if (action.do === 'addTariff') addTariff(box);
+  else if (action.do === 'column') useColumn(box, action);
+  else if (action.do === 'addTariff') addTariff(box, words);
   else removeTariff(box, action.name);
 }
 
@@ -107,8 +115,14 @@ function firstForm(schema: z.core.$ZodType): Written {
 
 /** The other table of the level takes over axes as long as nothing stands in it. */
 function writeTable(box: FileBox, { file, path, cells }: Extract<Action, { do: 'table' }>): void {
-  box.write(file, path, tableText(cells));
   const level = path.slice(0, -1).reduce<unknown>((value, step) => entryOf(value, step), rawOf(box, file));
+  const own = entryOf(entryOf(level, String(path.at(-1))), 'file');
+  const table = typeof own === 'string' ? box.source.find(own, file).file : undefined;
+  if (table !== undefined) {
+    box.setText(table.name, tableText(cells));
+    return;
+  }
+  box.write(file, path, tableText(cells));
   for (const other of ['capacity', 'cop', 'inputPower']) {
     const text = other === path.at(-1) ? undefined : entryOf(level, other);
     if (typeof text !== 'string' || !isEmptyTable(text)) continue;
@@ -130,64 +144,45 @@ function isEmptyTable(text: string): boolean {
 
 /** The same figures under another name: what was taken for COP is input power, or the other way round. */
 function renameSecond(box: FileBox, { file, path, quantity }: Extract<Action, { do: 'second' }>): void {
-  const text = path.reduce<unknown>((value, step) => entryOf(value, step), rawOf(box, file));
+  const table = path.reduce<unknown>((value, step) => entryOf(value, step), rawOf(box, file));
   box.write(file, path, undefined);
-  box.write(file, [...path.slice(0, -1), quantity], typeof text === 'string' ? text : '');
+  box.write(file, [...path.slice(0, -1), quantity], (table ?? '') as Written);
 }
 
-function addTariff(box: FileBox): void {
+/** Names a column for a use; what it was used for before looks for another one, or stays unused. */
+function useColumn(box: FileBox, { column, use }: Extract<Action, { do: 'column' }>): void {
+  const columns = ['weather', 'read', 'columns'];
+  const entries = columns.reduce<unknown>((value, key) => entryOf(value, key), rawOf(box, box.scenario));
+  if (column.use !== undefined && column.use !== use) {
+    const isNamed = entryOf(entries, column.use) !== undefined;
+    if (use === undefined && MAY_BE_UNUSED.has(column.use)) box.write(box.scenario, [...columns, column.use], false);
+    else if (isNamed) box.write(box.scenario, [...columns, column.use], undefined);
+  }
+  if (use !== undefined) box.write(box.scenario, [...columns, use], column.key);
+}
+
+/** A new tariff behind the others; returns its file. */
+export function addTariff(box: FileBox, words: BlankWords): string {
   let number = 1;
   while (box.has(`tariff-${number}.yaml`)) number++;
   const name = `tariff-${number}.yaml`;
-  box.setText(name, blankTariff(`Tariff ${number}`));
+  box.setText(name, blankTariff(number, words));
   appendTariff(box, name);
+  return name;
 }
 
-function tariffList(box: FileBox): readonly unknown[] {
+/** The tariffs of the scenario as they stand there. */
+export function tariffList(box: FileBox): readonly unknown[] {
   const list = entryOf(rawOf(box, box.scenario), 'tariffs');
   return Array.isArray(list) ? list : [];
 }
 
-function appendTariff(box: FileBox, file: string): void {
+/** Names a file as a further tariff. */
+export function appendTariff(box: FileBox, file: string): void {
   box.write(box.scenario, ['tariffs', tariffList(box).length], box.nameFromScenario(file));
 }
 
 function removeTariff(box: FileBox, file: string): void {
   const at = tariffList(box).findIndex((name) => typeof name === 'string' && box.pathOf(name) === file);
   if (at >= 0) box.write(box.scenario, ['tariffs', at], undefined);
-}
-
-/**
- * Takes files that were dropped or chosen. With a scenario among them the sheet begins anew; else each takes the place that
- * its content asks for: the weather, the unit, a further tariff.
- *
- * @returns names of files that are too large to be taken
- */
-export function takeFiles(box: FileBox, files: readonly SheetFile[]): string[] {
-  const sound = files.filter(({ bytes }) => bytes.length <= LARGEST_FILE);
-  const refused = files.filter((file) => !sound.includes(file)).map(({ name }) => name);
-  if (sound.some((file) => kindOf(file) === 'scenario')) {
-    box.replace(withoutCommonFolder(sound));
-    return refused;
-  }
-  for (const file of sound) {
-    const placed = { ...file, name: box.has(file.name) ? file.name : baseOf(file.name) };
-    box.put(placed);
-    const kind = kindOf(file);
-    const name = box.nameFromScenario(placed.name);
-    if (kind === 'weather') box.write(box.scenario, ['weather', 'file'], name);
-    else if (kind === 'unit') box.write(box.scenario, ['heatPump', 'unit'], name);
-    else if (kind === 'tariff' && !tariffList(box).includes(name)) appendTariff(box, placed.name);
-  }
-  return refused;
-}
-
-/** The files of one opened folder by their paths within it. */
-function withoutCommonFolder(files: readonly SheetFile[]): SheetFile[] {
-  const [first = ''] = files.map(({ name }) => name);
-  const folder = first.slice(0, first.indexOf('/') + 1);
-  const inside = folder !== '' && files.every(({ name }) => name.startsWith(folder));
-  return inside
-    ? withoutCommonFolder(files.map((file) => ({ ...file, name: file.name.slice(folder.length) })))
-    : [...files];
 }

@@ -3,11 +3,12 @@ import type { Language } from '../../src/report/language/languages.ts';
 import { explained } from './explained.ts';
 import type { SheetFile } from './memorySource.ts';
 import { type Pictures, picturesOf } from './pictures.ts';
-import { type Action, act, takeFiles } from './sheetActions.ts';
+import { type Action, act } from './sheetActions.ts';
 import { SheetModel } from './sheetModel.ts';
 import { type SaveKind, saved } from './sheetSaves.ts';
 import type { SheetState } from './sheetState.ts';
 import { BLANK_SCENARIO, blankFiles } from './startFiles.ts';
+import { takeFiles } from './takeFiles.ts';
 import { type Changes, runVariant, type VariantResult } from './whatIfRun.ts';
 
 /** A house to begin with. */
@@ -24,7 +25,7 @@ export interface SheetCalls {
   take(files: readonly SheetFile[]): { state: SheetState; refused: readonly string[] };
   act(action: Action): SheetState;
   language(language: Language): SheetState;
-  pictures(): Pictures | undefined;
+  pictures(): Pictures;
   explain(hour: number): ExplainDocument | undefined;
   variant(changes: Changes): VariantResult | undefined;
   save(kind: SaveKind): SheetFile | undefined;
@@ -42,7 +43,7 @@ export function sheetCalls(version: string, demo: readonly SheetFile[]): SheetCa
       return model.state();
     },
     blank: (zone) => {
-      box.replace(blankFiles(zone), BLANK_SCENARIO);
+      box.replace(blankFiles(zone, model.messages.blank), BLANK_SCENARIO);
       return model.state();
     },
     open: ({ files, scenario }) => {
@@ -50,11 +51,11 @@ export function sheetCalls(version: string, demo: readonly SheetFile[]): SheetCa
       return model.state();
     },
     take: (files) => {
-      const refused = takeFiles(box, files);
+      const refused = takeFiles(box, files, model.messages.blank);
       return { state: model.state(), refused };
     },
     act: (action) => {
-      act(box, action);
+      act(box, action, model.messages.blank);
       return model.state();
     },
     language: (language) => {

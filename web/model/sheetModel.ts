@@ -1,30 +1,34 @@
 import * as z from 'zod';
 import { hasErrors, type Problem, visibleText } from '../../src/core/problem.ts';
-import { problemCure, problemSentence } from '../../src/core/problemText.ts';
+import { type ProblemLanguage, saidIn } from '../../src/core/problemText.ts';
 import type { ReportInput } from '../../src/report/html/reportInput.ts';
 import { inLanguage } from '../../src/report/language/inLanguage.ts';
 import type { Language } from '../../src/report/language/languages.ts';
+import type { Messages } from '../../src/report/language/messages.ts';
 import { resultDocument } from '../../src/report/resultDocument.ts';
 import type { Answer } from '../../src/scenario/answer/answer.ts';
 import { bare, entryOf } from '../../src/scenario/entries/schemaField.ts';
 import { isProblem } from '../../src/scenario/fileSource.ts';
 import { Kept } from '../../src/scenario/kept.ts';
-import { weatherFrom } from '../../src/scenario/loadWeather.ts';
+import { type LoadedUnit, loadUnit } from '../../src/scenario/loadUnit.ts';
+import { weatherFrom, weathers } from '../../src/scenario/loadWeather.ts';
 import { readSchema } from '../../src/scenario/readSchema.ts';
 import { scenarioSchema } from '../../src/scenario/scenarioSchema.ts';
 import { tariffSchema } from '../../src/scenario/tariffSchema.ts';
 import { unitSchema } from '../../src/scenario/unitSchema.ts';
 import { parseYaml } from '../../src/scenario/yaml/parseYaml.ts';
 import type { YamlFile } from '../../src/scenario/yaml/yamlFile.ts';
+import { recognisedLines } from '../../src/weather/read/recognisedLines.ts';
 import { FileBox } from './fileBox.ts';
 import type { FormNode, Told } from './formNode.ts';
 import { childrenOf, type FormContext, formOf } from './formOf.ts';
 import { keptAnswer } from './keptAnswer.ts';
 import { keyNames } from './keyNames.ts';
 import { type MapGrid, mapGrids } from './mapTables.ts';
-import type { BesideState, SheetState, WeatherPreview } from './sheetState.ts';
+import type { BesideState, SheetState, WeatherPreview, WeatherState } from './sheetState.ts';
 import { shownAnswer } from './shownAnswer.ts';
 import { VISIT } from './visit.ts';
+import { COLUMN_USES, weatherColumns } from './weatherColumns.ts';
 
 /** Keys that a unit shows as grids instead of fields. */
 const SHOWN_AS_GRIDS = new Set(['map', 'label']);
@@ -35,6 +39,8 @@ export class SheetModel {
   readonly box = new FileBox();
   readonly version: string;
   language: Language = 'en';
+  /** Files of keys and values that were parsed, by their bytes. */
+  readonly #parsed = new WeakMap<Uint8Array, YamlFile>();
   #kept = new Kept();
   #keptOf = -1;
   #answer: { of: string; answer?: Answer; problems: Problem[] } | undefined;
@@ -49,9 +55,22 @@ export class SheetModel {
   /** What the files other than the scenario became; good for a variant of it too. */
   get kept(): Kept {
     const { othersChanged } = this.box;
-    if (this.#keptOf !== othersChanged) this.#kept = new Kept();
+    if (this.#keptOf !== othersChanged) this.#kept = this.#keptAnew();
     this.#keptOf = othersChanged;
     return this.#kept;
+  }
+
+  /** Nothing but the weather files that have not changed: reading one takes longer than all else together. */
+  #keptAnew(): Kept {
+    const kept = new Kept();
+    const { source } = this.box;
+    const changed = this.box.takeChanged();
+    const isSame = ([key]: readonly [string, unknown]) => {
+      const { file } = source.find(String(JSON.parse(key)[0]));
+      return file !== undefined && !changed.has(file.name);
+    };
+    weathers.put(kept, weathers.entriesOf(this.#kept).filter(isSame));
+    return kept;
   }
 
   /** The answer of the files as they are, with the problems of all of them. */
@@ -72,6 +91,18 @@ export class SheetModel {
     return { answer, document, scenario, texts: [], date: undefined, ...inLanguage(this.language) };
   }
 
+  /** The unit from its own file, whether or not there is an answer. */
+  get loadedUnit(): LoadedUnit | undefined {
+    const { source, scenario } = this.box;
+    const name = entryAt(this.#yaml(scenario), 'heatPump', 'unit');
+    const { file } = typeof name === 'string' ? source.find(name, scenario) : {};
+    return file && loadUnit(file.name, source).loaded;
+  }
+
+  get messages(): Messages {
+    return inLanguage(this.language).messages;
+  }
+
   /** Everything that is shown, made from the files. */
   state(): SheetState {
     const { box } = this;
@@ -80,15 +111,20 @@ export class SheetModel {
     const yaml = this.#yaml(box.scenario);
     const input = hasErrors(problems) ? undefined : this.reportInput;
     const unit = this.#beside(entryAt(yaml, 'heatPump', 'unit'), unitSchema, told);
-    const weather = this.#preview(yaml);
+    const weather = this.#weatherState(yaml, told);
     return {
       scenario: box.scenario,
       text: box.text(box.scenario),
       files: box.list,
-      parts: VISIT.map(({ id, entries }) => ({ id, nodes: this.#nodes(yaml, entries, told) })),
+      parts: VISIT.map(({ id, entries }) => ({
+        ...{
+          id,
+          nodes: this.#nodes(yaml, entries, told).map((node) => (weather === undefined ? node : withoutRead(node))),
+        },
+      })),
       ...(unit === undefined ? {} : { unit }),
       tariffs: this.#tariffNames(yaml).flatMap((name) => this.#beside(name, tariffSchema, told) ?? []),
-      grids: unit === undefined ? [] : this.#grids(unit.name, problems),
+      grids: this.#grids(entryAt(yaml, 'heatPump', 'unit'), problems),
       ...(weather === undefined ? {} : { weather }),
       problems: told,
       ...(input === undefined ? {} : { answer: shownAnswer(input) }),
@@ -97,7 +133,7 @@ export class SheetModel {
 
   /** What is wrong with the weather file is put right where it is said how to read it. */
   #told(problem: Problem): Told {
-    const told = toldOf(problem);
+    const told = toldOf(problem, this.messages.problems);
     const weather = this.#weatherFile();
     return told.file === weather ? { ...told, file: this.box.scenario, path: 'weather.read' } : told;
   }
@@ -121,15 +157,20 @@ export class SheetModel {
   #yaml(name: string): YamlFile | undefined {
     const read = this.box.source.read(name);
     if (isProblem(read)) return undefined;
+    const known = this.#parsed.get(read.bytes);
+    if (known?.file === read.name) return known;
     const parsed = parseYaml(read);
-    return 'yaml' in parsed ? parsed.yaml : undefined;
+    if (!('yaml' in parsed)) return undefined;
+    this.#parsed.set(read.bytes, parsed.yaml);
+    return parsed.yaml;
   }
 
   #context(file: string, problems: readonly Told[]): FormContext {
     return {
       file,
       problems: problems.filter((told) => told.file === file),
-      named: keyNames(this.language),
+      named: keyNames(this.messages.keys),
+      said: this.messages,
       decimalSign: this.language === 'de' ? ',' : '.',
     };
   }
@@ -155,9 +196,26 @@ export class SheetModel {
     return { name: file.name, nodes: shown, text: this.box.text(file.name) };
   }
 
-  #grids(name: string, problems: readonly Problem[]): MapGrid[] {
-    const yaml = this.#yaml(name);
-    return yaml === undefined ? [] : mapGrids(yaml, problems);
+  #grids(name: unknown, problems: readonly Problem[]): MapGrid[] {
+    const { source, scenario } = this.box;
+    const unit = typeof name === 'string' ? source.find(name, scenario) : undefined;
+    const yaml = unit?.file && this.#yaml(unit.file.name);
+    if (unit === undefined || yaml === undefined) return [];
+    // problems name the file by the scenario's path, which is another one where it was dropped without its folder
+    const of = problems.map((problem) => (problem.file === unit.path ? { ...problem, file: yaml.file } : problem));
+    return mapGrids(yaml, of, this.messages.problems, (table) => {
+      const { path, file } = source.find(table, unit.path);
+      return file && { path, text: this.box.text(file.name) };
+    });
+  }
+
+  #weatherState(yaml: YamlFile | undefined, problems: readonly Told[]): WeatherState | undefined {
+    const preview = this.#preview(yaml);
+    if (preview === undefined) return undefined;
+    const context = this.#context(this.box.scenario, problems);
+    const read = formOf(readSchema, entryAt(yaml, 'weather', 'read'), ['weather', 'read'], context);
+    const uses = COLUMN_USES.map((value) => ({ value, label: context.named(value) }));
+    return read.kind === 'section' ? { ...preview, read, uses } : undefined;
   }
 
   #preview(yaml: YamlFile | undefined): WeatherPreview | undefined {
@@ -167,23 +225,32 @@ export class SheetModel {
     const settings = readSchema.safeParse(entryAt(yaml, 'weather', 'read') ?? {});
     const zone = entryAt(yaml, 'site', 'zone');
     const site = typeof zone === 'string' ? { zone } : {};
-    const key = JSON.stringify([read.name, read.sha256, settings.data, site]);
+    const key = JSON.stringify([this.language, read.name, read.sha256, settings.data, site]);
     if (this.#weather?.key === key) return this.#weather.preview;
     const known = this.answer.answer?.loaded.weather;
     const recognised =
       known?.file === read.name ? known.recognised : weatherFrom(read, settings.data ?? {}, site).recognised;
-    const lines = this.box.text(this.box.pathOf(String(name))).split(/\r\n|\n|\r/, HEAD_LINES);
+    const text = this.box.text(this.box.pathOf(String(name)));
+    const lines = text.split(/\r\n|\n|\r/, HEAD_LINES);
     const head = lines.map((line) => visibleText(line.replaceAll('\t', ' ⇥ ').slice(0, 200)));
-    const preview = { file: read.name, lines: recognised?.lines ?? [], head };
+    const told = recognised === undefined ? [] : recognisedLines(recognised, this.messages.recognised);
+    const columns = weatherColumns(text, settings.data ?? {}, recognised);
+    const preview = { file: read.name, lines: told, head, columns };
     this.#weather = { key, preview };
     return preview;
   }
 }
 
-function toldOf(problem: Problem): Told {
+/** The weather without how it is read, which stands with the file's preview. */
+function withoutRead(node: FormNode): FormNode {
+  if (node.kind !== 'section' || node.path.join('.') !== 'weather') return node;
+  return { ...node, children: node.children.filter(({ path }) => path[1] !== 'read') };
+}
+
+function toldOf(problem: Problem, language: ProblemLanguage): Told {
   const { severity, file, line, column, path = '' } = problem;
   const place = [file, line, column].filter((part) => part !== undefined).join(':');
-  return { severity, file: ownerOf(problem), place, path, says: problemSentence(problem), cure: problemCure(problem) };
+  return { severity, file: ownerOf(problem), place, path, ...saidIn(language, problem) };
 }
 
 /** The file whose entry is wrong: where a named file is missing, the one that names it. */

@@ -1,6 +1,7 @@
-import type { FormNode, Told } from './formNode.ts';
+import type { FormNode, SectionNode, Told } from './formNode.ts';
 import type { MapGrid } from './mapTables.ts';
 import type { PartId } from './visit.ts';
+import type { ColumnUse, WeatherColumn } from './weatherColumns.ts';
 
 /** One part of the visit with its fields. */
 export interface PartState {
@@ -21,6 +22,15 @@ export interface WeatherPreview {
   readonly lines: readonly string[];
   /** The first lines of the file as they stand. */
   readonly head: readonly string[];
+  readonly columns: readonly WeatherColumn[];
+}
+
+/** The weather file and how to read it. */
+export interface WeatherState extends WeatherPreview {
+  /** The entries of `weather.read`, whether or not any is written. */
+  readonly read: SectionNode;
+  /** What a column may be used for, in words. */
+  readonly uses: readonly { readonly value: ColumnUse; readonly label: string }[];
 }
 
 /** What an answer says in short, ready to be shown. */
@@ -33,8 +43,10 @@ export interface ShownAnswer {
     readonly strip: string;
     readonly boiler: boolean;
   }[];
-  readonly cautions: readonly { readonly plain: string; readonly text: string; readonly remedy: string }[];
+  readonly cautions: readonly { readonly text: string; readonly remedy: string }[];
   readonly assumptions: readonly { readonly path: string; readonly text: string }[];
+  /** Days of the year: 365, or 366. */
+  readonly days: number;
   /** Electricity by month, drawn. */
   readonly months: string;
 }
@@ -48,7 +60,7 @@ export interface SheetState {
   readonly unit?: BesideState;
   readonly tariffs: readonly BesideState[];
   readonly grids: readonly MapGrid[];
-  readonly weather?: WeatherPreview;
+  readonly weather?: WeatherState;
   readonly problems: readonly Told[];
   readonly answer?: ShownAnswer;
 }

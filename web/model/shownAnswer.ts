@@ -3,21 +3,26 @@ import { barStrip } from '../../src/report/charts/barStrip.ts';
 import { clientSentences } from '../../src/report/html/clientSentences.ts';
 import { monthlyEnergy } from '../../src/report/html/monthlyEnergy.ts';
 import type { ReportInput } from '../../src/report/html/reportInput.ts';
+import { assumptionText } from '../../src/report/language/assumptionWords.ts';
+import { warningText } from '../../src/report/language/warningWords.ts';
 import type { ShownAnswer } from './sheetState.ts';
-
-const BACKUP_HOURS = { en: 'Hours with backup', de: 'Stunden mit Zusatzheizung' } as const;
 
 /** An answer in the report's words and figures. */
 export function shownAnswer(input: ReportInput): ShownAnswer {
-  const { document, words } = input;
+  const { answer, messages } = input;
   return {
     sentences: clientSentences(input).map(visibleText),
     tiles: tilesOf(input),
     bars: barsOf(input),
-    cautions: document.warnings.map(({ code, text, remedy }) => ({
-      ...{ plain: words.plainWarnings[code] ?? '', text: visibleText(text), remedy: visibleText(remedy) },
+    cautions: answer.warnings.map((warning) => {
+      const { text, remedy } = warningText(warning, messages.warnings, messages.problems);
+      return { text: visibleText(text), remedy: visibleText(remedy) };
+    }),
+    assumptions: answer.assumptions.map((assumption) => ({
+      path: visibleText(assumption.path),
+      text: visibleText(assumptionText(assumption, messages.assumptions)),
     })),
-    assumptions: document.assumptions.map(({ path, text }) => ({ path: visibleText(path), text: visibleText(text) })),
+    days: answer.columns.hours / 24,
     months: monthlyEnergy(input).text,
   };
 }
@@ -29,7 +34,7 @@ function tilesOf({ document, words, figures }: ReportInput): ShownAnswer['tiles'
   return [
     { name: said.electricity, value: figures.number(annual.electricity.total, 0), unit: 'kWh' },
     { name: said.factor, value: figures.factor(annual.seasonalFactor.h4), unit: 'H4' },
-    { name: BACKUP_HOURS[words.language], value: figures.number(annual.backupHours, 0), unit: 'h' },
+    { name: said.backupHours, value: figures.number(annual.backupHours, 0), unit: 'h' },
     ...(first === undefined
       ? []
       : [{ name: said.cost, value: figures.number(first.systemTotal, 0), unit: visibleText(first.currency) }]),

@@ -1,3 +1,4 @@
+import type { BlankWords } from '../../src/report/language/english/blankFiles.ts';
 import type { SheetFile } from './memorySource.ts';
 
 /** Where the scenario of a blank start is kept. */
@@ -5,15 +6,15 @@ export const BLANK_SCENARIO = 'house.yaml';
 export const BLANK_UNIT = 'unit.yaml';
 
 /** A scenario in which everything still has to be entered. */
-function blankScenario(zone: string): string {
-  return `# A house, entered in the sheet. Comments may be added anywhere; they stay.
-name: New house
+function blankScenario(zone: string, words: BlankWords): string {
+  return `# ${words.houseSays}
+name: ${words.house}
 currency: EUR
 
 site:
   zone: ${JSON.stringify(zone)}
 
-# Hourly weather of one year.
+# ${words.weatherSays}
 weather:
   file: weather.csv
 
@@ -29,7 +30,7 @@ flowTemperature:
 heatPump:
   unit: ${BLANK_UNIT}
 
-# Electricity tariffs to compare; the first is the present one.
+# ${words.tariffsSay}
 tariffs: []
 `;
 }
@@ -42,35 +43,35 @@ const EMPTY_TABLE = `      outdoor, 35, 45, 55
            12,   ,   ,
 `;
 
-const BLANK_UNIT_TEXT = `# A heat-pump unit, as its data sheet prints it.
-name: New unit
+const blankUnit = (words: BlankWords) => `# ${words.unitSays}
+name: ${words.unit}
 
 map:
   fullLoad:
-    # Heat, kW
+    # ${words.capacitySays}
     capacity: |
-${EMPTY_TABLE}    # Heat out per unit of electricity in
+${EMPTY_TABLE}    # ${words.copSays}
     cop: |
 ${EMPTY_TABLE}
 defrost: { method: included }
 `;
 
 /** A new tariff file. */
-export function blankTariff(name: string): string {
-  return `name: ${JSON.stringify(name)}
+export function blankTariff(number: number, words: BlankWords): string {
+  return `name: ${JSON.stringify(words.tariff(number))}
 
-# The first rate that fits a minute prices it; one without times takes what is left.
+# ${words.ratesSay}
 pricesStated: withTax
 rates:
-  - { name: all hours }
+  - { name: ${words.allHours} }
 
 standing: {}
 `;
 }
 
 /** Files of a blank start. */
-export function blankFiles(zone: string): SheetFile[] {
-  return [fileOf(BLANK_SCENARIO, blankScenario(zone)), fileOf(BLANK_UNIT, BLANK_UNIT_TEXT)];
+export function blankFiles(zone: string, words: BlankWords): SheetFile[] {
+  return [fileOf(BLANK_SCENARIO, blankScenario(zone, words)), fileOf(BLANK_UNIT, blankUnit(words))];
 }
 
 /** A file of some text. */

@@ -1,15 +1,19 @@
 import type { EntryPath } from '../../src/scenario/entries/pathText.ts';
 import { entryOf } from '../../src/scenario/entries/schemaField.ts';
 import { keptAnswer } from './keptAnswer.ts';
+import { folderOf, type SheetFile } from './memorySource.ts';
 import { rawOf } from './sheetActions.ts';
 import type { SheetModel } from './sheetModel.ts';
-import { withEntry } from './yamlEdit.ts';
+import { fileOf } from './startFiles.ts';
+import { unitOfSize } from './unitOfSize.ts';
+import { type Written, withEntry } from './yamlEdit.ts';
 
 /** How a variant differs from the files: kelvins, and shares of today's. */
 export interface Changes {
   readonly flow: number;
   readonly rooms: number;
   readonly heatLoss: number;
+  readonly size: number;
   readonly electricity: number;
   readonly fuel: number;
 }
@@ -37,10 +41,14 @@ export interface VariantResult {
 export function runVariant(model: SheetModel, changes: Changes): VariantResult | undefined {
   const { box } = model;
   const edits = scenarioEdits(rawOf(box, box.scenario), changes);
+  const unit = changes.size === 0 ? undefined : sizedUnit(model, 1 + changes.size);
+  if (unit !== undefined) edits.list.push({ path: ['heatPump', 'unit'], value: box.nameFromScenario(unit.name) });
+  else if (changes.size !== 0) edits.idle.push('size');
   let text: string | undefined = box.text(box.scenario);
   for (const { path, value } of edits.list) text = text && withEntry(text, path, value);
   if (text === undefined) return undefined;
-  const { answer } = keptAnswer(box.scenario, box.sourceWith(text), model.kept);
+  const source = box.sourceOver([fileOf(box.scenario, text), ...(unit === undefined ? [] : [unit])]);
+  const { answer } = keptAnswer(box.scenario, source, model.kept);
   if (answer === undefined) return undefined;
   const { totals, factors, costs } = answer;
   const [first] = costs;
@@ -58,6 +66,22 @@ export function runVariant(model: SheetModel, changes: Changes): VariantResult |
   };
 }
 
+/** The unit in another size, as a file beside its own: its name says the size, so that each size is prepared once. */
+function sizedUnit({ box }: SheetModel, factor: number): SheetFile | undefined {
+  const name = entryOf(entryOf(rawOf(box, box.scenario), 'heatPump'), 'unit');
+  const { source } = box;
+  const unit = typeof name === 'string' ? source.find(name, box.scenario).file?.name : undefined;
+  if (unit === undefined) return undefined;
+  const textOf = (file: string) => {
+    const found = source.find(file, unit).file;
+    return found && box.text(found.name);
+  };
+  const text = unitOfSize(rawOf(box, unit), factor, textOf);
+  const folder = folderOf(box.scenario);
+  const sized = `unit of ${factor.toFixed(2)} times its size.yaml`;
+  return text === undefined ? undefined : fileOf(folder === '' ? sized : `${folder}/${sized}`, text);
+}
+
 interface EnergyCosts {
   readonly electricityEnergy: number;
   readonly fuelEnergy: number;
@@ -69,7 +93,7 @@ function dearer(cost: EnergyCosts, { electricity, fuel }: Changes): number {
 
 interface Edit {
   readonly path: EntryPath;
-  readonly value: number | readonly (readonly number[])[];
+  readonly value: Written;
 }
 
 function scenarioEdits(raw: unknown, { flow, rooms, heatLoss }: Changes): { list: Edit[]; idle: (keyof Changes)[] } {
@@ -91,11 +115,28 @@ function scenarioEdits(raw: unknown, { flow, rooms, heatLoss }: Changes): { list
     tell('rooms', [...shift(['house', 'need', 'setPoint'], rooms, 20), ...ofBase]);
   }
   if (heatLoss !== 0) {
-    const value = at('house', 'heatLoss', 'value');
-    const path = ['house', 'heatLoss', 'value'];
-    tell('heatLoss', typeof value === 'number' ? [{ path, value: value * (1 + heatLoss) }] : []);
+    const value = heatLossTimes(at('house', 'heatLoss'), 1 + heatLoss);
+    tell('heatLoss', value === undefined ? [] : [{ path: ['house', 'heatLoss'], value }]);
   }
   return { list, idle };
+}
+
+/** A heat loss times a factor; of elements every area, length and volume grows, so that their shares stay. */
+function heatLossTimes(heatLoss: unknown, factor: number): Written {
+  if (typeof heatLoss !== 'object' || heatLoss === null) return undefined;
+  const scaled = (entry: unknown, key: string): unknown => {
+    const value = entryOf(entry, key);
+    if (typeof entry !== 'object' || entry === null) return entry;
+    return typeof value === 'number' ? { ...entry, [key]: value * factor } : entry;
+  };
+  const list = (key: string, of: string) => {
+    const entries = entryOf(heatLoss, key);
+    return Array.isArray(entries) ? { [key]: entries.map((entry) => scaled(entry, of)) } : {};
+  };
+  const air = entryOf(heatLoss, 'ventilation');
+  const whole = { ...list('elements', 'area'), ...list('thermalBridges', 'length') };
+  const changed = { ...heatLoss, ...whole, ...(air === undefined ? {} : { ventilation: scaled(air, 'volume') }) };
+  return (Array.isArray(entryOf(heatLoss, 'elements')) ? changed : scaled(heatLoss, 'value')) as Written;
 }
 
 function flowEdits(points: unknown, by: number, shift: (path: EntryPath, by: number) => Edit[]): Edit[] {

@@ -1,6 +1,8 @@
 import { pathOfText } from '../../src/scenario/entries/pathText.ts';
 import type { Told } from '../model/formNode.ts';
+import type { ShownAnswer } from '../model/sheetState.ts';
 import { state, words } from '../sheet.ts';
+import { Announced } from './Announced.tsx';
 import { Drawn } from './Drawn.tsx';
 import { fieldId } from './fieldId.ts';
 import { Hours } from './Hours.tsx';
@@ -16,18 +18,21 @@ export function AnswerPane() {
   return (
     <section class="answer" id="answer" aria-labelledby="answer-title" tabIndex={-1}>
       <h2 id="answer-title">{said.answer}</h2>
-      <div aria-live="polite">
-        {errors.length > 0 && <Faults title={said.noAnswer} told={errors} />}
-        {now.answer?.sentences.map((sentence) => (
-          <p class="sentence" key={sentence}>
-            <bdi>{sentence}</bdi>
-          </p>
-        ))}
-      </div>
+      {errors.length > 0 && <Faults title={said.noAnswer} told={errors} />}
+      {now.answer?.sentences.map((sentence, i) => (
+        <p class="sentence" key={i}>
+          <bdi>{sentence}</bdi>
+        </p>
+      ))}
+      <Announced text={errors.length > 0 ? `${said.noAnswer} ${errors[0].says}` : sentencesOf(now.answer)} />
       {warnings.length > 0 && <Faults title={said.warnings} told={warnings} />}
       <Figures />
     </section>
   );
+}
+
+function sentencesOf(answer: ShownAnswer | undefined): string {
+  return answer?.sentences.join(' ') ?? '';
 }
 
 function Faults({ title, told }: { readonly title: string; readonly told: readonly Told[] }) {
@@ -36,7 +41,7 @@ function Faults({ title, told }: { readonly title: string; readonly told: readon
       <h3>{title}</h3>
       <ul>
         {told.map(({ place, file, path, says, cure, severity }) => (
-          <li key={place + path + says} class={severity} lang="en">
+          <li key={place + path + says} class={severity}>
             <a href={`#${fieldId(file, pathOfText(path))}`}>{place}</a> <bdi>{says}</bdi>{' '}
             <span class="cure">→ {cure}</span>
           </li>
@@ -74,12 +79,9 @@ function Figures() {
         <div class="faults">
           <h3>{said.warnings}</h3>
           <ul>
-            {shown.cautions.map(({ plain, text, remedy }) => (
+            {shown.cautions.map(({ text, remedy }) => (
               <li key={text} class="warning">
-                {plain} <span lang="en">{text}</span>{' '}
-                <span class="cure" lang="en">
-                  → {remedy}
-                </span>
+                <span>{text}</span> <span class="cure">→ {remedy}</span>
               </li>
             ))}
           </ul>
@@ -90,7 +92,7 @@ function Figures() {
       <Hours />
       <details>
         <summary>{said.assumptions}</summary>
-        <ul class="small" lang="en">
+        <ul class="small">
           {shown.assumptions.map(({ path, text }) => (
             <li key={path + text}>
               <code>{path}</code> {text}

@@ -19,7 +19,7 @@ export function Field({ node }: { readonly node: FieldNode }) {
         <Typed node={node} id={id} wrong={wrong} />
       )}
       <p class="says" id={`${id}-says`}>
-        <span lang="en">{node.says}</span> <Range node={node} />
+        <span>{node.says}</span> <Range node={node} />
       </p>
       <Problems id={`${id}-wrong`} problems={node.problems} />
     </div>
@@ -79,11 +79,7 @@ function Choice({ node, id, wrong }: Of) {
     >
       {(!known || !node.required) && (
         <option value={known ? '' : node.written}>
-          {known || node.written === ''
-            ? node.assumed === undefined
-              ? said.choose
-              : said.assumed(node.assumed)
-            : node.written}
+          {known || node.written === '' ? unchosen(node) : node.written}
         </option>
       )}
       {choices.map(({ value, label }) => (
@@ -93,6 +89,13 @@ function Choice({ node, id, wrong }: Of) {
       ))}
     </select>
   );
+}
+
+/** What a choice shows as long as nothing is chosen. */
+function unchosen({ assumed, required }: FieldNode): string {
+  const said = words.value;
+  if (assumed !== undefined) return said.assumed(assumed);
+  return required ? said.choose : said.nothing;
 }
 
 function Range({ node }: { readonly node: FieldNode }) {
@@ -111,7 +114,7 @@ export function Problems({ id, problems }: { readonly id?: string; readonly prob
   return (
     <div id={id} class="told">
       {problems.map(({ severity, says, cure, path }) => (
-        <p key={path + says} class={severity} lang="en">
+        <p key={path + says} class={severity}>
           <bdi>{says}</bdi> <span class="cure">→ {cure}</span>
         </p>
       ))}

@@ -1,11 +1,12 @@
 import { useState } from 'preact/hooks';
 import type { MapCell, MapGrid } from '../model/mapTables.ts';
-import { laidOn, pastedCells } from '../model/pastedTable.ts';
+import { isPastedTable, laidOn, listedPoints, pastedCells } from '../model/pastedTable.ts';
 import { act, words } from '../sheet.ts';
 import { fieldId } from './fieldId.ts';
 
 /** A table of a unit: cells to type into, to paste into, marked where a point is odd. */
-export function Grid({ grid }: { readonly grid: MapGrid }) {
+export function Grid({ grid, all }: { readonly grid: MapGrid; readonly all: readonly MapGrid[] }) {
+  const siblings = all.filter(({ level }) => level === grid.level);
   const said = words.value.grid;
   const { file, path, cells, quantity } = grid;
   const texts = cells.map((row) => row.map(({ text }) => text));
@@ -16,6 +17,7 @@ export function Grid({ grid }: { readonly grid: MapGrid }) {
   return (
     <div class="grid" id={id} tabIndex={-1}>
       {quantity === 'capacity' ? <h4>{name}</h4> : <Second grid={grid} />}
+      {grid.own !== undefined && <p class="small">{grid.own}</p>}
       <div class="wide">
         <table>
           <caption class="hidden">{name}</caption>
@@ -29,7 +31,11 @@ export function Grid({ grid }: { readonly grid: MapGrid }) {
                       corner={r === 0 && c === 0}
                       name={cellName(texts, r, c)}
                       onText={(text) => write(laidOn(texts, [[text]], [r, c]))}
-                      onPaste={(text) => write(laidOn(texts, pastedCells(text), [r, c]))}
+                      onPaste={(text) => {
+                        const points = listedPoints(text);
+                        if (points === undefined) write(laidOn(texts, pastedCells(text), [r, c]));
+                        else writePoints(grid, siblings, points);
+                      }}
                     />
                   </td>
                 ))}
@@ -39,7 +45,7 @@ export function Grid({ grid }: { readonly grid: MapGrid }) {
         </table>
       </div>
       {told.map(({ text, r, c }) => (
-        <p class="warning" key={`${r} ${c} ${text}`} lang="en">
+        <p class="warning" key={`${r} ${c} ${text}`}>
           {text}
         </p>
       ))}
@@ -51,6 +57,18 @@ export function Grid({ grid }: { readonly grid: MapGrid }) {
       </button>
     </div>
   );
+}
+
+/** A list of points fills both tables of its level: the heat, and what stands behind it. */
+function writePoints(grid: MapGrid, siblings: readonly MapGrid[], [heat, second]: [string[][], string[][]]): void {
+  const isFull = second.some((row, r) => r > 0 && row.some((cell, c) => c > 0 && cell !== ''));
+  if (!isFull) {
+    act({ do: 'table', file: grid.file, path: grid.path, cells: heat });
+    return;
+  }
+  for (const { file, path, quantity } of siblings) {
+    act({ do: 'table', file, path, cells: quantity === 'capacity' ? heat : second });
+  }
 }
 
 function cellName(texts: readonly (readonly string[])[], r: number, c: number): string {
@@ -94,7 +112,7 @@ function Cell({ cell, corner, name, onText, onPaste }: CellOf) {
   const [typed, setTyped] = useState<string | undefined>(undefined);
   const paste = (event: ClipboardEvent) => {
     const text = event.clipboardData?.getData('text/plain') ?? '';
-    if (!/[\t\n]/.test(text)) return;
+    if (!isPastedTable(text)) return;
     event.preventDefault();
     setTyped(undefined);
     onPaste(text);

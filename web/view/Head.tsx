@@ -12,6 +12,7 @@ import {
   startBlank,
   state,
   takeFiles,
+  unreadable,
   wipeDraft,
   words,
 } from '../sheet.ts';
@@ -53,6 +54,11 @@ export function Head() {
         {said.drop} {said.stays}
       </p>
       {refused.value.length > 0 && <p class="error">{said.refused(refused.value.join(', '))}</p>}
+      {unreadable.value && (
+        <p class="error" role="alert">
+          {said.unreadable}
+        </p>
+      )}
       {fault.value !== undefined && (
         <p class="error" role="alert">
           {said.fault} {fault.value}

@@ -1,10 +1,8 @@
 import { useState } from 'preact/hooks';
 import type { ExplainDocument } from '../../src/report/explainSchema.ts';
-import { explain, explainedHour, pictures, words } from '../sheet.ts';
+import { explain, explainedHour, language, pictures, state, words } from '../sheet.ts';
 import { Drawn } from './Drawn.tsx';
 import { hourOfClick } from './hourOfClick.ts';
-
-const DAYS = 365;
 
 /** The year as pictures; an hour that is clicked, or chosen below them, is explained. */
 export function Hours() {
@@ -12,13 +10,14 @@ export function Hours() {
   const [hour, setHour] = useState(6);
   const said = words.value;
   const drawn = pictures.value;
-  if (drawn === undefined) return null;
+  const days = state.value?.answer?.days;
+  if (days === undefined || drawn === undefined || drawn.carpets.length === 0) return null;
   const click = (event: MouseEvent) => {
     const drawing = event.target instanceof Element ? event.target.closest('svg') : null;
     const matrix = drawing?.getScreenCTM();
     if (!matrix) return;
     const point = new DOMPoint(event.clientX, event.clientY).matrixTransform(matrix.inverse());
-    const found = hourOfClick(point.x, point.y, DAYS);
+    const found = hourOfClick(point.x, point.y, days);
     if (found === undefined) return;
     setDay(Math.floor(found / 24) + 1);
     setHour(found % 24);
@@ -43,7 +42,7 @@ export function Hours() {
       >
         <label>
           {said.pickDay}
-          <input type="number" min={1} max={366} value={day} onInput={(e) => setDay(e.currentTarget.valueAsNumber)} />
+          <input type="number" min={1} max={days} value={day} onInput={(e) => setDay(e.currentTarget.valueAsNumber)} />
         </label>
         <label>
           {said.pickHour}
@@ -58,7 +57,7 @@ export function Hours() {
 
 function Explained({ found }: { readonly found: ExplainDocument }) {
   return (
-    <div class="explained" lang="en">
+    <div class="explained">
       <h4>{found.hour.civilTime}</h4>
       {found.stages.map((stage) => (
         <details key={stage.stage} open={stage.figures.length > 0 && stage.stage !== 'lowestMap'}>
@@ -71,7 +70,7 @@ function Explained({ found }: { readonly found: ExplainDocument }) {
               <div key={name}>
                 <dt>{label}</dt>
                 <dd>
-                  {String(Number(value.toPrecision(6)))} {unit === '1' ? '' : unit}
+                  {sixDigits(value)} {unit === '1' ? '' : unit}
                 </dd>
               </div>
             ))}
@@ -85,4 +84,9 @@ function Explained({ found }: { readonly found: ExplainDocument }) {
       ))}
     </div>
   );
+}
+
+function sixDigits(value: number): string {
+  const text = String(Number(value.toPrecision(6))).replace('-', '−');
+  return language.value === 'de' ? text.replace('.', ',') : text;
 }

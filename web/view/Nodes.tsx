@@ -2,6 +2,7 @@ import { pathText } from '../../src/scenario/entries/pathText.ts';
 import type { FormNode, ListNode, SectionNode } from '../model/formNode.ts';
 import { act, words } from '../sheet.ts';
 import { Field, Problems } from './Field.tsx';
+import { Fold } from './Fold.tsx';
 import { fieldId } from './fieldId.ts';
 
 /** Entries in their order; those that may be left out and are seldom asked for stand behind a fold. */
@@ -17,20 +18,20 @@ export function Nodes({ nodes }: { readonly nodes: readonly FormNode[] }) {
           ))}
       </div>
       {folded.length > 0 && (
-        <details open={folded.some(hasProblem) || undefined}>
-          <summary>{words.value.more}</summary>
+        <Fold name={words.value.more} wrong={folded.some(hasProblem)}>
           <div class="fields">
             {folded.map((node) => (
               <Node key={pathText(node.path)} node={node} />
             ))}
           </div>
-        </details>
+        </Fold>
       )}
     </>
   );
 }
 
-function hasProblem(node: FormNode): boolean {
+/** Whether something in an entry has to be put right. */
+export function hasProblem(node: FormNode): boolean {
   if (node.problems.some(({ severity }) => severity === 'error')) return true;
   if (node.kind === 'field') return false;
   return node.kind === 'section'
@@ -52,9 +53,7 @@ function Section({ node }: { readonly node: SectionNode }) {
         <button type="button" onClick={() => act({ do: 'add', file, path })}>
           {said.add(label)}
         </button>{' '}
-        <span class="says" lang="en">
-          {says}
-        </span>
+        <span class="says">{says}</span>
         <Problems problems={problems} />
       </div>
     );
@@ -62,9 +61,7 @@ function Section({ node }: { readonly node: SectionNode }) {
   return (
     <fieldset class={path.length === 1 ? 'section whole' : 'section'} id={fieldId(file, path)} tabIndex={-1}>
       <legend>{label}</legend>
-      <p class="says" lang="en">
-        {says}
-      </p>
+      <p class="says">{says}</p>
       <Problems problems={problems} />
       <Nodes nodes={children} />
       {optional && (
@@ -82,9 +79,7 @@ function List({ node }: { readonly node: ListNode }) {
   return (
     <fieldset class="section" id={fieldId(file, path)} tabIndex={-1}>
       <legend>{label}</legend>
-      <p class="says" lang="en">
-        {says}
-      </p>
+      <p class="says">{says}</p>
       <Problems problems={problems} />
       {items.map((item, i) => (
         <fieldset class="item" key={pathText(item.path)}>

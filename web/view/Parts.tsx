@@ -1,9 +1,11 @@
 import type { BesideState, PartState, SheetState } from '../model/sheetState.ts';
 import { act, pictures, state, words } from '../sheet.ts';
 import { Drawn } from './Drawn.tsx';
+import { Fold } from './Fold.tsx';
 import { fieldId } from './fieldId.ts';
 import { Grid } from './Grid.tsx';
-import { Nodes } from './Nodes.tsx';
+import { hasProblem, Nodes } from './Nodes.tsx';
+import { Weather } from './Weather.tsx';
 
 /** The parts of the visit, each with its fields and the files that belong to it. */
 export function Parts() {
@@ -28,6 +30,9 @@ export function Parts() {
   );
 }
 
+/** Entries that stand with their files, or behind them. */
+const STAND_ELSEWHERE = new Set(['tariffs', 'backup']);
+
 function Part({ part, now }: { readonly part: PartState; readonly now: SheetState }) {
   const said = words.value;
   return (
@@ -35,30 +40,15 @@ function Part({ part, now }: { readonly part: PartState; readonly now: SheetStat
       <h3 id={`title-${part.id}`}>{said.parts[part.id]}</h3>
       {part.nodes.length === 0 && <p>{said.gone}</p>}
       {part.id === 'tariffs' && <Tariffs now={now} />}
-      <Nodes nodes={part.nodes.filter(({ path }) => path[0] !== 'tariffs')} />
-      {part.id === 'place' && <Weather now={now} />}
-      {part.id === 'heatPump' && <Unit now={now} />}
+      <Nodes nodes={part.nodes.filter(({ path }) => !STAND_ELSEWHERE.has(String(path[0])))} />
+      {part.id === 'place' && now.weather !== undefined && <Weather weather={now.weather} />}
+      {part.id === 'heatPump' && (
+        <>
+          <Unit now={now} />
+          <Nodes nodes={part.nodes.filter(({ path }) => path[0] === 'backup')} />
+        </>
+      )}
     </section>
-  );
-}
-
-function Weather({ now: { weather } }: { readonly now: SheetState }) {
-  const said = words.value;
-  if (weather === undefined) return null;
-  return (
-    <div class="beside">
-      <h4>{said.weatherLines}</h4>
-      <ul class="small" lang="en">
-        {weather.lines.map((line) => (
-          <li key={line}>{line}</li>
-        ))}
-      </ul>
-      <details>
-        <summary>{said.weatherHead}</summary>
-        {/* biome-ignore lint/a11y/noNoninteractiveTabindex: a block that scrolls is reached by keys */}
-        <pre tabIndex={0}>{weather.head.join('\n')}</pre>
-      </details>
-    </div>
   );
 }
 
@@ -69,11 +59,13 @@ function Unit({ now: { unit, grids } }: { readonly now: SheetState }) {
     <fieldset class="beside">
       <legend>{unit.name}</legend>
       <p class="says">{said.grid.says}</p>
-      {grids.map((grid) => (
-        <Grid key={grid.path.join('.')} grid={grid} />
-      ))}
+      <div class="grids">
+        {grids.map((grid) => (
+          <Grid key={grid.path.join('.')} grid={grid} all={grids} />
+        ))}
+      </div>
+      {pictures.value?.map !== undefined && <Drawn html={pictures.value.map} class="map" />}
       <Nodes nodes={unit.nodes} />
-      {pictures.value !== undefined && <Drawn html={pictures.value.map} />}
       <FileText name={unit.name} text={unit.text} />
     </fieldset>
   );
@@ -84,14 +76,13 @@ function Tariffs({ now: { tariffs } }: { readonly now: SheetState }) {
   return (
     <>
       {tariffs.map((tariff: BesideState) => (
-        <fieldset class="beside" key={tariff.name}>
-          <legend>{tariff.name}</legend>
+        <Fold key={tariff.name} class="beside" name={titleOf(tariff)} wrong={tariff.nodes.some(hasProblem)}>
           <Nodes nodes={tariff.nodes} />
           <FileText name={tariff.name} text={tariff.text} />
           <button type="button" class="quiet" onClick={() => act({ do: 'removeTariff', name: tariff.name })}>
             {said.remove(tariff.name)}
           </button>
-        </fieldset>
+        </Fold>
       ))}
       <p>
         <button type="button" onClick={() => act({ do: 'addTariff' })}>
@@ -100,6 +91,12 @@ function Tariffs({ now: { tariffs } }: { readonly now: SheetState }) {
       </p>
     </>
   );
+}
+
+/** What a tariff is called, and its file. */
+function titleOf({ name, nodes }: BesideState): string {
+  const title = nodes.find(({ path }) => path[0] === 'name');
+  return title?.kind === 'field' && title.written !== '' ? `${title.written} (${name})` : name;
 }
 
 function FileText({ name, text }: { readonly name: string; readonly text: string }) {

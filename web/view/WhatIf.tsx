@@ -5,7 +5,7 @@ import { ask } from '../askWorker.ts';
 import type { Changes, VariantResult } from '../model/whatIfRun.ts';
 import { fault, language, revision, words } from '../sheet.ts';
 
-const NOTHING: Changes = { flow: 0, rooms: 0, heatLoss: 0, electricity: 0, fuel: 0 };
+const NOTHING: Changes = { flow: 0, rooms: 0, heatLoss: 0, size: 0, electricity: 0, fuel: 0 };
 const MOST_KEPT = 4;
 
 /** How far a slider goes, in the units that it shows, and what one of them means. */
@@ -13,6 +13,7 @@ const REACH = {
   flow: { least: -15, most: 15, unit: 1 },
   rooms: { least: -4, most: 4, unit: 1 },
   heatLoss: { least: -60, most: 60, unit: 0.01 },
+  size: { least: -60, most: 100, unit: 0.01 },
   electricity: { least: -60, most: 100, unit: 0.01 },
   fuel: { least: -60, most: 100, unit: 0.01 },
 } as const;
@@ -105,13 +106,15 @@ export function WhatIf() {
 function Slider({ name }: { readonly name: keyof Changes }) {
   const { least, most, unit } = REACH[name];
   const shown = Math.round(changes.value[name] / unit);
+  const value = shown > 0 ? `+${shown}` : String(shown).replace('-', '−');
+  const id = `slider-${name}`;
   return (
-    <label>
-      <span>
-        {words.value.sliders[name]} <output>{shown > 0 ? `+${shown}` : String(shown).replace('-', '−')}</output>
-      </span>
+    <div>
+      <label for={id}>{words.value.sliders[name]}</label> <b aria-hidden="true">{value}</b>
       <input
+        id={id}
         type="range"
+        aria-valuetext={value}
         min={least}
         max={most}
         step={1}
@@ -120,7 +123,7 @@ function Slider({ name }: { readonly name: keyof Changes }) {
           changes.value = { ...changes.value, [name]: event.currentTarget.valueAsNumber * unit };
         }}
       />
-    </label>
+    </div>
   );
 }
 
@@ -152,8 +155,11 @@ function Compared() {
             {(Object.keys(said.rows) as (keyof typeof said.rows)[]).map((row) => (
               <tr key={row}>
                 <th scope="row">{said.rows[row]}</th>
-                {columns.map(({ name, result }) => (
-                  <td key={name}>{cellText(row, result)}</td>
+                {columns.map(({ name, result }, i) => (
+                  <td key={name}>
+                    {cellText(row, result)}
+                    {i > 0 && <small class="difference">{differenceText(row, result, base.value)}</small>}
+                  </td>
                 ))}
               </tr>
             ))}
@@ -191,18 +197,29 @@ function About({ variant }: { readonly variant: Variant }) {
   );
 }
 
-function cellText(row: keyof ReturnType<typeof rowsOf>, result: Result | undefined): string {
-  return result === undefined || result === 'refused' ? '–' : rowsOf(result)[row];
+/** Decimals of each figure. */
+const DECIMALS = { electricity: 0, factor: 2, backupHours: 0, unmetHeat: 0, cost: 0, boiler: 0 } as const;
+type Row = keyof typeof DECIMALS;
+
+function cellText(row: Row, result: Result | undefined): string {
+  const value = figureOf(row, result);
+  if (value === undefined || result === undefined || result === 'refused') return '–';
+  const figures = localFigures(language.value === 'de' ? ',' : '.');
+  const isMoney = row === 'cost' || row === 'boiler';
+  return isMoney ? figures.money(value, result.currency) : figures.number(value, DECIMALS[row]);
 }
 
-function rowsOf(result: VariantResult) {
-  const figures = localFigures(language.value === 'de' ? ',' : '.');
-  const { currency, cost, boilerCost } = result;
-  return {
-    electricity: figures.number(result.electricity, 0),
-    factor: figures.factor(result.factor),
-    backupHours: figures.number(result.backupHours, 0),
-    cost: cost === undefined ? '–' : figures.money(cost, currency),
-    boiler: boilerCost === undefined ? '–' : figures.money(boilerCost, currency),
-  };
+/** How much more or less than as filed, with its sign; nothing where it prints as none. */
+function differenceText(row: Row, result: Result | undefined, filed: Result | undefined): string {
+  const [value, other] = [figureOf(row, result), figureOf(row, filed)];
+  if (value === undefined || other === undefined) return '';
+  const text = localFigures(language.value === 'de' ? ',' : '.').number(Math.abs(value - other), DECIMALS[row]);
+  return /[1-9]/.test(text) ? `${value > other ? '+' : '−'}${text}` : '';
+}
+
+function figureOf(row: Row, result: Result | undefined): number | undefined {
+  if (result === undefined || result === 'refused') return undefined;
+  if (row === 'boiler') return result.boilerCost;
+  if (row === 'factor') return typeof result.factor === 'number' ? result.factor : undefined;
+  return result[row];
 }

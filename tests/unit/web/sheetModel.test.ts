@@ -4,15 +4,18 @@ import { describe, expect, it } from 'vitest';
 import { documentText } from '../../../src/report/documentText.ts';
 import { makeReport } from '../../../src/report/html/makeReport.ts';
 import { reportPage } from '../../../src/report/html/reportPage.ts';
+import { englishBlank } from '../../../src/report/language/english/blankFiles.ts';
 import { resultDocument } from '../../../src/report/resultDocument.ts';
 import { makeAnswer } from '../../../src/scenario/answer/makeAnswer.ts';
 import { loadScenario } from '../../../src/scenario/loadScenario.ts';
+import type { FileBox } from '../../../web/model/fileBox.ts';
 import type { FormNode } from '../../../web/model/formNode.ts';
 import type { SheetFile } from '../../../web/model/memorySource.ts';
-import { act, takeFiles } from '../../../web/model/sheetActions.ts';
+import { type Action, act as actIn } from '../../../web/model/sheetActions.ts';
 import { SheetModel } from '../../../web/model/sheetModel.ts';
 import { saved } from '../../../web/model/sheetSaves.ts';
 import { blankFiles, fileOf } from '../../../web/model/startFiles.ts';
+import { takeFiles as takeIn } from '../../../web/model/takeFiles.ts';
 import { runVariant } from '../../../web/model/whatIfRun.ts';
 
 const NAMES = [
@@ -46,6 +49,9 @@ function anew(model: SheetModel): string {
 function resultOf(model: SheetModel): string {
   return new TextDecoder().decode(saved(model, 'result')?.bytes);
 }
+
+const act = (box: FileBox, action: Action) => actIn(box, action, englishBlank);
+const takeFiles = (box: FileBox, files: readonly SheetFile[]) => takeIn(box, files, englishBlank);
 
 const house = (...path: (string | number)[]) => ({ file: 'house.yaml', path });
 
@@ -130,7 +136,7 @@ describe('the model of the sheet', () => {
 
   it('runs a variant as if the files said so', () => {
     const model = demoModel();
-    const nothing = { flow: 0, rooms: 0, heatLoss: 0, electricity: 0, fuel: 0 };
+    const nothing = { flow: 0, rooms: 0, heatLoss: 0, size: 0, electricity: 0, fuel: 0 };
     const variant = runVariant(model, { ...nothing, heatLoss: 0.1, rooms: 1 });
     act(model.box, { do: 'write', ...house('house', 'heatLoss', 'value'), text: String(195 * 1.1), input: 'number' });
     act(model.box, { do: 'write', ...house('house', 'need', 'setPoint'), text: '21', input: 'number' });
@@ -145,7 +151,7 @@ describe('the model of the sheet', () => {
 
   it('puts dropped files in the places that their content asks for', () => {
     const model = new SheetModel('1.2.3');
-    model.box.replace(blankFiles('Europe/Berlin'));
+    model.box.replace(blankFiles('Europe/Berlin', englishBlank));
     const byName = new Map(demo.map((file) => [file.name, file]));
     const dropped = ['weather.csv', 'units/quarkenfels-8.yaml', 'tariffs/flat.yaml'].map((name) => byName.get(name)!);
     expect(takeFiles(model.box, dropped)).toEqual([]);

@@ -4,13 +4,14 @@ import { fileURLToPath } from 'node:url';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { parse } from 'yaml';
-import { packTable } from '../../../scripts/packTable.mjs';
+import { englishKeys } from '../../../src/report/language/english/keys.ts';
+import { germanKeys } from '../../../src/report/language/german/keys.ts';
+import { demoFiles } from '../../../web/model/demoFiles.ts';
 import { keyNames } from '../../../web/model/keyNames.ts';
 import { tableText } from '../../../web/model/mapTables.ts';
 import { joined } from '../../../web/model/memorySource.ts';
 import { laidOn, pastedCells } from '../../../web/model/pastedTable.ts';
 import { sha256 } from '../../../web/model/sha256.ts';
-import { unpackTable } from '../../../web/model/unpackTable.ts';
 import { numberIn, writtenValue } from '../../../web/model/writtenValue.ts';
 import { withEntry } from '../../../web/model/yamlEdit.ts';
 import { hourOfClick } from '../../../web/view/hourOfClick.ts';
@@ -35,10 +36,10 @@ describe('SHA-256', () => {
   });
 });
 
-describe('a packed table', () => {
-  it.each(['weather.csv', 'tariffs/prices.csv'])('becomes the same text again: %s', (name) => {
-    const text = readFileSync(fileURLToPath(new URL(`../../../data/demo/${name}`, import.meta.url)), 'utf8');
-    expect(unpackTable(packTable(text))).toBe(text);
+describe('the invented house of the page', () => {
+  it.each(demoFiles)('has the bytes of data/demo: $name', ({ name, bytes }) => {
+    const file = readFileSync(fileURLToPath(new URL(`../../../data/demo/${name}`, import.meta.url)));
+    expect(file.equals(Buffer.from(bytes))).toBe(true);
   });
 });
 
@@ -135,9 +136,9 @@ describe('names and places', () => {
   });
 
   it('of keys are words', () => {
-    expect(keyNames('en')('heatLoss')).toBe('Heat loss');
-    expect(keyNames('de')('heatLoss')).toBe('Wärmeverlust');
-    expect(keyNames('en')('W/m2')).toBe('W/m2');
+    expect(keyNames(englishKeys)('heatLoss')).toBe('Heat loss');
+    expect(keyNames(germanKeys)('heatLoss')).toBe('Wärmeverlust');
+    expect(keyNames(englishKeys)('W/m2')).toBe('W/m2');
   });
 
   it('of a click are the hour below it', () => {
