@@ -2,11 +2,12 @@ import { type Markup, markup } from '../charts/markup.ts';
 import { dataTable, figureColumns } from './dataTable.ts';
 import type { ReportInput } from './reportInput.ts';
 
-/** Seasonal factors with what each counts, in words. */
-export function factorTable({ document, words, figures }: ReportInput): Markup {
+/** Seasonal factors with what each counts, in words, and what field studies of homes have shown. */
+export function factorTable(input: ReportInput): Markup {
+  const { document, words, figures } = input;
   const { factors: said } = words;
   const { h2, h3, h4 } = document.annual.seasonalFactor;
-  return dataTable({
+  const shown = dataTable({
     caption: said.caption,
     columns: figureColumns(said.factor, [said.value, said.counts]).map((column, i) =>
       i === 2 ? { ...column, figures: false } : column,
@@ -17,6 +18,15 @@ export function factorTable({ document, words, figures }: ReportInput): Markup {
       ['H4', figures.factor(h4), said.h4],
     ],
   });
+  return h4 === 'no heat' ? shown : markup`${shown}<p class="note">${said.studies(studies(input))}</p>`;
+}
+
+/** Factors of each place with as many digits as their sources state. */
+function studies({ document: { fieldStudies }, words, figures }: ReportInput): string {
+  const digits = (factor: number) => String(factor).split('.')[1]?.length ?? 0;
+  return fieldStudies
+    .map(({ place, factor }) => `${figures.number(factor, digits(factor))} (${words.factors.places[place] ?? place})`)
+    .join(', ');
 }
 
 /** Months and year: degree days, need, heat by source, electricity, factor. */

@@ -54,6 +54,9 @@ export const englishProfessional = {
     h2: 'the heat of the unit over its own electricity: compressor, fan, controls, standby, crankcase heater',
     h3: 'the heat of unit and backup over the electricity and fuel of both',
     h4: 'as H3, with the pump of the heating circuit: what is bought for heat',
+    studies: (list: string) =>
+      `Field studies of homes found ${list}: ranges to think with, not targets. An allowance can be entered as heatPump.inUseAllowance.`,
+    places: { 'United Kingdom': 'United Kingdom', Germany: 'Germany' } as Readonly<Record<string, string>>,
   },
   running: {
     caption: 'The house, and how the unit runs in the year',

@@ -51,6 +51,9 @@ export const germanProfessional: ProfessionalWords = {
     h2: 'Wärme des Geräts durch seinen eigenen Strom: Verdichter, Ventilator, Regelung, Bereitschaft, Ölsumpfheizung',
     h3: 'Wärme von Gerät und Zusatzheizung durch Strom und Brennstoff beider',
     h4: 'wie H3, mit der Heizkreispumpe: was für Wärme gekauft wird',
+    studies: (list) =>
+      `Feldstudien an Häusern fanden ${list}: Bereiche zum Einordnen, keine Ziele. Ein Abschlag lässt sich als heatPump.inUseAllowance eintragen.`,
+    places: { 'United Kingdom': 'Vereinigtes Königreich', Germany: 'Deutschland' },
   },
   running: {
     caption: 'Das Haus, und wie das Gerät im Jahr läuft',
