@@ -93,10 +93,10 @@ describe('verify', () => {
 
   it('cannot read what is no report', async () => {
     expect(await unreadable('nix.html')).toContain('nix.html  there is no such file');
-    expect(await unreadable(house)).toContain('this is no report of Winterledger');
+    expect(await unreadable(house)).toContain('this is no report of a house by Winterledger');
     const cut = textOf('report.html').slice(0, -2000);
     writeFileSync(at('cut.html'), cut);
-    expect(await unreadable('cut.html')).toContain('cut.html  this is no report of Winterledger');
+    expect(await unreadable('cut.html')).toContain('cut.html  this is no report of a house by Winterledger');
     const broken = changedReport('"form":1', '"form":1,"more":2');
     expect(await unreadable(broken)).toContain('the data in this report are not what a report holds');
   });

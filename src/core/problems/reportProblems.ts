@@ -1,8 +1,8 @@
 /** Problems of reports: those that are read back, and those that a browser prints. */
 export const reportProblems = {
   'report.no-data': {
-    says: 'this is no report of Winterledger: it does not hold the data of one',
-    cure: 'name a file that winterledger report has written, as it was written',
+    says: 'this is no report of a house by Winterledger: it does not hold the data of one',
+    cure: 'name a report of a scenario as winterledger report has written it; the report of a batch is made again from its folder',
   },
   'report.broken-data': {
     says: 'the data in this report are not what a report holds',

@@ -60,8 +60,8 @@ export const problemsOfFiles: Readonly<Record<Codes, ProblemKind>> = {
   },
 
   'report.no-data': {
-    says: 'dies ist kein Bericht von Winterledger: Er enthält dessen Daten nicht',
-    cure: 'nennen Sie eine Datei, die „winterledger report“ geschrieben hat, so wie sie geschrieben wurde',
+    says: 'dies ist kein Bericht über ein Haus von Winterledger: Er enthält dessen Daten nicht',
+    cure: 'nennen Sie den Bericht eines Szenarios, so wie „winterledger report“ ihn geschrieben hat; der Bericht eines Stapels entsteht neu aus seinem Ordner',
   },
   'report.broken-data': {
     says: 'die Daten in diesem Bericht sind nicht die eines Berichts',
