@@ -206,4 +206,18 @@ export const equivalents: readonly Equivalent[] = [
     becomes: '-',
     why: 'a short way for most steps: the way by pieces below comes to the same mean',
   },
+  {
+    file: 'src/sim/totals.ts',
+    text: 'for (let i = 0; i < c.hours; i++) {',
+    was: '<',
+    becomes: '<=',
+    why: 'behind the last hour there is no need and no mark to count',
+  },
+  {
+    file: 'src/tariffs/blockPrices.ts',
+    text: 'for (let first = 0; first < 12; first += length) {',
+    was: '<',
+    becomes: '<=',
+    why: 'a thirteenth month has no kWh, and its cost is written nowhere',
+  },
 ];

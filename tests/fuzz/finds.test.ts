@@ -44,6 +44,11 @@ describe('a number that is none', () => {
     expect(text).not.toMatch(/Infinity|NaN/);
   });
 
+  test('and is all that a file holds is shown as it is written', () => {
+    const { problems } = loadScenario('a.yaml', memoryFiles({ 'a.yaml': '-1e400' }));
+    expect(problems.map(problemText).join()).toContain("a.yaml:1:1  the file holds only '-1e400'");
+  });
+
   test('that only the change of its unit makes is shown as a number', () => {
     // −1.5e307 hPa is −1.5e309 Pa, beyond the numbers of the machine
     const weather = weatherText().replace(/80$/gm, '80,980').replace('humidity %', 'humidity %,pressure hPa');

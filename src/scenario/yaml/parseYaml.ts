@@ -1,4 +1,4 @@
-import { type Document, LineCounter, parseDocument, type YAMLError } from 'yaml';
+import { type Document, isScalar, LineCounter, parseDocument, type YAMLError } from 'yaml';
 import { type Problem, shown } from '../../core/problem.ts';
 import type { InputBytes } from '../fileSource.ts';
 import { guardYaml } from './guardYaml.ts';
@@ -69,8 +69,11 @@ function valuesOf(file: string, parsed: { text: string; document: Document; line
   if (typeof raw === 'object' && raw !== null && !Array.isArray(raw)) {
     return { yaml: new ParsedYamlFile(file, { ...parsed, raw }), problems: [] };
   }
-  const found = Array.isArray(raw) ? 'a list' : raw === null ? 'nothing but comments' : `only '${shown(raw)}'`;
-  const offset = raw === null ? 0 : (parsed.document.contents?.range?.[0] ?? 0);
+  const { contents } = parsed.document;
+  // a number beyond all numbers is shown as it is written
+  const written = isScalar(contents) ? (contents.source ?? raw) : raw;
+  const found = Array.isArray(raw) ? 'a list' : raw === null ? 'nothing but comments' : `only '${shown(written)}'`;
+  const offset = raw === null ? 0 : (contents?.range?.[0] ?? 0);
   return { problems: [problemAt(file, parsed.lines, offset, { code: 'yaml.no-keys', found })] };
 }
 

@@ -60,4 +60,12 @@ describe('seasonal factors', () => {
     expect(backupAlone.h2).toBe('no heat');
     expectNear(backupAlone.h3 as number, 10 / 15);
   });
+
+  test('are no number either where nothing was put in', () => {
+    expect(seasonalFactors({ ...nothing, heatPumpSpaceHeat: 10 })).toEqual({
+      h2: 'no heat',
+      h3: 'no heat',
+      h4: 'no heat',
+    });
+  });
 });
