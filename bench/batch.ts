@@ -47,7 +47,12 @@ export async function benchBatch(say: (line: string) => void): Promise<void> {
     say(
       `peak memory ${peak.toFixed(0)} MB, of ${SMALL} years ${ofSmall.peakMegabytes.toFixed(0)} MB: ${(peak / ofSmall.peakMegabytes).toFixed(2)} times`,
     );
-    const { simulation, pricing } = partsOfJob(small);
+    const options = await timedRun(writeOptions(folder), join(folder, 'out-options'), 2);
+    const { simulation, pricing, bareLoop } = partsOfJob(small);
+    const ofBareLoops = (LARGE / options.seconds) * (bareLoop / 2);
+    say(
+      `${LARGE} options of one home on 2 workers: ${(LARGE / options.seconds).toFixed(0)} years a second, ${(100 * ofBareLoops).toFixed(0)} % of two bare loops`,
+    );
     const percent = (share: number) => `${(100 * share).toFixed(0)} %`;
     say(
       `of a job, ${percent(simulation)} is simulation (hours, months, totals), ${percent(pricing)} pricing (bills, boiler, carbon), ${percent(1 - simulation - pricing)} all else`,
@@ -68,6 +73,23 @@ function writePlan(folder: string, homes: number): string {
   const path = join(folder, `plan-${homes}.yaml`);
   const base = resolve('data/demo/house.yaml');
   writeFileSync(path, `name: bench\nscenario: ${base}\nhomes: { file: homes-${homes}.csv }\n`);
+  return path;
+}
+
+/** A plan of as many options of the demo house: heat loss, unit and flow temperature, each with each. */
+function writeOptions(folder: string): string {
+  const path = join(folder, 'plan-options.yaml');
+  const unit = (name: string) => resolve(`data/demo/units/${name}.yaml`);
+  writeFileSync(
+    path,
+    `name: bench
+scenario: ${resolve('data/demo/house.yaml')}
+axes:
+  - { name: loss, given: range, path: house.heatLoss.value, from: 150, to: 199, step: 1 }
+  - { name: unit, given: values, path: heatPump.unit, values: [${unit('quarkenfels-8')}, ${unit('hollerwisch-6')}] }
+  - { name: flow, given: range, path: flowTemperature.flow, from: 45.1, to: 55, step: 0.1 }
+`,
+  );
   return path;
 }
 
@@ -97,11 +119,18 @@ function peakOf(pid: number): number {
   }
 }
 
+/** Shares of a job's time, and seconds of a year in the bare loop. */
+interface PartsOfJob {
+  readonly simulation: number;
+  readonly pricing: number;
+  readonly bareLoop: number;
+}
+
 /**
  * How a job's time is parted: each home as a job, and beside it what of that is simulation (hours, months, totals) and
  * pricing (bills, boiler, carbon), the same plan in one thread.
  */
-function partsOfJob(planFile: string): { readonly simulation: number; readonly pricing: number } {
+function partsOfJob(planFile: string): PartsOfJob {
   const kept = new Kept();
   const files = new InputFiles(new DiskSource(), kept);
   const { plan } = loadPlan(planFile, files);
@@ -145,7 +174,11 @@ function partsOfJob(planFile: string): { readonly simulation: number; readonly p
     taken.answer += answer;
   }
   if (!Number.isFinite(sink)) throw new Error('a year has no finite figure');
-  return { simulation: taken.simulation / taken.job, pricing: (taken.answer - taken.simulation) / taken.job };
+  return {
+    simulation: taken.simulation / taken.job,
+    pricing: (taken.answer - taken.simulation) / taken.job,
+    bareLoop: taken.simulation / 1e9 / homes.length,
+  };
 }
 
 /** The same scenario with a house of its own, as each home has one. */

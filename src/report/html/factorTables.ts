@@ -18,7 +18,7 @@ export function factorTable(input: ReportInput): Markup {
       ['H4', figures.factor(h4), said.h4],
     ],
   });
-  return h4 === 'no heat' ? shown : markup`${shown}<p class="note">${said.studies(studies(input))}</p>`;
+  return h4 === 'no heat' ? shown : markup`${shown}<p class="small">${said.studies(studies(input))}</p>`;
 }
 
 /** Factors of each place with as many digits as their sources state. */
