@@ -26,6 +26,13 @@ const HIGHEST_SCALE = 15;
 const SMALLEST = 2 ** LOWEST_SCALE;
 const LARGEST = 2 ** (HIGHEST_SCALE + 1);
 
+/** What is the same for every exponent: centres of the intervals, and the scales. */
+const CENTRES = Float64Array.from({ length: INTERVALS }, (_, j) => 1 + (j + 0.5) / INTERVALS);
+const LOGARITHMS = CENTRES.map(Math.log);
+const PER_CENTRE = CENTRES.map((centre) => 1 / centre);
+const STEPS = Float64Array.from({ length: HIGHEST_SCALE - LOWEST_SCALE + 1 }, (_, k) => k + LOWEST_SCALE);
+const PER_SCALE = STEPS.map((step) => powerOfTwo(-step, 1));
+
 /** One number seen as two words; which of them holds the exponent depends on the machine. */
 const asNumber = new Float64Array(1);
 const asWords = new Uint32Array(asNumber.buffer);
@@ -38,15 +45,13 @@ const HIGH = asWords[1] === 0 ? 0 : 1;
  * @param exponent p, above 0 and at most 1
  */
 export function fixedPower(exponent: number): FixedPower {
-  const centres = Float64Array.from({ length: INTERVALS }, (_, j) => 1 + (j + 0.5) / INTERVALS);
-  const steps = Array.from({ length: HIGHEST_SCALE - LOWEST_SCALE + 1 }, (_, k) => k + LOWEST_SCALE);
   const p = exponent;
   return {
     exponent,
-    ofInterval: centres.map((centre) => generalPower(centre, p)),
-    perInterval: centres.map((centre) => 1 / centre),
-    ofScale: Float64Array.from(steps, (step) => powerOfTwo(step, p)),
-    perScale: Float64Array.from(steps, (step) => powerOfTwo(-step, 1)),
+    ofInterval: LOGARITHMS.map((logarithm) => Math.exp(p * logarithm)),
+    perInterval: PER_CENTRE,
+    ofScale: STEPS.map((step) => powerOfTwo(step, p)),
+    perScale: PER_SCALE,
     c1: p,
     c2: (p * (p - 1)) / 2,
     c3: (p * (p - 1) * (p - 2)) / 6,

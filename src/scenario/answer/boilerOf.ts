@@ -28,10 +28,8 @@ export function boilerOf(loaded: LoadedScenario, run: BoilerRun, kept?: Kept): B
   const { boiler, house, hotWater } = loaded.scenario;
   if (boiler === undefined) return undefined;
   const { hotWaterAsked, cylinderLoss } = run.totals.annual;
-  // the need follows from house and weather, whatever the heat pump does with it; sections that a batch leaves as they
-  // were are the same objects as before
-  const sections = hotWater === undefined ? [house, boiler] : [house, boiler, hotWater];
-  const key = kept?.key([...needsOf(loaded, run.plan), ...sections], hotWaterAsked, cylinderLoss) ?? '';
+  // the need follows from house and weather, whatever the heat pump does with it
+  const key = kept?.key(needsOf(loaded, run.plan), house, boiler, hotWater, hotWaterAsked, cylinderLoss) ?? '';
   return boilers.of(kept, key, () => yearOf(loaded, boiler, run));
 }
 

@@ -22,6 +22,7 @@ export const englishSheet = {
   unreadable: 'This browser does not hand over what was dropped: use “Open a folder” or “Open files”.',
   language: 'Language',
   entries: 'What the house is',
+  shortcut: 'Answer and entries',
   parts: {
     house: 'House',
     place: 'Place and weather',

@@ -24,6 +24,7 @@ export const germanSheet: SheetWords = {
     'Dieser Browser gibt nicht heraus, was hereingezogen wurde: „Ordner öffnen“ oder „Dateien öffnen“ nehmen.',
   language: 'Sprache',
   entries: 'Was das Haus ist',
+  shortcut: 'Antwort und Angaben',
   parts: {
     house: 'Haus',
     place: 'Ort und Wetter',
