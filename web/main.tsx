@@ -3,7 +3,7 @@ import { render } from 'preact';
 import { droppedFiles } from './droppedFiles.ts';
 import { begin, takeDropped, words } from './sheet.ts';
 import './sheet.css';
-import { AnswerPane } from './view/Answer.tsx';
+import { AnswerPane, Shortcut } from './view/Answer.tsx';
 import { Foot, Head } from './view/Head.tsx';
 import { Parts } from './view/Parts.tsx';
 
@@ -18,6 +18,7 @@ function Sheet() {
         <AnswerPane />
       </main>
       <Foot />
+      <Shortcut />
       {dragging.value && <div class="dropping">{words.value.dropHere}</div>}
     </>
   );

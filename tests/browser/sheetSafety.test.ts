@@ -4,7 +4,7 @@ import { oneBrowser } from './oneBrowser.ts';
 import { demoText, dropFiles, openFolds, openSheet, sheetFile } from './sheetPage.ts';
 
 const browser = oneBrowser();
-const HOSTILE = '<img src=x onerror=alert(1)></style><script>document.title="got in"</script>';
+const HOSTILE = '<img src=x onerror=document.title="in"></style><script>';
 
 describe('the sheet', () => {
   it('shows hostile text of a scenario, a tariff, a unit and a weather file as text', async () => {
@@ -20,11 +20,11 @@ describe('the sheet', () => {
     await openFolds(page);
     expect(await page.locator('#f-house-yaml-name').inputValue()).toBe(HOSTILE);
     expect(await page.locator('.bars').innerText()).toContain(HOSTILE);
-    expect(await page.locator('.columns').innerText()).toContain('<img src=x onerror=alert(1)>');
+    expect(await page.locator('.columns').innerText()).toContain('<img src=x onerror=');
     await page.locator('#f-house-yaml-currency').fill(HOSTILE);
     await page.locator('#f-house-yaml-currency-wrong .error').waitFor();
     expect(await page.locator('img, #sheet script, #sheet style').count()).toBe(0);
-    expect(await page.title()).not.toContain('got in');
+    expect(await page.title()).not.toBe('in');
     expect({ asked, complaints }).toEqual({ asked: [], complaints: [] });
     await context.close();
   });

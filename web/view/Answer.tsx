@@ -31,6 +31,21 @@ export function AnswerPane() {
   );
 }
 
+/** On a narrow window the answer stands above the entries: this line keeps it in sight while they are changed. */
+export function Shortcut() {
+  const now = state.value;
+  if (now === undefined) return null;
+  const said = words.value;
+  const figures = now.answer?.tiles.filter(({ unit }, i) => i === 0 || (i === 3 && unit !== '')) ?? [];
+  const text = figures.map(({ value, unit }) => `${value}\u00a0${unit}`).join(' · ');
+  return (
+    <nav class="shortcut" aria-label={said.shortcut}>
+      <a href="#answer">{text === '' ? said.answer : text}</a>
+      <a href="#entries">{said.entries}</a>
+    </nav>
+  );
+}
+
 function sentencesOf(answer: ShownAnswer | undefined): string {
   return answer?.sentences.join(' ') ?? '';
 }

@@ -1,14 +1,15 @@
 import { useState } from 'preact/hooks';
 import type { MapCell, MapGrid } from '../model/mapTables.ts';
 import { isPastedTable, laidOn, listedPoints, pastedCells } from '../model/pastedTable.ts';
-import { act, words } from '../sheet.ts';
+import { act, language, words } from '../sheet.ts';
 import { fieldId } from './fieldId.ts';
 
 /** A table of a unit: cells to type into, to paste into, marked where a point is odd. */
 export function Grid({ grid, all }: { readonly grid: MapGrid; readonly all: readonly MapGrid[] }) {
   const siblings = all.filter(({ level }) => level === grid.level);
   const said = words.value.grid;
-  const { file, path, cells, quantity } = grid;
+  const { file, path, quantity } = grid;
+  const cells = grid.cells.map((row) => row.map((cell) => ({ ...cell, text: local(cell.text) })));
   const texts = cells.map((row) => row.map(({ text }) => text));
   const write = (next: readonly (readonly string[])[]) => act({ do: 'table', file, path, cells: next });
   const told = cells.flatMap((row, r) => row.flatMap((cell, c) => cell.told.map((text) => ({ text, r, c }))));
@@ -57,6 +58,11 @@ export function Grid({ grid, all }: { readonly grid: MapGrid; readonly all: read
       </button>
     </div>
   );
+}
+
+/** A number of the file with the decimal sign of the language; it goes back with a point. */
+function local(text: string): string {
+  return language.value === 'de' && /^-?\d+\.\d+$/.test(text) ? text.replace('.', ',') : text;
 }
 
 /** A list of points fills both tables of its level: the heat, and what stands behind it. */
