@@ -49,14 +49,19 @@ function lifeSentences(life: WholeLife, currency: string, words: Words): string[
       value: money(life.netPresentValue, currency),
     }),
     words.payback({
-      simple: simple === 'never' ? words.paybackNever.simple : paybackWords(simple, words),
-      discounted: discounted === 'never' ? words.paybackNever.discounted(years) : paybackWords(discounted, words),
+      simple: simple === 'never' ? words.paybackNever.simple : paybackWords(simple, words, life.years.length),
+      discounted:
+        discounted === 'never'
+          ? words.paybackNever.discounted(years)
+          : paybackWords(discounted, words, life.years.length),
     }),
   ];
 }
 
-function paybackWords(payback: number | 'at once', words: Words): string {
-  return payback === 'at once' ? words.paybackAtOnce : words.paybackYears(figure(payback, 1));
+/** @param life years that are looked at */
+function paybackWords(payback: number | 'at once', words: Words, life: number): string {
+  if (payback === 'at once') return words.paybackAtOnce;
+  return words.paybackYears(figure(payback, 1)) + (payback > life ? words.paybackBeyondLife : '');
 }
 
 /** Rows of electricity prices, columns of fuel prices. */

@@ -70,6 +70,7 @@ export const english = {
     `Over ${years} years at ${rate} a year: net capital ${capital}, net present value ${value}.`,
   payback: ({ simple, discounted }: Said) => `Payback: simple ${simple}; discounted ${discounted}.`,
   paybackYears: (years: string) => `after ${years} years`,
+  paybackBeyondLife: ', longer than what is looked at',
   paybackAtOnce: 'at once, for there is no capital to be paid back',
   paybackNever: { simple: 'never', discounted: (years: string) => `never within ${years} years` },
   sensitivity: 'Saved in a year where a kWh costs more or less than now:',

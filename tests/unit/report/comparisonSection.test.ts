@@ -55,6 +55,10 @@ describe('the comparison with the boiler', () => {
     expect(text).toContain('Payback: simple after 11.3 years; discounted after 14.0 years.');
     const never = section({ wholeLife: { ...wholeLife, simplePayback: 'never', discountedPayback: 'never' } });
     expect(never).toContain('Payback: simple never; discounted never within 20 years.');
+    const late = section({ wholeLife: { ...wholeLife, simplePayback: 141, discountedPayback: 'never' } });
+    expect(late.replace(/\s+/g, ' ')).toContain(
+      'simple after 141.0 years, longer than what is looked at; discounted never',
+    );
     const atOnce = section({ wholeLife: { ...wholeLife, simplePayback: 'at once', discountedPayback: 'at once' } });
     expect(atOnce).toContain('simple at once, for there is no capital to be paid back');
   });
