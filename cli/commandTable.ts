@@ -21,6 +21,8 @@ export interface CommandEntry {
   readonly further?: { readonly argument: string; readonly says: string };
   readonly says: string;
   readonly options: readonly OptionEntry[];
+  /** Whether it runs through many years, so that code compiled for speed pays from the beginning. */
+  readonly isLong?: true;
   /** Lines that run as they stand, from the folder that holds `data/demo`. */
   readonly examples: readonly string[];
   /** Loads the code only when the command is asked for, so that the help starts at once. */
@@ -107,6 +109,7 @@ export const commandTable: readonly CommandEntry[] = [
   },
   {
     name: 'fit',
+    isLong: true,
     argument: 'SCENARIO',
     argumentSays: 'scenario file (YAML); its section readings says how readings become heat',
     says: 'the heat loss that meter readings of the house show, with its uncertainty, ready to put into the scenario',
@@ -146,6 +149,7 @@ export const commandTable: readonly CommandEntry[] = [
   },
   {
     name: 'batch',
+    isLong: true,
     argument: 'PLAN',
     argumentSays: 'plan of a batch (YAML): a base scenario, homes, axes',
     says: 'a year of every home of a plan with every option, a row each; goes on where it was stopped',
@@ -164,6 +168,7 @@ export const commandTable: readonly CommandEntry[] = [
   },
   {
     name: 'gather',
+    isLong: true,
     argument: 'DIR…',
     argumentSays: 'folders with the parts of one batch',
     says: 'joins the parts of a batch that were run with --shard, and says which are missing',
@@ -173,6 +178,7 @@ export const commandTable: readonly CommandEntry[] = [
   },
   {
     name: 'rank',
+    isLong: true,
     argument: 'DIR',
     argumentSays: 'folder with the results of a batch',
     says: 'best and worst years of a batch, how they are spread, and the values of each axis side by side',
@@ -230,6 +236,7 @@ export const commandTable: readonly CommandEntry[] = [
   },
   {
     name: 'sheet',
+    isLong: true,
     argument: '',
     argumentSays: 'takes no file',
     says: 'the sheet: the whole tool as a page in the browser of this machine; it also works from a file, without a network',
