@@ -10,7 +10,7 @@ import { JobRunner } from '../src/batch/runJob.ts';
 import { SectionEntries } from '../src/batch/sectionEntries.ts';
 import { batchLine } from '../src/report/batchCsv.ts';
 import { batchJsonLine } from '../src/report/batchJson.ts';
-import { answerYear } from '../src/scenario/answer/makeAnswer.ts';
+import { answerRow, answerYear } from '../src/scenario/answer/makeAnswer.ts';
 import { InputFiles } from '../src/scenario/inputFiles.ts';
 import { Kept } from '../src/scenario/kept.ts';
 import { type LoadedScenario, scenarioFrom } from '../src/scenario/loadScenario.ts';
@@ -141,7 +141,7 @@ function partsOfJob(planFile: string): PartsOfJob {
   const entries = new SectionEntries();
   const scenarios = homes.map(({ changes }) => {
     const { loaded } = scenarioFrom(entries.of(new JobFile(plan.base, changes)), files);
-    const { year } = loaded === undefined ? {} : answerYear(loaded, { kept });
+    const { year } = loaded === undefined ? {} : answerYear(loaded, kept);
     if (loaded === undefined || year === undefined) throw new Error('a home of the bench cannot be simulated');
     return { loaded, plan: year.plan };
   });
@@ -166,7 +166,7 @@ function partsOfJob(planFile: string): PartsOfJob {
     const simulation = timed(() => totalsOf(year, simulateYear(year, used.year)).annual.electricity);
     // without `kept`'s memory of this home's boiler: a home is new to a batch
     const answer = timed(
-      () => answerYear({ ...loaded, scenario: renewed(loaded.scenario) }, { kept, used }).problems.length,
+      () => answerRow({ ...loaded, scenario: renewed(loaded.scenario) }, { kept, used }).problems.length,
     );
     if (i < 0) continue;
     taken.job += job;

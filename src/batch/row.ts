@@ -1,5 +1,5 @@
 import type { Problem } from '../core/problem.ts';
-import type { YearAnswer } from '../scenario/answer/makeAnswer.ts';
+import type { RowAnswer } from '../scenario/answer/makeAnswer.ts';
 import type { Warning } from '../scenario/answer/warning.ts';
 import type { AxisValue } from './axes.ts';
 import { rowFigures, type TariffFigure } from './rowColumns.ts';
@@ -35,7 +35,7 @@ export interface Row {
 }
 
 /** The figures of a row from the year of its scenario, unrounded. */
-export function rowResult(answer: YearAnswer, warnings: readonly Warning[]): RowResult {
+export function rowResult(answer: RowAnswer, warnings: readonly Warning[]): RowResult {
   const figures: Record<string, number | string> = {};
   for (const { name, of } of rowFigures) {
     const value = of(answer);
@@ -44,9 +44,9 @@ export function rowResult(answer: YearAnswer, warnings: readonly Warning[]): Row
   return {
     currency: answer.loaded.scenario.currency,
     figures,
-    tariffs: answer.costs.map(({ tariff, bill, heatingCost, boilerCost, saving }) => ({
+    tariffs: answer.costs.map(({ tariff, billTotal, heatingCost, boilerCost, saving }) => ({
       name: tariff,
-      total: bill.total,
+      total: billTotal,
       systemTotal: heatingCost,
       ...(boilerCost === undefined ? {} : { boilerTotal: boilerCost }),
       ...(saving === undefined ? {} : { saving }),

@@ -1,11 +1,11 @@
-import type { YearAnswer } from '../scenario/answer/makeAnswer.ts';
+import type { RowAnswer } from '../scenario/answer/makeAnswer.ts';
 
 /** A figure of a result that every row of a batch has; its name is that of the nomenclature. */
 export interface RowFigure {
   readonly name: string;
   readonly unit: string;
   /** The figure, or the word for why there is none; undefined where the scenario does not ask for it. */
-  readonly of: (answer: YearAnswer) => number | string | undefined;
+  readonly of: (answer: RowAnswer) => number | string | undefined;
 }
 
 /** The main figures of a year, in the order of the columns. */

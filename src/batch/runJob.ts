@@ -1,5 +1,5 @@
 import { hasErrors, type Problem } from '../core/problem.ts';
-import { answerYear, type UsedColumns } from '../scenario/answer/makeAnswer.ts';
+import { answerRow, type UsedColumns } from '../scenario/answer/makeAnswer.ts';
 import { warningsOf } from '../scenario/answer/warnings.ts';
 import type { InputFiles } from '../scenario/inputFiles.ts';
 import type { Kept } from '../scenario/kept.ts';
@@ -63,7 +63,7 @@ export class JobRunner {
   #simulate(file: JobFile): Pick<Row, 'result' | 'problems'> {
     const { loaded, problems } = scenarioFrom(this.#entries.of(file), this.#files);
     if (loaded === undefined) return { problems: errorsOf(problems) };
-    const made = answerYear(loaded, { kept: this.#kept, used: this.#usedOf(loaded.clock.hours) });
+    const made = answerRow(loaded, { kept: this.#kept, used: this.#usedOf(loaded.clock.hours) });
     if (made.year === undefined) return { problems: errorsOf(made.problems) };
     return { result: rowResult(made.year, warningsOf(made.year, problems)), problems: [] };
   }

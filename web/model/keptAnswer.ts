@@ -27,7 +27,7 @@ export function keptAnswer(name: string, source: FileSource, kept: Kept): { answ
   const problems = inFileOrder(unordered);
   if (read === undefined) return { problems };
   const loaded = withMeterFiles(read, source);
-  const { year, problems: ofYear } = answerYear(loaded, { kept });
+  const { year, problems: ofYear } = answerYear(loaded, kept);
   if (year === undefined || hasErrors(ofYear)) return { problems: [...problems, ...ofYear] };
   const { costs, plan, totals } = year;
   const comparison = costs[0] && comparisonOf(loaded.scenario, totals, costs[0]);

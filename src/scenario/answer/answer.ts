@@ -62,3 +62,6 @@ export interface Answer {
 
 /** An answer before its warnings and assumptions. */
 export type BareAnswer = Omit<Answer, 'warnings' | 'assumptions'>;
+
+/** A year before its costs: what its warnings are about. */
+export type SeenYear = Omit<BareAnswer, 'costs' | 'comparison'>;

@@ -1,4 +1,4 @@
-import type { BareAnswer } from './answer.ts';
+import type { SeenYear } from './answer.ts';
 import type { SeenWarning } from './warning.ts';
 
 /** Stored water at or above this is the usual guard against legionella, °C (common practice; local codes decide). */
@@ -9,7 +9,7 @@ const COOL_STORE = 55;
 const SCALDING = 60;
 
 /** Cautions of hygiene and scalding, and a cylinder colder than the draw needs. */
-export function hotWaterCautions({ loaded, totals, columns }: BareAnswer): SeenWarning[] {
+export function hotWaterCautions({ loaded, totals, columns }: SeenYear): SeenWarning[] {
   const { hotWater } = loaded.scenario;
   if (hotWater === undefined) return [];
   const list: SeenWarning[] = [];

@@ -14,8 +14,8 @@ import { assumptionsOf } from './assumptions.ts';
 import { boilerOf } from './boilerOf.ts';
 import { carbonOf } from './carbon.ts';
 import { comparisonOf } from './comparison.ts';
-import { costsOf } from './costs.ts';
-import { heatingRuns } from './heatingRuns.ts';
+import { type CostTotals, costsOf, costTotalsOf } from './costs.ts';
+import { type HeatingRun, heatingRuns } from './heatingRuns.ts';
 import { warningsOf } from './warnings.ts';
 
 /**
@@ -41,8 +41,11 @@ export function makeAnswer(
   };
 }
 
-/** An answer as far as a row of a batch needs it: no break-even, no other prices, no whole life. */
+/** An answer before break-even, other prices and whole life. */
 export type YearAnswer = Omit<BareAnswer, 'comparison'>;
+
+/** An answer as far as a row of a batch needs it: of the costs the totals alone. */
+export type RowAnswer = Omit<YearAnswer, 'costs'> & { readonly costs: readonly CostTotals[] };
 
 /** Columns that a year writes over. */
 export interface UsedColumns {
@@ -55,13 +58,39 @@ export interface UsedColumns {
  * The year of a loaded scenario: simulated, priced, beside the boiler.
  *
  * @param loaded a scenario without errors
- * @param batch what a batch uses again: prepared things, and the columns of a year that is no longer wanted
+ * @param kept prepared things that are used again
  * @returns the year; or a problem where the lumped model cannot be built from the house
  */
-export function answerYear(
+export function answerYear(loaded: LoadedScenario, kept?: Kept): { year?: YearAnswer; problems: Problem[] } {
+  const { ran, problems } = runYear(loaded, { kept });
+  if (ran === undefined) return { problems };
+  const { runs, ...year } = ran;
+  return { year: { ...year, costs: costsOf(loaded, runs, year.boiler, kept) }, problems: [] };
+}
+
+/**
+ * The same for a row of a batch.
+ *
+ * @param batch what a batch uses again: prepared things, and the columns of a year that is no longer wanted
+ */
+export function answerRow(
   loaded: LoadedScenario,
-  { kept, used }: { readonly kept?: Kept; readonly used?: UsedColumns } = {},
-): { year?: YearAnswer; problems: Problem[] } {
+  { kept, used }: { readonly kept: Kept; readonly used: UsedColumns },
+): { year?: RowAnswer; problems: Problem[] } {
+  const { ran, problems } = runYear(loaded, { kept, columns: used.year });
+  if (ran === undefined) return { problems };
+  const { runs, ...year } = ran;
+  const costs = costTotalsOf(loaded, runs, year.boiler, { kept, billed: used.billed });
+  return { year: { ...year, costs }, problems: [] };
+}
+
+/** A year before its costs, and what the heating takes on each tariff. */
+type RanYear = Omit<YearAnswer, 'costs'> & { readonly runs: readonly HeatingRun[] };
+
+function runYear(
+  loaded: LoadedScenario,
+  { kept, columns: used }: { readonly kept?: Kept | undefined; readonly columns?: YearColumns },
+): { ran?: RanYear; problems: Problem[] } {
   const { scenario, clock } = loaded;
   const present = loaded.tariffs[0]?.prepared;
   const prepared = prepareHouse(scenario.house, clock, present, kept);
@@ -69,16 +98,12 @@ export function answerYear(
   const { house } = prepared;
   const parts = prepareParts(loaded, kept);
   const plan = preparePlan(scenario, { ...parts, clock, house, present }, kept);
-  const columns = simulateYear(plan, used?.year);
+  const columns = simulateYear(plan, used);
   const totals = totalsOf(plan, columns);
   const boiler = boilerOf(loaded, { plan, totals, columns }, kept);
-  const costs = costsOf(loaded, heatingRuns(loaded.tariffs, plan, columns, totals), boiler, {
-    kept,
-    billed: used?.billed,
-  });
   const carbon = carbonOf(loaded, columns, totals, boiler);
   const base = house.baseTemperature ?? house.nominalSetPoint - house.internalGains / house.heatLoss;
-  const year = {
+  const ran = {
     loaded,
     plan,
     columns,
@@ -87,11 +112,11 @@ export function answerYear(
     heatLoss: heatLossOf(scenario.house).total,
     designLoad: house.designLoad,
     degreeDays: { base, ...degreeDaysTo(base, parts.weather, kept) },
-    costs,
+    runs: heatingRuns(loaded.tariffs, plan, columns, totals),
     ...(boiler === undefined ? {} : { boiler }),
     ...(carbon === undefined ? {} : { carbon }),
   };
-  return { year, problems: [] };
+  return { ran, problems: [] };
 }
 
 /** Degree days of a batch, by weather and base. */

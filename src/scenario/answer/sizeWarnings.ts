@@ -2,7 +2,7 @@ import { polylineAt } from '../../core/polyline.ts';
 import { readMap } from '../../sim/heatPumpMap.ts';
 import { polylineOf } from '../prepare/prepareUnit.ts';
 import type { Scenario } from '../scenarioSchema.ts';
-import type { BareAnswer } from './answer.ts';
+import type { SeenYear } from './answer.ts';
 import type { SeenWarning } from './warning.ts';
 
 /** Capacity at design conditions over design load: outside these the unit is far too small or too large (common practice, no source). */
@@ -13,7 +13,7 @@ const FAR_OVER = 1.5;
  * Whether the unit fits the design load: its full capacity at the design temperature, at the flow that the emitters ask for
  * there or the highest that the unit gives, whichever is lower. Without frost, as the map has it.
  */
-export function sizeWarnings({ plan, loaded, designLoad }: BareAnswer): SeenWarning[] {
+export function sizeWarnings({ plan, loaded, designLoad }: SeenYear): SeenWarning[] {
   const { flowTemperature, house } = loaded.scenario;
   const outdoor = house.design.outdoorTemperature;
   const { unit } = plan.unitOnWeather;

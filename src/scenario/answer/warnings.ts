@@ -1,5 +1,5 @@
 import type { Problem } from '../../core/problem.ts';
-import type { BareAnswer } from './answer.ts';
+import type { SeenYear } from './answer.ts';
 import { hotWaterCautions } from './hotWaterCautions.ts';
 import { sizeWarnings } from './sizeWarnings.ts';
 import type { LoadingWarning, SeenWarning, Warning } from './warning.ts';
@@ -31,7 +31,7 @@ function oncePerColumn<C extends object>(of: (column: C) => number): (column: C)
 }
 
 /** What an assessor should look at before signing, as kinds and figures. */
-export function warningsOf(answer: BareAnswer, found: readonly Problem[]): Warning[] {
+export function warningsOf(answer: SeenYear, found: readonly Problem[]): Warning[] {
   return [
     ...found.map(fromLoading),
     ...performanceWarnings(answer),
@@ -47,7 +47,7 @@ export function fromLoading(problem: Problem): LoadingWarning {
   return { code: problem.code, problem };
 }
 
-function performanceWarnings({ factors, totals }: BareAnswer): SeenWarning[] {
+function performanceWarnings({ factors, totals }: SeenYear): SeenWarning[] {
   const list: SeenWarning[] = [];
   const { annual, hours, starts } = totals;
   const { h4 } = factors;
@@ -67,7 +67,7 @@ function performanceWarnings({ factors, totals }: BareAnswer): SeenWarning[] {
   return list;
 }
 
-function mapWarnings({ totals, plan }: BareAnswer): SeenWarning[] {
+function mapWarnings({ totals, plan }: SeenYear): SeenWarning[] {
   const list: SeenWarning[] = [];
   const { hours } = totals;
   if (hours.outsideMap > MUCH_OUTSIDE * Math.max(1, hours.heating)) {
@@ -79,7 +79,7 @@ function mapWarnings({ totals, plan }: BareAnswer): SeenWarning[] {
   return list;
 }
 
-function weatherWarnings({ plan, loaded }: BareAnswer): SeenWarning[] {
+function weatherWarnings({ plan, loaded }: SeenYear): SeenWarning[] {
   const coldest = lowestOf(plan.weather.trailingMeanTemperature);
   const design = loaded.scenario.house.design.outdoorTemperature;
   if (coldest > design + WEATHER_MARGIN) return [{ code: 'weather.milder-than-design', values: { coldest, design } }];

@@ -24,7 +24,8 @@ function simulated(text: string, changes: Record<string, unknown>) {
   const files = sampleFiles({ ...otherFiles, 'house.yaml': document.toString() });
   const { loaded, problems } = loadScenario('house.yaml', memoryFiles(files));
   const { answer } = makeAnswer(loaded!, problems);
-  return rowResult(answer!, answer!.warnings);
+  const costs = answer!.costs.map((cost) => ({ ...cost, billTotal: cost.bill.total }));
+  return rowResult({ ...answer!, costs }, answer!.warnings);
 }
 
 const condensing = {
