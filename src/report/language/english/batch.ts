@@ -1,3 +1,5 @@
+import type { WarningValues } from '../../../scenario/answer/warning.ts';
+
 /** Figures and names of a sentence, already written. */
 type Said = Readonly<Record<string, string>>;
 
@@ -132,7 +134,7 @@ export const englishBatch = {
       'hot-water.scalding': 'Hot water may be so hot that it scalds.',
       'hot-water.colder-than-use': 'The cylinder is colder than the hot water that is asked.',
       'hot-water.short': 'At times there is not enough hot water.',
-    } as Readonly<Record<string, string | undefined>>,
+    } satisfies Readonly<Record<keyof WarningValues, string>> as Readonly<Record<string, string | undefined>>,
 
     inputsCaption: (version: string) => `Files the years rest on, read by Winterledger ${version}`,
     moreInputs: (count: string) => `And ${count} more files, in manifest.json.`,

@@ -1,3 +1,4 @@
+import type { WarningValues } from '../../../scenario/answer/warning.ts';
 import type { BatchWords } from '../english/batch.ts';
 
 /** Words of the report of a batch, in German. */
@@ -132,7 +133,7 @@ export const germanBatch: BatchWords = {
       'hot-water.scalding': 'Das Warmwasser kann so heiß werden, dass es verbrüht.',
       'hot-water.colder-than-use': 'Der Speicher ist kälter als das verlangte Warmwasser.',
       'hot-water.short': 'Zeitweise reicht das Warmwasser nicht.',
-    },
+    } satisfies Readonly<Record<keyof WarningValues, string>>,
 
     inputsCaption: (version) => `Dateien, auf denen die Jahre beruhen, gelesen von Winterledger ${version}`,
     moreInputs: (count) => `Und ${count} weitere Dateien, in manifest.json.`,
