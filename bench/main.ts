@@ -12,6 +12,7 @@ import { keepPage } from './page.ts';
 import { plainC } from './plainC.ts';
 import { everythingOn } from './plans.ts';
 import { benchReading } from './reading.ts';
+import { benchSheet } from './sheet.ts';
 
 /** Everything that was printed, for the page. */
 const said: string[] = [];
@@ -88,6 +89,7 @@ say(`hot water and mass take ${(perHour('… and a house with mass') / year1).to
 say(`one more tariff costs ${((100 * perHour('one more tariff on it')) / year1).toFixed(1)} % of a simulated year`);
 
 benchReading(say);
+benchSheet(say);
 benchColdStart(say);
 await benchBatch(say);
 if (process.argv.includes('--keep')) keepPage(said);

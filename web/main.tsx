@@ -1,7 +1,7 @@
 import { signal } from '@preact/signals';
 import { render } from 'preact';
 import { droppedFiles } from './droppedFiles.ts';
-import { begin, takeDropped, words } from './sheet.ts';
+import { begin, opened, takeDropped, words } from './sheet.ts';
 import './sheet.css';
 import { AnswerPane, Shortcut } from './view/Answer.tsx';
 import { Foot, Head } from './view/Head.tsx';
@@ -14,7 +14,7 @@ function Sheet() {
     <>
       <Head />
       <main>
-        <Parts />
+        <Parts key={opened.value} />
         <AnswerPane />
       </main>
       <Foot />

@@ -6,6 +6,7 @@ import { forgetDraft, keepDraft, keptDraft } from './draft.ts';
 import type { SheetFile } from './model/memorySource.ts';
 import type { Pictures } from './model/pictures.ts';
 import type { Action } from './model/sheetActions.ts';
+import type { Start } from './model/sheetCalls.ts';
 import type { SaveKind } from './model/sheetSaves.ts';
 import type { SheetState } from './model/sheetState.ts';
 import { sheetWords } from './words.ts';
@@ -20,12 +21,17 @@ export const words = computed(() => sheetWords(language.value));
 export const isDemo = signal(true);
 /** Whether a draft is kept: yes, no, or there is no room for it. */
 export const draft = signal<'none' | 'kept' | 'full'>('none');
+/** The sheet that was left for another one. */
+export const left = signal<Start | undefined>(undefined);
 export const refused = signal<readonly string[]>([]);
 /** Whether the browser did not hand over what was dropped. */
 export const unreadable = signal(false);
 export const fault = signal<string | undefined>(undefined);
 /** Counts the changes of the files, so that what rests on them is made anew. */
 export const revision = signal(0);
+
+/** Counts the sheets that were opened, so that nothing typed into one shows in the next. */
+export const opened = signal(0);
 
 /** Pictures wait for a pause in typing. */
 const PAUSE = 250;
@@ -37,6 +43,11 @@ function show(next: SheetState): void {
   explainedHour.value = undefined;
   clearTimeout(later);
   later = setTimeout(() => void afterwards().catch(tell), PAUSE);
+}
+
+function showNew(next: SheetState): void {
+  opened.value++;
+  show(next);
 }
 
 async function afterwards(): Promise<void> {
@@ -68,15 +79,38 @@ export function begin(): void {
 }
 
 export function showDemo(): void {
-  isDemo.value = true;
-  pictures.value = undefined;
-  guarded(ask('demo').then(show));
+  beginWith(() => ask('demo'), true);
 }
 
 export function startBlank(): void {
-  isDemo.value = false;
-  pictures.value = undefined;
-  guarded(ask('blank', Intl.DateTimeFormat().resolvedOptions().timeZone ?? 'UTC').then(show));
+  beginWith(() => ask('blank', Intl.DateTimeFormat().resolvedOptions().timeZone ?? 'UTC'), false);
+}
+
+/** Goes back to the sheet that was left last. */
+export function goBack(): void {
+  const back = left.value;
+  if (back !== undefined) beginWith(() => ask('open', back), false);
+}
+
+/** Begins another sheet; the one that is left can be had back, unless it is the invented house as it came. */
+function beginWith(start: () => Promise<SheetState>, demo: boolean): void {
+  guarded(
+    (async () => {
+      await keepLeft();
+      isDemo.value = demo;
+      pictures.value = undefined;
+      showNew(await start());
+    })(),
+  );
+}
+
+async function keepLeft(): Promise<void> {
+  left.value = isDemo.value ? undefined : await ask('files');
+}
+
+/** Shows another of the scenarios that were opened together. */
+export function chooseScenario(name: string): void {
+  guarded(ask('choose', name).then(showNew));
 }
 
 export function act(action: Action): void {
@@ -86,12 +120,18 @@ export function act(action: Action): void {
 
 export function takeFiles(files: readonly SheetFile[]): void {
   if (files.length === 0) return;
-  isDemo.value = false;
   guarded(
-    ask('take', files).then((taken) => {
+    (async () => {
+      const scenario = state.value?.scenario;
+      const wasDemo = isDemo.value;
+      const before = await ask('files');
+      isDemo.value = false;
+      const taken = await ask('take', files);
       refused.value = taken.refused;
-      show(taken.state);
-    }),
+      if (!wasDemo && taken.isNew && scenario !== undefined) left.value = before;
+      if (taken.isNew) showNew(taken.state);
+      else show(taken.state);
+    })(),
   );
 }
 

@@ -44,7 +44,7 @@ describe('a first visit, from the file and without a network,', () => {
     await expect.poll(() => page.locator('.sentence').first().innerText()).not.toBe(before);
     // the live region tells the sentence that stands there once typing has stopped
     await expect
-      .poll(() => page.locator('[role=status]').textContent(), { timeout: 5000 })
+      .poll(() => page.locator('.answer > [role=status]').textContent(), { timeout: 5000 })
       .toContain(await page.locator('.sentence').first().innerText());
     const { text } = await savedBy(page, 'Scenario (YAML)');
     expect(text).toBe(demoText('house.yaml').replace('value: 195', 'value: 150.5'));
@@ -74,6 +74,9 @@ function houseOfFolders(): string {
   const [, block = ''] = /fullLoad:[\s\S]*?capacity: \|\n((?: {6}.*\n)+)/.exec(unit) ?? [];
   return folderOf({
     'visit/own.yaml': demoText('house.yaml').replace('value: 195', 'value: 171'),
+    'visit/variants/draughty.yaml': demoText('house.yaml')
+      .replace('value: 195', 'value: 240')
+      .replaceAll(/(weather.csv|units\/|tariffs\/)/g, '../$1'),
     'visit/weather.csv': demoText('weather.csv'),
     'visit/units/quarkenfels-8.yaml': unit.replace(`capacity: |\n${block}`, 'capacity: { file: heat.csv }\n'),
     'visit/units/heat.csv': block.replaceAll(/^ +/gm, ''),
@@ -95,6 +98,12 @@ describe('a folder of files', () => {
     await page.locator('input[webkitdirectory]').setInputFiles(join(folder, 'visit'));
     await page.locator('#f-own-yaml-house-heatLoss-value').waitFor();
     expect(difference((await savedBy(page, 'Result (JSON)')).text, result())).toBeUndefined();
+    // of two scenarios the one that lies highest is shown first
+    await page.getByLabel('Scenario, of those opened together').selectOption('variants/draughty.yaml');
+    await expect.poll(() => page.locator('#f-variants-draughty-yaml-house-heatLoss-value').count()).toBe(1);
+    await page.locator('.sentence').first().waitFor();
+    const draughty = written(join(folder, 'visit'), 'simulate', 'variants/draughty.yaml', '--json', '-');
+    expect(difference((await savedBy(page, 'Result (JSON)')).text, draughty)).toBeUndefined();
     const grid = '#f-units-quarkenfels-8-yaml-map-fullLoad-capacity';
     expect(await page.locator(`${grid} p`).first().innerText()).toBe('units/heat.csv');
     await page.locator(`${grid} tr:nth-child(4) td:nth-child(2) input`).fill('1,1');
@@ -127,6 +136,16 @@ describe('a folder of files', () => {
 });
 
 describe('dropped files', () => {
+  it('of another house show in the field that was being typed into', async () => {
+    const { context, page, complaints } = await openSheet(browser());
+    const heatLoss = page.locator('#f-house-yaml-house-heatLoss-value');
+    await heatLoss.fill('150');
+    await dropFiles(page, { 'house.yaml': demoText('house.yaml').replace('value: 195', 'value: 171') });
+    await expect.poll(() => heatLoss.inputValue()).toBe('171');
+    expect(complaints).toEqual([]);
+    await context.close();
+  });
+
   it('of prices make a tariff that asks what they are stated in', async () => {
     const { context, page, complaints } = await openSheet(browser());
     await dropFiles(page, { 'market.csv': demoText('tariffs/prices.csv') });

@@ -116,6 +116,22 @@ describe('a blank start', () => {
   });
 });
 
+describe('a sheet that is left for another one', () => {
+  it('can be had back', async () => {
+    const { context, page, complaints } = await openSheet(browser());
+    const heatLoss = page.locator('#f-house-yaml-house-heatLoss-value');
+    await heatLoss.fill('151');
+    await page.getByText('A draft of the files is kept').waitFor();
+    await page.getByRole('button', { name: 'Begin a blank sheet' }).click();
+    await expect.poll(() => heatLoss.inputValue()).toBe('');
+    await page.getByRole('button', { name: 'Back to the sheet before' }).click();
+    await expect.poll(() => heatLoss.inputValue()).toBe('151');
+    await page.locator('.sentence').first().waitFor();
+    expect(complaints).toEqual([]);
+    await context.close();
+  });
+});
+
 describe('every field', () => {
   it('of a number is told what is wrong with it when it is broken, and is content when it is mended', async () => {
     const { context, page, complaints } = await openSheet(browser());

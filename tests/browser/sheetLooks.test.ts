@@ -6,11 +6,14 @@ import { openFolds, openSheet, savedBy } from './sheetPage.ts';
 
 const browser = oneBrowser();
 
-/** Unfolds all there is, and leaves one of what is alike: three rows of a table and one tariff say as much as all. */
+/** Unfolds all there is, and leaves some of what is alike: three rows of a table, one tariff, three stages of an hour. */
 async function unfold(page: Page): Promise<void> {
   await openFolds(page);
   await page.evaluate(`
-    const alike = 'tbody tr:nth-child(n + 4), .carpets > :nth-child(n + 2), #part-tariffs > details ~ details';
+    const alike = [
+      'tbody tr:nth-child(n + 4), .carpets > :nth-child(n + 2), #part-tariffs > details ~ details',
+      '.explained > details ~ details ~ details ~ details',
+    ].join();
     for (const part of document.querySelectorAll(alike)) part.remove();
   `);
 }

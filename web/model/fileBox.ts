@@ -8,6 +8,7 @@ import { type Written, withEntry } from './yamlEdit.ts';
 export class FileBox {
   #files = new Map<string, SheetFile>();
   readonly #hashes = new WeakMap<Uint8Array, string>();
+  readonly #kinds = new WeakMap<Uint8Array, FileKind | 'none'>();
   readonly #changed = new Set<string>();
   readonly #changedSince = new Set<string>();
   /** Counts the changes of every file but the scenario. */
@@ -32,6 +33,22 @@ export class FileBox {
     return this.#files.has(name);
   }
 
+  /** Files that hold a scenario, those that lie highest first. */
+  get scenarios(): string[] {
+    const depth = (name: string) => name.split('/').length;
+    return this.all
+      .filter((file) => this.#kindOf(file) === 'scenario')
+      .map(({ name }) => name)
+      .sort((a, b) => depth(a) - depth(b) || (a < b ? -1 : 1));
+  }
+
+  /** The kind of a file, which is looked for once. */
+  #kindOf(file: SheetFile): FileKind | 'none' {
+    const known = this.#kinds.get(file.bytes) ?? kindOf(file) ?? 'none';
+    this.#kinds.set(file.bytes, known);
+    return known;
+  }
+
   /** Names of the files that have changed since this was asked last. */
   takeChanged(): ReadonlySet<string> {
     const names = new Set(this.#changedSince);
@@ -53,11 +70,7 @@ export class FileBox {
     this.#files = new Map(files.map((file) => [file.name, file]));
     this.#changed.clear();
     this.othersChanged++;
-    const depth = (name: string) => name.split('/').length;
-    const found = files
-      .filter((file) => kindOf(file) === 'scenario')
-      .sort((a, b) => depth(a.name) - depth(b.name) || (a.name < b.name ? -1 : 1));
-    this.scenario = scenario ?? found[0]?.name ?? '';
+    this.scenario = scenario ?? this.scenarios[0] ?? '';
   }
 
   put(file: SheetFile): void {

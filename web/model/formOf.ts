@@ -31,7 +31,7 @@ export function formOf(schema: z.core.$ZodType, raw: unknown, path: EntryPath, c
   const inner = field.schema;
   if (inner instanceof z.ZodObject) return sectionOf(schema, field, raw, { path, context });
   if (inner instanceof z.ZodDiscriminatedUnion) return sectionOf(schema, field, raw, { path, context });
-  if (inner instanceof z.ZodArray && isSection(inner.def.element)) return listOf(inner, field, raw, { path, context });
+  if (inner instanceof z.ZodArray && isSection(inner.def.element)) return listOf(schema, field, raw, { path, context });
   return leafOf(schema, field, raw, { path, context });
 }
 
@@ -116,14 +116,14 @@ function formChoice(field: Field, key: string, raw: unknown, { path, context }: 
   };
 }
 
-function listOf(array: z.ZodArray, field: Field, raw: unknown, place: Place): ListNode {
+function listOf(schema: z.core.$ZodType, field: Field, raw: unknown, place: Place): ListNode {
   const { path, context } = place;
-  const element = bare(array.def.element);
+  const element = field.schema instanceof z.ZodArray ? bare(field.schema.def.element) : field;
   const entries = Array.isArray(raw) ? raw : [];
   return {
     kind: 'list',
-    ...entryBase(array, field, place),
-    ...{ folded: !isMainEntry(path), problems: problemsAt(place, false) },
+    ...entryBase(schema, field, place),
+    problems: problemsAt(place, false),
     items: entries.map((entry, i) => ({
       path: [...path, i],
       children: childrenOf(element, entry, { path: [...path, i], context }),

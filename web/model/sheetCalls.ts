@@ -22,7 +22,10 @@ export interface SheetCalls {
   demo(): SheetState;
   blank(zone: string): SheetState;
   open(start: Start): SheetState;
-  take(files: readonly SheetFile[]): { state: SheetState; refused: readonly string[] };
+  /** `isNew` where a scenario among the files took the place of the one before. */
+  take(files: readonly SheetFile[]): { state: SheetState; refused: readonly string[]; isNew: boolean };
+  /** Another of the scenarios that were opened together. */
+  choose(scenario: string): SheetState;
   act(action: Action): SheetState;
   language(language: Language): SheetState;
   pictures(): Pictures;
@@ -51,8 +54,12 @@ export function sheetCalls(version: string, demo: readonly SheetFile[]): SheetCa
       return model.state();
     },
     take: (files) => {
-      const refused = takeFiles(box, files, model.messages.blank);
-      return { state: model.state(), refused };
+      const { refused, isNew } = takeFiles(box, files, model.messages.blank);
+      return { state: model.state(), refused, isNew };
+    },
+    choose: (scenario) => {
+      if (box.scenarios.includes(scenario)) box.scenario = scenario;
+      return model.state();
     },
     act: (action) => {
       act(box, action, model.messages.blank);

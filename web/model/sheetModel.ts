@@ -113,7 +113,7 @@ export class SheetModel {
     const unit = this.#beside(entryAt(yaml, 'heatPump', 'unit'), unitSchema, told);
     const weather = this.#weatherState(yaml, told);
     return {
-      scenario: box.scenario,
+      ...{ scenario: box.scenario, scenarios: box.scenarios },
       text: box.text(box.scenario),
       files: box.list,
       parts: VISIT.map(({ id, entries }) => ({

@@ -54,6 +54,8 @@ export interface ShownAnswer {
 /** Everything that the page shows beside its own words. */
 export interface SheetState {
   readonly scenario: string;
+  /** All scenarios that were opened together. */
+  readonly scenarios: readonly string[];
   readonly text: string;
   readonly files: readonly { readonly name: string; readonly size: number; readonly changed: boolean }[];
   readonly parts: readonly PartState[];

@@ -20,7 +20,7 @@ weather:
 
 house:
   heatLoss: { given: coefficient }
-  design:
+  design: {}
   need:
     model: degreeHours
 

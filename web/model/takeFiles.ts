@@ -5,20 +5,26 @@ import { type FileBox, kindOf, startOf } from './fileBox.ts';
 import { baseOf, LARGEST_FILE, type SheetFile } from './memorySource.ts';
 import { addTariff, appendTariff, rawOf, tariffList } from './sheetActions.ts';
 
+/** What came of files that were taken. */
+interface Taken {
+  readonly refused: readonly string[];
+  readonly isNew: boolean;
+}
+
 /**
  * Takes files that were dropped or chosen. With a scenario among them the sheet begins anew; else each takes the place that
  * its content asks for: the weather, the unit, a further tariff, the prices of one. A file that something names already and
  * that was not there takes that place.
  *
  * @param words of what is added
- * @returns names of files that are too large to be taken
+ * @returns names of files that are too large to be taken, and whether the sheet began anew
  */
-export function takeFiles(box: FileBox, files: readonly SheetFile[], words: BlankWords): string[] {
+export function takeFiles(box: FileBox, files: readonly SheetFile[], words: BlankWords): Taken {
   const sound = files.filter(({ bytes }) => bytes.length <= LARGEST_FILE);
   const refused = files.filter((file) => !sound.includes(file)).map(({ name }) => name);
   if (sound.some((file) => kindOf(file) === 'scenario')) {
     box.replace(withoutCommonFolder(sound));
-    return refused;
+    return { refused, isNew: true };
   }
   for (const file of sound) {
     const isAwaited = missingFiles(box).has(baseOf(file.name));
@@ -26,7 +32,7 @@ export function takeFiles(box: FileBox, files: readonly SheetFile[], words: Blan
     box.put(placed);
     if (!isAwaited) giveItsPlace(box, placed, words);
   }
-  return refused;
+  return { refused, isNew: false };
 }
 
 function giveItsPlace(box: FileBox, file: SheetFile, words: BlankWords): void {

@@ -1,10 +1,13 @@
 import { chosenFiles } from '../droppedFiles.ts';
 import type { SaveKind } from '../model/sheetSaves.ts';
 import {
+  chooseScenario,
   draft,
   fault,
+  goBack,
   isDemo,
   language,
+  left,
   refused,
   save,
   showDemo,
@@ -44,12 +47,18 @@ export function Head() {
         </button>
         <Opener name={said.open} />
         <Opener name={said.openFolder} folder />
+        {left.value !== undefined && (
+          <button type="button" class="quiet" onClick={goBack}>
+            {said.back}
+          </button>
+        )}
         {!isDemo.value && (
           <button type="button" class="quiet" onClick={showDemo}>
             {said.demo}
           </button>
         )}
       </div>
+      <Scenarios />
       <p class="says">
         {said.drop} {said.stays}
       </p>
@@ -65,6 +74,24 @@ export function Head() {
         </p>
       )}
     </header>
+  );
+}
+
+/** The choice among several scenarios of one folder. */
+function Scenarios() {
+  const { scenario = '', scenarios = [] } = state.value ?? {};
+  if (scenarios.length < 2) return null;
+  return (
+    <p class="scenarios">
+      <label>
+        {words.value.scenarios}{' '}
+        <select value={scenario} onChange={(event) => chooseScenario(event.currentTarget.value)}>
+          {scenarios.map((name) => (
+            <option key={name}>{name}</option>
+          ))}
+        </select>
+      </label>
+    </p>
   );
 }
 
@@ -110,6 +137,7 @@ export function Foot() {
           </button>
         ))}
       </p>
+      <p class="says">{said.savesSay}</p>
       <h3>{said.files}</h3>
       <ul class="small">
         {now.files.map(({ name, size, changed }) => (
@@ -122,10 +150,10 @@ export function Foot() {
         {draft.value === 'full' ? said.draftFull : draft.value === 'kept' ? said.draft : said.draftNone}{' '}
         {draft.value === 'kept' && (
           <>
-            <button type="button" class="quiet" onClick={wipeDraft}>
+            <button type="button" class="quiet" aria-describedby="draft-says" onClick={wipeDraft}>
               {said.draftWipe}
             </button>{' '}
-            {said.draftSays}
+            <span id="draft-says">{said.draftSays}</span>
           </>
         )}
       </p>

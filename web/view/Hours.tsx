@@ -1,6 +1,7 @@
 import { useState } from 'preact/hooks';
 import type { ExplainDocument } from '../../src/report/explainSchema.ts';
 import { explain, explainedHour, language, pictures, state, words } from '../sheet.ts';
+import { Announced } from './Announced.tsx';
 import { Drawn } from './Drawn.tsx';
 import { hourOfClick } from './hourOfClick.ts';
 
@@ -50,7 +51,8 @@ export function Hours() {
         </label>
         <button type="submit">{said.show}</button>
       </form>
-      <div aria-live="polite">{explainedHour.value !== undefined && <Explained found={explainedHour.value} />}</div>
+      <Announced text={explainedHour.value?.hour.civilTime ?? ''} />
+      {explainedHour.value !== undefined && <Explained found={explainedHour.value} />}
     </section>
   );
 }

@@ -154,7 +154,7 @@ describe('the model of the sheet', () => {
     model.box.replace(blankFiles('Europe/Berlin', englishBlank));
     const byName = new Map(demo.map((file) => [file.name, file]));
     const dropped = ['weather.csv', 'units/quarkenfels-8.yaml', 'tariffs/flat.yaml'].map((name) => byName.get(name)!);
-    expect(takeFiles(model.box, dropped)).toEqual([]);
+    expect(takeFiles(model.box, dropped)).toEqual({ refused: [], isNew: false });
     const text = model.box.text('house.yaml');
     expect(text).toContain('file: weather.csv');
     expect(text).toContain('unit: quarkenfels-8.yaml');

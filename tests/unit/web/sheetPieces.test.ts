@@ -10,7 +10,7 @@ import { demoFiles } from '../../../web/model/demoFiles.ts';
 import { keyNames } from '../../../web/model/keyNames.ts';
 import { tableText } from '../../../web/model/mapTables.ts';
 import { joined } from '../../../web/model/memorySource.ts';
-import { laidOn, pastedCells } from '../../../web/model/pastedTable.ts';
+import { isPastedTable, laidOn, listedPoints, pastedCells } from '../../../web/model/pastedTable.ts';
 import { sha256 } from '../../../web/model/sha256.ts';
 import { numberIn, writtenValue } from '../../../web/model/writtenValue.ts';
 import { withEntry } from '../../../web/model/yamlEdit.ts';
@@ -128,6 +128,45 @@ describe('a pasted table', () => {
   });
 });
 
+describe('a paste from a data sheet', () => {
+  it.each([
+    ['blanks, without a corner', '35 45\n-7 5,1 4,9'],
+    ['blanks and units', '°C 35 45\n-7 5,1 kW 4,9 kW'],
+    ['semicolons', ';35;45\n-7;5,1;4,9'],
+    ['commas and blanks', 'x, 35, 45\n-7, 5,1, 4,9'],
+  ])('may part its cells by %s', (_, text) => {
+    const [head, row] = pastedCells(text);
+    expect(head.slice(1)).toEqual(['35', '45']);
+    expect(row).toEqual(['-7', '5,1', '4,9']);
+  });
+
+  it('of one column of decimal commas is one column', () => {
+    expect(pastedCells('5,1\n4,9')).toEqual([['5,1'], ['4,9']]);
+    expect(isPastedTable('5,1')).toBe(false);
+    expect(isPastedTable('5,1\n4,9')).toBe(true);
+  });
+
+  it('may be a list of points, in any order, with COP behind the heat', () => {
+    expect(listedPoints('A2/W35 8,0 3,9\nA−7/W35 6,5 2,9\nA2/W55 7,5 2,7')).toEqual([
+      [
+        ['', '35', '55'],
+        ['−7', '6,5', ''],
+        ['2', '8,0', '7,5'],
+      ],
+      [
+        ['', '35', '55'],
+        ['−7', '2,9', ''],
+        ['2', '3,9', '2,7'],
+      ],
+    ]);
+    expect(listedPoints('A7 / W35: 9.6 kW')?.[0]).toEqual([
+      ['', '35'],
+      ['7', '9.6'],
+    ]);
+    expect(listedPoints('35 45\n-7 5,1 4,9')).toBeUndefined();
+  });
+});
+
 describe('names and places', () => {
   it('follow folders as a disk does', () => {
     expect(joined('a/b', '../c.csv')).toBe('a/c.csv');
@@ -145,6 +184,7 @@ describe('names and places', () => {
     expect(hourOfClick(24, 109, 365)).toBe(0);
     expect(hourOfClick(24.5, 14.5, 365)).toBe(23);
     expect(hourOfClick(353.9, 15, 365)).toBe(8759);
+    expect(hourOfClick(353.9, 15, 366)).toBe(8783);
     expect(hourOfClick(10, 50, 365)).toBeUndefined();
     expect(hourOfClick(100, 120, 365)).toBeUndefined();
   });

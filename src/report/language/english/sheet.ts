@@ -7,6 +7,8 @@ export const englishSheet = {
   invented: 'This house is invented. Change anything to see what it does, or begin with your own.',
   blank: 'Begin a blank sheet',
   demo: 'Show the invented house',
+  scenarios: 'Scenario, of those opened together',
+  back: 'Back to the sheet before',
   open: 'Open files',
   openFolder: 'Open a folder',
   drop: 'Or drop files or a folder anywhere on this page: scenario, weather, unit, tariffs, prices.',
@@ -115,6 +117,8 @@ export const englishSheet = {
     hours: 'Every hour (CSV)',
     report: 'Report for the client (HTML)',
   },
+  savesSay:
+    'These are the files that the command line writes and reads. Where engines of JavaScript differ in the sixteenth digit of a figure, what is printed agrees.',
   changed: 'changed',
   files: 'Files of this sheet',
   fault: 'Something went wrong in the program itself:',

@@ -8,6 +8,8 @@ export const germanSheet: SheetWords = {
     'Dieses Haus ist erfunden. Ändern Sie etwas und sehen Sie, was geschieht, oder beginnen Sie mit Ihrem eigenen.',
   blank: 'Leeres Blatt beginnen',
   demo: 'Erfundenes Haus zeigen',
+  scenarios: 'Szenario, von den zusammen geöffneten',
+  back: 'Zurück zum vorigen Blatt',
   open: 'Dateien öffnen',
   openFolder: 'Ordner öffnen',
   drop: 'Oder Dateien oder einen Ordner auf diese Seite ziehen: Szenario, Wetter, Gerät, Tarife, Preise.',
@@ -117,6 +119,8 @@ export const germanSheet: SheetWords = {
     hours: 'Jede Stunde (CSV)',
     report: 'Bericht für den Auftraggeber (HTML)',
   },
+  savesSay:
+    'Das sind die Dateien, die auch die Befehlszeile schreibt und liest. Wo JavaScript-Umgebungen sich in der sechzehnten Stelle einer Zahl unterscheiden, stimmt überein, was gedruckt wird.',
   changed: 'geändert',
   files: 'Dateien dieses Blatts',
   fault: 'Im Programm selbst ging etwas schief:',
