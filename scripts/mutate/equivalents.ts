@@ -220,4 +220,25 @@ export const equivalents: readonly Equivalent[] = [
     becomes: '<=',
     why: 'a thirteenth month has no kWh, and its cost is written nowhere',
   },
+  {
+    file: 'src/sim/flowTemperature.ts',
+    text: 'lowest: 0,',
+    was: '0',
+    becomes: '1',
+    why: 'read of emitters only, and this is a setting without them',
+  },
+  {
+    file: 'src/tariffs/composeYear.ts',
+    text: 'if (i > 0 && begins[i] <= begins[i - 1] && !hasErrors(problems)) {',
+    was: '>',
+    becomes: '>=',
+    why: 'before the first supplier there is none to come after',
+  },
+  {
+    file: 'src/tariffs/seriesMeans.ts',
+    text: 'if (index >= 0 && index < values.length && end <= (index + 1) * stepMinutes) return values[index];',
+    was: '*',
+    becomes: '/',
+    why: 'a short way for most steps: the way by pieces below comes to the same mean',
+  },
 ];

@@ -25,6 +25,8 @@ export interface BoilerNeed {
   readonly hotWaterByHour: Float64Array;
   /** Standing loss of the cylinder, kWh a year. */
   readonly cylinderLoss: number;
+  /** The same by hour; looked at as the hot water by hour is, and even over the hours where it is absent. */
+  readonly cylinderLossByHour?: Float64Array | undefined;
 }
 
 /** A year with the boiler. */
@@ -48,8 +50,7 @@ export interface BoilerYear {
 /**
  * A year in which a boiler meets the whole need.
  *
- * On the household's tariff, hot water is taken as heated when it is drawn, and the loss of the cylinder as even over the
- * hours.
+ * On the household's tariff, hot water is taken as heated when it is drawn, and the loss of the cylinder when it is lost.
  *
  * @param boiler efficiencies and fuel
  * @param need what it has to give
@@ -77,9 +78,10 @@ export function boilerYear(boiler: Boiler, need: BoilerNeed): BoilerYear {
     return { ...common, fuel: input, cost: fuelCost(fuel, input), electricity: pump, heatElectricity: 0 };
   }
   const forRooms = spaceHeatInput(efficiency, need.spaceHeat);
-  const lossOfHour = need.cylinderLoss / pump.length;
+  const evenLoss = need.cylinderLoss / pump.length;
+  const lossOfHour = (i: number) => need.cylinderLossByHour?.[i] ?? evenLoss;
   const electricity = pump.map(
-    (kWh, i) => kWh + forRooms[i] + (need.hotWaterByHour[i] + lossOfHour) / hotWaterEfficiency,
+    (kWh, i) => kWh + forRooms[i] + (need.hotWaterByHour[i] + lossOfHour(i)) / hotWaterEfficiency,
   );
   const standing = fuelCost({ ...boiler.fuel, price: 0 }, 0);
   return { ...common, fuel: 0, cost: standing, electricity, heatElectricity: input };

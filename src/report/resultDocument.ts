@@ -157,7 +157,7 @@ function costOf(cost: TariffCost): ResultDocument['costs'][0] {
   };
 }
 
-function sumsOf(sums: BillSums): BillSums {
+function sumsOf(sums: BillSums): Omit<BillSums, 'energyTaxes'> {
   const { kWh, energy, standing, demand, taxes, taxesInside, credits, total } = sums;
   return { kWh, energy, standing, demand, taxes, taxesInside, credits, total };
 }

@@ -12,6 +12,8 @@ export interface BillSums {
   readonly demand: number;
   /** Taxes that come on top. */
   readonly taxes: number;
+  /** What of them is on the energy. */
+  readonly energyTaxes: number;
   /** Taxes that are inside the prices as stated: a part of energy, standing and demand, shown for information. */
   readonly taxesInside: number;
   /** Fixed credits, positive. */
@@ -51,7 +53,8 @@ const DEMAND = 36;
 const TAXES = 48;
 const TAXES_INSIDE = 60;
 const CREDITS = 72;
-const LEDGER_LENGTH = 84;
+const ENERGY_TAXES = 84;
+const LEDGER_LENGTH = 96;
 
 /**
  * Sums that the parts of a year add to. One array for all months, since a bill is made thousands of times and small
@@ -131,7 +134,8 @@ function sumsOf(ledger: Float64Array, m: number): BillSums {
   const taxes = ledger[TAXES + m];
   const credits = ledger[CREDITS + m];
   const total = energy + standing + demand + taxes - credits;
-  return { kWh: ledger[m], energy, standing, demand, taxes, taxesInside: ledger[TAXES_INSIDE + m], credits, total };
+  const [energyTaxes, taxesInside] = [ledger[ENERGY_TAXES + m], ledger[TAXES_INSIDE + m]];
+  return { kWh: ledger[m], energy, standing, demand, taxes, energyTaxes, taxesInside, credits, total };
 }
 
 /** Adds one supplier's days to the ledger. */
@@ -160,6 +164,7 @@ function chargePart(part: PreparedPart, prepared: PreparedTariff, electricity: F
     months[DEMAND + m] += demand;
     months[(part.taxInside ? TAXES_INSIDE : TAXES) + m] += tax;
     months[CREDITS + m] += part.credits[m];
+    if (!part.taxInside) months[ENERGY_TAXES + m] += energy * part.taxShare;
   }
   for (const { name, share } of part.taxes) ledger.byTax.set(name, (ledger.byTax.get(name) ?? 0) + taxed * share);
 }

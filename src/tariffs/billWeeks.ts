@@ -3,7 +3,7 @@ import { dateText } from '../core/stampText.ts';
 import type { Bill } from './bill.ts';
 import type { CivilClock } from './civilClock.ts';
 import type { PreparedTariff } from './preparedTariff.ts';
-import { taxedEnergyOf } from './taxedEnergy.ts';
+import { taxedEnergy } from './taxedEnergy.ts';
 
 /** A civil week of a bill, from Monday to Sunday; the first and the last of a year may have fewer days. */
 export interface BillWeek {
@@ -53,7 +53,7 @@ function blockPriceOfMonths(prepared: PreparedTariff, electricity: Float64Array,
   if (prepared.parts.every(({ blocks }) => blocks === undefined)) return added;
   const { kWh, cost } = sumsOfMonths(prepared.clock, prepared.marginalPrice, electricity);
   made.monthly.forEach((month, m) => {
-    if (kWh[m] > 0) added[m] = (taxedEnergyOf(month) - cost[m]) / kWh[m];
+    if (kWh[m] > 0) added[m] = (taxedEnergy(month) - cost[m]) / kWh[m];
   });
   return added;
 }

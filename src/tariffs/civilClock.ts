@@ -37,6 +37,8 @@ export interface CivilClock {
   readonly minuteOfDay: Int16Array;
   /** 1 Monday to 7 Sunday: that of the real date, also where this lies in the neighbouring year. */
   readonly weekday: Uint8Array;
+  /** That of the real date: the calendar year or, at the ends of the series, a neighbour. */
+  readonly year: Int16Array;
   /** 1 to 12. */
   readonly month: Uint8Array;
   readonly dayOfMonth: Uint8Array;
@@ -167,6 +169,7 @@ function dateOf(day: number, daysOfMonth: readonly number[]) {
 function columnsOf(hours: number, stretches: readonly DayStretch[]) {
   const minuteOfDay = new Int16Array(hours);
   const weekday = new Uint8Array(hours);
+  const year = new Int16Array(hours);
   const month = new Uint8Array(hours);
   const dayOfMonth = new Uint8Array(hours);
   const civilDay = new Int16Array(hours);
@@ -174,12 +177,13 @@ function columnsOf(hours: number, stretches: readonly DayStretch[]) {
     for (let i = Math.ceil(day.fromMinute / 60); i * 60 < day.toMinute; i++) {
       minuteOfDay[i] = day.minuteOfDay + i * 60 - day.fromMinute;
       weekday[i] = day.weekday;
+      year[i] = day.year;
       month[i] = day.month;
       dayOfMonth[i] = day.dayOfMonth;
       civilDay[i] = day.civilDay;
     }
   }
-  return { minuteOfDay, weekday, month, dayOfMonth, civilDay };
+  return { minuteOfDay, weekday, year, month, dayOfMonth, civilDay };
 }
 
 /** Number of days of the clock's year: hours/24. */

@@ -100,8 +100,8 @@ export function holdsOnDay(rule: RateRule, day: DayStretch, isHoliday: boolean):
 }
 
 /**
- * The day numbers of a tariff's holidays. A date of the calendar year counts also in the two years beside it, for the
- * hours that the zone leaves there: the year is taken as periodic.
+ * The day numbers of a tariff's holidays. A date with a year is that very day; one without is a day of the calendar year
+ * and of the two beside it, into which the zone may carry the first or the last hours.
  *
  * @returns days since 1970-01-01
  */
@@ -121,9 +121,8 @@ export function holidayNumbers(
       problems.push({ code: 'tariff.no-such-date', severity: 'error', ...place });
       return;
     }
-    const returns = date.year === undefined || date.year === year;
-    if (returns) ofThisYear++;
-    for (const y of returns ? [year - 1, year, year + 1] : [date.year ?? year]) {
+    if (date.year === undefined || date.year === year) ofThisYear++;
+    for (const y of date.year === undefined ? [year - 1, year, year + 1] : [date.year]) {
       if (writtenDate(`${y}-${text.slice(-5)}`)) days.add(dayNumber(y, date.month, date.dayOfMonth));
     }
   });

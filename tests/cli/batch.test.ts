@@ -181,7 +181,7 @@ describe('a batch of ten thousand homes, seven of them bad', () => {
       ['data/demo/bad.csv:63  cells in this row: 6; names of columns: 4'],
       [
         expect.stringMatching(
-          /^data\/demo\/lean.yaml:10:9 {2}flowTemperature.flow is 50 °C; it lies above the return temperature \(60 °C\)/,
+          /^data\/demo\/lean.yaml:10:9 {2}flowTemperature.flow is 50 °C; it must lie above the return temperature \(60 °C\)/,
         ),
       ],
       ['data/demo/units/none.yaml:3002:19  there is no such file'],

@@ -32,6 +32,10 @@ export const scenarioProblems = {
     says: '{path} has {found}; {allowed}',
     cure: 'add what is missing, or take out what is too much',
   },
+  'scenario.hygiene-below-set-point': {
+    says: '{path} is {found}, the set point is {allowed}: the weekly run goes to the set point and no further',
+    cure: 'enter the temperature that the hygiene run reaches, or leave the run out',
+  },
   'scenario.contradiction': { says: '{path} is {found}; {allowed}', cure: 'correct one of the two' },
   'scenario.points-not-rising': {
     says: '{path} is at {found}, not above the point before it at {allowed}',

@@ -58,6 +58,7 @@ function yearOf(
       hotWater: totals.annual.hotWaterAsked,
       hotWaterByHour: plan.hotWater?.draw ?? new Float64Array(c.hours),
       cylinderLoss: boiler.cylinderLoss ?? totals.annual.cylinderLoss,
+      cylinderLossByHour: boiler.cylinderLoss === undefined ? c.cylinderLoss : undefined,
     },
   );
 }

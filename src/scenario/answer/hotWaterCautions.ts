@@ -18,11 +18,8 @@ export function hotWaterCautions({ loaded, totals, columns }: SeenYear): SeenWar
   if (setPoint < COOL_STORE && hygiene === undefined) {
     list.push({ code: 'hot-water.legionella', values: { setPoint, usual: HYGIENE_STORE } });
   }
-  if (hygiene !== undefined && hygiene.temperature < HYGIENE_STORE) {
-    list.push({
-      code: 'hot-water.hygiene-run-cool',
-      values: { reached: hygiene.temperature, usual: HYGIENE_STORE },
-    });
+  if (hygiene !== undefined && hottest < HYGIENE_STORE) {
+    list.push({ code: 'hot-water.hygiene-run-cool', values: { reached: hottest, usual: HYGIENE_STORE } });
   }
   if (hottest > SCALDING) list.push({ code: 'hot-water.scalding', values: { hottest } });
   if (draw.given === 'litres' && setPoint < draw.useTemperature) {

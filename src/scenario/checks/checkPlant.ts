@@ -68,9 +68,10 @@ export function checkHotWater(yaml: YamlFile, hotWater: Scenario['hotWater']): P
     const found = `${coldWater.amplitude} K`;
     problems.push(yaml.problem([...path, 'coldWater', 'amplitude'], { code: 'scenario.frozen-water', found }));
   }
-  if (hygiene !== undefined) {
-    const bound = { name: 'the set point', value: setPoint };
-    problems.push(...below(yaml, [...path, 'hygiene', 'temperature'], hygiene.temperature, bound));
+  if (hygiene !== undefined && hygiene.temperature < setPoint) {
+    const fault = { found: `${hygiene.temperature} °C`, allowed: `${setPoint} °C` };
+    const mild = { code: 'scenario.hygiene-below-set-point', severity: 'warning', ...fault } as const;
+    problems.push(yaml.problem([...path, 'hygiene', 'temperature'], mild));
   }
   return problems;
 }

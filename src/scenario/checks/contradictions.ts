@@ -11,17 +11,17 @@ export interface Bound {
 
 /** A temperature that must lie above another entry's. */
 export function notAbove(yaml: YamlFile, path: EntryPath, value: number, bound: Bound): Problem[] {
-  return value > bound.value ? [] : [contradiction(yaml, path, value, `it lies above ${boundText(bound)}`)];
+  return value > bound.value ? [] : [contradiction(yaml, path, value, `it must lie above ${boundText(bound)}`)];
 }
 
 /** A temperature that must not lie below another entry's. */
 export function below(yaml: YamlFile, path: EntryPath, value: number, bound: Bound): Problem[] {
-  return value >= bound.value ? [] : [contradiction(yaml, path, value, `it is not below ${boundText(bound)}`)];
+  return value >= bound.value ? [] : [contradiction(yaml, path, value, `it must not lie below ${boundText(bound)}`)];
 }
 
 /** A temperature that must lie below another entry's. */
 export function notBelow(yaml: YamlFile, path: EntryPath, value: number, bound: Bound): Problem[] {
-  return value < bound.value ? [] : [contradiction(yaml, path, value, `it lies below ${boundText(bound)}`)];
+  return value < bound.value ? [] : [contradiction(yaml, path, value, `it must lie below ${boundText(bound)}`)];
 }
 
 /** Points of a polyline whose temperature does not rise. */

@@ -41,7 +41,7 @@ export function prepareHotWater(entry: HotWaterEntry, clock: CivilClock, kept?: 
     coldWater,
     allowed,
     hygieneAsked,
-    hygieneTemperature: entry.hygiene?.temperature ?? entry.setPoint,
+    hygieneTemperature: Math.max(entry.setPoint, entry.hygiene?.temperature ?? entry.setPoint),
     immersionPower: entry.immersionPower,
   };
 }

@@ -23,27 +23,30 @@ export function stepsOfRule(rule: WhenRule, clock: CivilClock): Uint8Array {
   const start = rule.start === undefined ? 0 : (minuteOfDay(rule.start) ?? 0);
   const end = rule.end === undefined ? MINUTES_PER_DAY : (minuteOfDay(rule.end) ?? MINUTES_PER_DAY);
   const weekdays = rule.weekdays?.map((day) => WEEKDAY_NAMES.indexOf(day) + 1);
-  const inDates = dateTest(rule, clock.calendarYear);
+  const inDates = dateTest(rule, clock);
   const holds = new Uint8Array(clock.hours);
   for (let i = 0; i < clock.hours; i++) {
     const minute = clock.minuteOfDay[i];
     const inTime = start < end ? minute >= start && minute < end : minute >= start || minute < end;
     const inWeek = weekdays === undefined || weekdays.includes(clock.weekday[i]);
-    holds[i] = inTime && inWeek && inDates(clock.month[i], clock.dayOfMonth[i]) ? 1 : 0;
+    holds[i] = inTime && inWeek && inDates(i) ? 1 : 0;
   }
   return holds;
 }
 
-/** Days from … to, both included: of one year where written with it, else of every year and then also across the new year. */
-function dateTest(rule: WhenRule, calendarYear: number): (month: number, day: number) => boolean {
+/**
+ * Whether the civil date of a step lies in the days from … to, both included: of the very years written, else of every
+ * year and then also across the new year.
+ */
+function dateTest(rule: WhenRule, clock: CivilClock): (step: number) => boolean {
   const from = rule.from === undefined ? undefined : writtenDate(rule.from);
   const to = rule.to === undefined ? undefined : writtenDate(rule.to);
   const withYear = from?.year !== undefined || to?.year !== undefined;
   const first = dateKey(from ?? { month: 1, dayOfMonth: 1 });
   const last = dateKey(to ?? { month: 12, dayOfMonth: 31 });
-  const year = withYear ? calendarYear : 0;
-  return (month, dayOfMonth) => {
-    const at = dateKey({ year, month, dayOfMonth });
+  return (step) => {
+    const year = withYear ? clock.year[step] : 0;
+    const at = dateKey({ year, month: clock.month[step], dayOfMonth: clock.dayOfMonth[step] });
     return first <= last ? at >= first && at <= last : at >= first || at <= last;
   };
 }

@@ -131,7 +131,7 @@ describe('a job that is wrong', () => {
 
   it('is held against the checks between entries too', () => {
     expect(textsOf('  - { given: values, name: return, path: flowTemperature.return, values: [60] }')[0]).toMatch(
-      /flowTemperature\.flow is \d+ °C; it lies above the return temperature \(60 °C\)/,
+      /flowTemperature\.flow is \d+ °C; it must lie above the return temperature \(60 °C\)/,
     );
   });
 

@@ -95,6 +95,13 @@ describe('electric heating on the household’s tariff', () => {
     expect(electricity[6000]).toBeCloseTo(200 + 0.1, 12);
   });
 
+  test('has the loss of the cylinder in the hours in which it is lost, where these are known', () => {
+    const cylinderLossByHour = new Float64Array(8760).fill(0.438, 0, 1000);
+    const { electricity } = boilerYear(electric, { ...asked, cylinderLossByHour });
+    expect(electricity[0]).toBeCloseTo(0.06 + 2.5 + 0.438 / 0.5, 12);
+    expect(electricity[5000]).toBe(0);
+  });
+
   test('takes over the year what the bill’s hours add up to, and buys no fuel', () => {
     const year = boilerYear(electric, asked);
     // 10,000/0.8 + (100 + 438)/0.5

@@ -85,7 +85,7 @@ const cases: Record<keyof typeof scenarioProblems | keyof typeof mapProblems, Ca
   ],
   'scenario.contradiction': [
     house('return: 38', 'return: 46'),
-    'flowTemperature.flow is 45 °C; it lies above the return temperature (46 °C)',
+    'flowTemperature.flow is 45 °C; it must lie above the return temperature (46 °C)',
   ],
   'scenario.points-not-rising': [
     lumped('[15, 28]', '[-15, 28]'),
@@ -215,6 +215,10 @@ const cases: Record<keyof typeof scenarioProblems | keyof typeof mapProblems, Ca
   'scenario.frozen-water': [
     lumped('amplitude: 4', 'amplitude: 11'),
     'hotWater.coldWater.amplitude is 11 K, more than the mean',
+  ],
+  'scenario.hygiene-below-set-point': [
+    lumped('hour: 12', 'hour: 12, temperature: 50 }\n  setPoint: 55 #'),
+    'warning: hotWater.hygiene.temperature is 50 °C, the set point is 55 °C: the weekly run goes to the set point',
   ],
   'scenario.sun-without-radiation': [
     house('internalGains: 300', 'solarAperture: 2'),

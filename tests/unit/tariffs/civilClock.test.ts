@@ -38,6 +38,7 @@ describe('every step of a year agrees with luxon in', () => {
       const same =
         clock.minuteOfDay[i] === t.hour * 60 + t.minute &&
         clock.weekday[i] === t.weekday &&
+        clock.year[i] === t.year &&
         clock.month[i] === t.month &&
         clock.dayOfMonth[i] === t.day;
       if (!same) wrong.push(t.toString());

@@ -24,6 +24,14 @@ function priceAt(tariff: PreparedTariff, iso: string): number {
 // Sums of at most 25 prices of one decimal or two: rounding stays far below 1e-12.
 const DIGITS = 12;
 
+test('a tariff laid on the year keeps its name and currency', () => {
+  const { name, currency } = prepared(
+    { ...ratesOf({ name: 'all', price: 0.3 }), name: 'Own', currency: 'EUR' },
+    berlin,
+  );
+  expect([name, currency]).toEqual(['Own', 'EUR']);
+});
+
 describe('a night rate across midnight', () => {
   const tariff = prepared(nightAndDay, berlin);
 
@@ -205,13 +213,24 @@ describe('holidays', () => {
     expect(priceAt(tariff, '2025-12-26T00:00+01:00')).toBe(0);
   });
 
-  test('of the year count also for hours that the zone leaves in the next year', () => {
-    // Weather in UTC: its last hour is 1 January 2026 in Berlin, the year taken as periodic.
+  // Weather in UTC: its first 5 hours are 31 December 2024 in New York, its last 9 are 1 January 2026 in Tokyo.
+  test.each([
+    ['America/New_York', { ofYear: '2025-12-31', ofNeighbour: '2024-12-31', ofEveryYear: '12-31' }, [0, 5]],
+    ['Asia/Tokyo', { ofYear: '2025-01-01', ofNeighbour: '2026-01-01', ofEveryYear: '01-01' }, [8751, 8760]],
+  ] as const)('with a year are of that very year, in %s too', (zone, days, [from, to]) => {
     const rates = [{ name: 'holiday', price: 1, holidays: 'only' } as const, { name: 'rest', price: 0 }];
-    const clock = clockOf('Europe/Berlin', 0);
-    expect(prepared(tariffOf({ rates, holidays: ['2025-01-01'] }), clock).price[8759]).toBe(1);
-    expect(prepared(tariffOf({ rates, holidays: ['2026-01-01', '2025-05-01'] }), clock).price[8759]).toBe(1);
-    expect(prepared(tariffOf({ rates, holidays: ['2026-01-01', '2025-05-01'] }), clock).price[0]).toBe(0);
+    const clock = clockOf(zone, 0);
+    const hoursOf = (...listed: string[]) => {
+      const { price, hoursOfRate } = prepared(tariffOf({ rates, holidays: listed }), clock);
+      return { beyond: price.slice(from, to).reduce((sum, p) => sum + p, 0), year: hoursOfRate[0] };
+    };
+    // Of the holiday of the calendar year itself the series holds what the zone has not carried out of it.
+    const beyond = to - from;
+    const within = zone === 'Asia/Tokyo' ? 24 - 9 : 24 - 5;
+    expect(hoursOf(days.ofYear)).toEqual({ beyond: 0, year: within });
+    expect(hoursOf(days.ofNeighbour)).toEqual({ beyond, year: beyond });
+    expect(hoursOf(days.ofEveryYear)).toEqual({ beyond, year: 24 });
+    expect(hoursOf(days.ofYear, days.ofNeighbour)).toEqual({ beyond, year: 24 });
   });
 
   test('on 29 February do no harm in a common year', () => {

@@ -126,6 +126,8 @@ describe('local stamps', () => {
 
 describe('stamps', () => {
   test('are whole minutes of ISO 8601', () => {
+    expect(readStamp('1970-01-02T00:30+18:00')).toEqual({ clockMinute: 1470, offsetMinutes: 1080 });
+    expect(readStamp('1970-01-02T00:30+18:01')).toBeUndefined();
     expect(readStamp('1970-01-02T00:30+01:00')).toEqual({ clockMinute: 1470, offsetMinutes: 60 });
     expect(readStamp('1970-01-01 01:00:00.000-03:30')).toEqual({ clockMinute: 60, offsetMinutes: -210 });
     expect(readStamp('1970-01-01T01:00')).toEqual({ clockMinute: 60 });

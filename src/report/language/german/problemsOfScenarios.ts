@@ -50,6 +50,10 @@ export const problemsOfScenarios: Readonly<Record<keyof typeof scenarioProblems,
     says: '{path} hat {found}; {allowed}',
     cure: 'ergänzen Sie, was fehlt, oder nehmen Sie heraus, was zu viel ist',
   },
+  'scenario.hygiene-below-set-point': {
+    says: '{path} ist {found}, der Sollwert ist {allowed}: Der wöchentliche Lauf geht bis zum Sollwert und nicht weiter',
+    cure: 'tragen Sie die Temperatur ein, die der Hygienelauf erreicht, oder lassen Sie den Lauf weg',
+  },
   'scenario.contradiction': { says: '{path} ist {found}; {allowed}', cure: 'berichtigen Sie eines von beiden' },
   'scenario.points-not-rising': {
     says: '{path} liegt bei {found}, nicht über dem Punkt davor bei {allowed}',

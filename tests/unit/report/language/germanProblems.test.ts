@@ -49,9 +49,9 @@ describe('a problem in German', () => {
         code: 'scenario.contradiction',
         path: 'x',
         found: '20 °C',
-        allowed: 'it lies above the return temperature (35.5 °C)',
+        allowed: 'it must lie above the return temperature (35.5 °C)',
       },
-      'x ist 20 °C; es liegt über der Rücklauftemperatur (35,5 °C)',
+      'x ist 20 °C; es muss über der Rücklauftemperatur liegen (35,5 °C)',
     ],
     [
       {

@@ -205,7 +205,7 @@ describe('of hot water it is refused', () => {
     [
       'hour: 12',
       'hour: 12, temperature: 50 }\n  setPoint: 55 #',
-      'scenario.contradiction',
+      'scenario.hygiene-below-set-point',
       'hotWater.hygiene.temperature',
     ],
     ['volume: 200', 'volume: 200\n  setPoint: 30', 'scenario.contradiction', 'hotWater.setPoint'],

@@ -139,6 +139,10 @@ describe('the weekly hygiene run', () => {
   });
 
   test('is never asked for where none is entered', () => {
+    expect(
+      prepare({ setPoint: 65, hygiene: { weekday: 'mon', hour: 13, temperature: 60 } }).hygieneTemperature,
+      'a run does not cool what stands warmer',
+    ).toBe(65);
     expect(prepare({}).hygieneAsked.every((asked) => asked === 0)).toBe(true);
   });
 });

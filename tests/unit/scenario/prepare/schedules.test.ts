@@ -110,6 +110,37 @@ describe('a rule by the day', () => {
     expect(count(stepsOfRule({ from: '2023-02-01', to: '2023-02-06' }, berlin))).toBe(0);
   });
 
+  // Weather in UTC: its first 5 hours are 31 December 2024 in New York, its last 9 are 1 January 2026 in Tokyo.
+  test.each([
+    {
+      ...{ zone: 'America/New_York', beyond: [0, 5], within: 5 * 24 - 5 },
+      ...{ ofYear: ['2025-12-27', '2025-12-31'], ofNeighbour: ['2024-12-27', '2024-12-31'] },
+    },
+    {
+      ...{ zone: 'Asia/Tokyo', beyond: [8751, 8760], within: 5 * 24 - 9 },
+      ...{ ofYear: ['2025-01-01', '2025-01-05'], ofNeighbour: ['2026-01-01', '2026-01-05'] },
+    },
+  ])('of a written year leaves out the hours of $zone in the neighbouring one', (hours) => {
+    const clock = clockOf(hours.zone, 0);
+    const countsOf = ([from, to]: string[]) => {
+      const holds = stepsOfRule({ from, to }, clock);
+      return { beyond: count(holds.subarray(...hours.beyond)), year: count(holds) };
+    };
+    const beyond = hours.beyond[1]! - hours.beyond[0]!;
+    expect(countsOf(hours.ofYear)).toEqual({ beyond: 0, year: hours.within });
+    expect(countsOf(hours.ofNeighbour)).toEqual({ beyond, year: beyond });
+    expect(countsOf(hours.ofYear.map((date) => date.slice(5)))).toEqual({ beyond, year: 5 * 24 });
+  });
+
+  test('of written years across a new year holds in the hours of the neighbouring one', () => {
+    const newYork = clockOf('America/New_York', 0);
+    // 5 hours of 31 December 2024, then 6 days of January 2025
+    expect(count(stepsOfRule({ from: '2024-12-20', to: '2025-01-06' }, newYork))).toBe(5 + 6 * 24);
+    const tokyo = clockOf('Asia/Tokyo', 0);
+    // 12 days of December 2025, then 9 hours of 1 January 2026
+    expect(count(stepsOfRule({ from: '2025-12-20', to: '2026-01-06' }, tokyo))).toBe(12 * 24 + 9);
+  });
+
   test('holds within all of its limits at once', () => {
     const rule = { start: '12:00', end: '13:00', weekdays: ['mon'], from: '03-01', to: '03-31' } as const;
     // Mondays of March 2025: 3, 10, 17, 24, 31, the last in summer time

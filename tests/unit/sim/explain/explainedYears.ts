@@ -111,7 +111,8 @@ export const explainedPlans: Record<string, YearPlan> = {
   }),
 };
 
-function withRest(plan: YearPlan, switchTemperature: number): YearPlan {
+/** The same plan with the heat pump at rest below a temperature. */
+export function withRest(plan: YearPlan, switchTemperature: number): YearPlan {
   return { ...plan, resting: Uint8Array.from(plan.weather.temperature, (air) => (air < switchTemperature ? 1 : 0)) };
 }
 

@@ -1,7 +1,8 @@
 import { expect, test } from 'vitest';
 import { MARK } from '../../../../src/sim/columns.ts';
 import type { StageName } from '../../../../src/sim/explain/stage.ts';
-import { type ExplainedCase, explainedCases, explainedPlans, figureOf } from './explainedYears.ts';
+import { planOf } from '../planBuilder.ts';
+import { type ExplainedCase, explainedCases, explainedPlans, figureOf, withRest } from './explainedYears.ts';
 
 // What is said of an hour beside its figures is held against the columns of the year, which other tests hold.
 
@@ -115,4 +116,50 @@ test('how frost grows is shown in just the hours with a coil below freezing', ()
     if (coil >= 0 && coil < 1) shown.justAbove++;
   }
   expect(Math.min(shown.frost, shown.above, shown.justAbove)).toBeGreaterThan(5);
+});
+
+test('rooms are said to be held back by the heating limit, or to need nothing, in just those hours', () => {
+  const said = { held: 0, noNeed: 0, needs: 0 };
+  for (const one of explainedCases(1)) {
+    const { plan, year, i } = one;
+    const { findings } = stageOf(one, 'need')!;
+    const held = plan.weather.trailingMeanTemperature[i]! >= plan.house.heatingLimit;
+    const noNeed = !held && year.spaceHeatNeed[i] === 0;
+    expect(findings.includes('heatingLimitHolds'), `${one.name} ${i}`).toBe(held);
+    expect(findings.includes('noNeed'), `${one.name} ${i}`).toBe(noNeed);
+    said[held ? 'held' : noNeed ? 'noNeed' : 'needs']++;
+  }
+  expect(Math.min(said.held, said.noNeed, said.needs)).toBeGreaterThan(20);
+});
+
+test('a heating limit holds at the limit itself', () => {
+  const flat = planOf({
+    hours: 48,
+    temperature: new Float64Array(48).fill(12),
+    house: { heatingLimit: 12 },
+  });
+  for (const one of explainedCases(12, { flat })) {
+    expect(stageOf(one, 'need')!.findings).toContain('heatingLimitHolds');
+    expect(one.year.spaceHeatNeed[one.i]).toBe(0);
+  }
+});
+
+test('a cylinder is said to be without the heat pump in just the reheats in which that rests', () => {
+  const said = { rests: 0, runs: 0 };
+  const resting = withRest(explainedPlans['hot water with a hygiene run']!, -2);
+  for (const one of explainedCases(1, { ...explainedPlans, resting })) {
+    const { findings = [] } = stageOf(one, 'reheat') ?? {};
+    if (!(stageOf(one, 'reheat')?.figures ?? []).some(({ name }) => name === 'reheatTarget')) continue;
+    const rests = one.plan.resting[one.i] === 1;
+    expect(findings.includes('restsForWater'), `${one.name} ${one.i}`).toBe(rests);
+    said[rests ? 'rests' : 'runs']++;
+  }
+  expect(Math.min(said.rests, said.runs)).toBeGreaterThan(3);
+});
+
+test('the sums of an hour name the electricity for water in just the houses that have a cylinder', () => {
+  for (const one of explainedCases(200)) {
+    const names = stageOf(one, 'sums')!.figures.map(({ name }) => name);
+    expect(names.includes('heatPumpWaterElectricity'), one.name).toBe(one.plan.hotWater !== null);
+  }
 });
