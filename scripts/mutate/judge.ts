@@ -11,7 +11,7 @@ export interface Verdict {
   readonly noticedBy?: string;
 }
 
-/** A run that takes longer hangs, and that is noticed as well, ms. */
+/** A run that takes longer hangs, and that is noticed as well, ms; its tests run in threads, which end with it. */
 const LONGEST_RUN = 600_000;
 
 /** Runs tests in a folder; undefined when all of them passed. */
@@ -21,13 +21,17 @@ export function failureOf(
   shown: 'shown' | 'silent' = 'silent',
 ): 'fails' | 'hangs' | undefined {
   if (tests.length === 0) return undefined;
-  const { status, error } = spawnSync(process.execPath, ['node_modules/vitest/vitest.mjs', 'run', ...tests], {
-    cwd: folder,
-    env: { ...process.env, NO_COLOR: '1' },
-    stdio: shown === 'shown' ? 'inherit' : 'ignore',
-    timeout: LONGEST_RUN,
-    killSignal: 'SIGKILL',
-  });
+  const { status, error } = spawnSync(
+    process.execPath,
+    ['node_modules/vitest/vitest.mjs', 'run', '--pool=threads', ...tests],
+    {
+      cwd: folder,
+      env: { ...process.env, NO_COLOR: '1' },
+      stdio: shown === 'shown' ? 'inherit' : 'ignore',
+      timeout: LONGEST_RUN,
+      killSignal: 'SIGKILL',
+    },
+  );
   if (error !== undefined) return 'hangs';
   return status === 0 ? undefined : 'fails';
 }
