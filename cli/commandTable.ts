@@ -88,7 +88,7 @@ export const commandTable: readonly CommandEntry[] = [
     name: 'degree-days',
     argument: 'WEATHER',
     argumentSays: 'hourly weather of one year (CSV)',
-    says: 'heating degree days of a weather file by month and year, K·d',
+    says: 'heating or cooling degree days of a weather file by month and year, K·d',
     options: [
       { name: 'base', value: 'TEMPERATURE', says: 'base temperature, °C', usual: '15.5' },
       {
@@ -98,12 +98,14 @@ export const commandTable: readonly CommandEntry[] = [
         choices: ['hours', 'mean', 'minmax', 'fourcase', 'threshold'],
         usual: 'hours',
       },
+      { name: 'cooling', says: 'count what lies above the base, for cooling; heating when left out' },
       { name: 'read', value: 'FILE', says: 'how to read the weather file (YAML), where it does not say so itself' },
       json,
     ],
     examples: [
       'winterledger degree-days data/demo/weather.csv --base 15.5',
       'winterledger degree-days data/demo/weather.csv --base 18.3 --method mean --json -',
+      'winterledger degree-days data/demo/weather.csv --cooling --base 22',
     ],
     load: () => import('./commands/degreeDays.ts'),
   },

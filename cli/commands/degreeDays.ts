@@ -5,7 +5,12 @@ import { documentText } from '../../src/report/documentText.ts';
 import { weatherLines } from '../../src/report/weatherLines.ts';
 import { InputFiles, type InputRecord } from '../../src/scenario/inputFiles.ts';
 import { loadReadSettings, type ReadWeather, weatherFrom } from '../../src/scenario/loadWeather.ts';
-import { type DegreeDayMethod, heatingDegreeDays } from '../../src/weather/degreeDays.ts';
+import {
+  coolingDegreeDays,
+  type DegreeDayKind,
+  type DegreeDayMethod,
+  heatingDegreeDays,
+} from '../../src/weather/degreeDays.ts';
 import type { ReadSettings } from '../../src/weather/readSettings.ts';
 import { DiskSource } from '../diskSource.ts';
 import { type CommandInput, EXIT, type Io } from '../io.ts';
@@ -25,8 +30,9 @@ export async function run({ files, options }: CommandInput, io: Io): Promise<num
     return wrongUse(`--base is '${options.base}'; it is ${allowed}`, 'degree-days', io);
   }
   const { read, json } = options;
+  const kind = options.cooling === undefined ? 'heating' : 'cooling';
   return withOutputs([json], io, (outputs) =>
-    count({ file: files[0], base, method: methodOf(options.method), read, json, outputs }, io),
+    count({ file: files[0], kind, base, method: methodOf(options.method), read, json, outputs }, io),
   );
 }
 
@@ -50,6 +56,7 @@ function methodOf(word: string | undefined): DegreeDayMethod {
 
 interface Asked {
   readonly file: string;
+  readonly kind: DegreeDayKind;
   readonly base: number;
   readonly method: DegreeDayMethod;
   /** File of the read settings. */
@@ -58,16 +65,21 @@ interface Asked {
   readonly outputs: Outputs;
 }
 
-async function count({ file, base, method, read, json, outputs }: Asked, io: Io): Promise<number> {
+async function count(asked: Asked, io: Io): Promise<number> {
+  const { file, kind, base, method, read, json, outputs } = asked;
   const source = new DiskSource();
   const { weather, inputs, problems } = readFiles(file, read, source);
   const clashes = outputs.overInputs(source.identities);
   await tellProblems([...clashes, ...problems], io);
   if (weather === undefined || clashes.length > 0) return EXIT.wrongInput;
   const { series, recognised } = weather;
-  const degreeDays = heatingDegreeDays(series.temperature, base, method);
-  const understood = { file, ...weatherLines(recognised) };
-  const document = degreeDaysDocument({ version: io.version, base, method, degreeDays, weather: understood, inputs });
+  const counted = kind === 'heating' ? heatingDegreeDays : coolingDegreeDays;
+  const document = degreeDaysDocument({
+    version: io.version,
+    ...{ kind, base, method, inputs },
+    degreeDays: counted(series.temperature, base, method),
+    weather: { file, ...weatherLines(recognised) },
+  });
   await outputs.write(json, [documentText(document)]);
   await outputs.finish();
   if (!outputs.takesStdout) await io.stdout.write(degreeDaysText(document));

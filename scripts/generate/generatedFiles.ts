@@ -44,8 +44,8 @@ const documents: readonly { name: string; title: string; schema: z.ZodObject }[]
   { name: 'season', title: 'A Winterledger label check, as season --json writes it', schema: seasonSchema },
 ];
 
-/** Kinds that are tables and have no schema: their prose says all. */
-const tables = ['weather', 'prices'];
+/** Kinds without a table of keys: their prose says all. */
+const withoutKeys = ['weather', 'prices', 'results'];
 
 /**
  * Every file that follows from the schemas, with its content.
@@ -60,7 +60,7 @@ export function generatedFiles(): Map<string, string> {
   const sections = [
     prose('introduction'),
     ...kinds.map(({ name, schema }) => `${prose(name)}\n${keyTables(schema)}`),
-    ...tables.map(prose),
+    ...withoutKeys.map(prose),
   ];
   files.set('docs/formats.md', sections.join('\n'));
   files.set('README.md', readmeWithAnswer());

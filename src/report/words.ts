@@ -97,16 +97,28 @@ export const english = {
   fieldStudy: ({ factors, place }: Said) => `${factors} (${place})`,
 
   degreeDays: {
-    title: ({ base, method }: Said) =>
-      method === 'threshold' ? 'Heating degree days, threshold' : `Heating degree days to ${base}, ${method}`,
+    kinds: { heating: 'Heating degree days', cooling: 'Cooling degree days' },
+    title: ({ kind, base, method }: Said) =>
+      method === 'threshold' ? `${kind}, threshold` : `${kind} to ${base}, ${method}`,
     column: 'K·d',
     methods: {
-      hours: 'Each hour counts by what it lies below the base (ISO 15927-6).',
-      mean: 'Each day counts by what its mean lies below the base.',
-      minmax: 'Each day counts by what the middle of its extremes lies below the base (the US convention).',
-      fourcase: 'Each day counts by its extremes, with rules for days that cross the base (the UK convention).',
-      threshold:
-        'Days with a mean of 15 °C or less count by their distance to 18 °C (European statistics); no base is used.',
+      heating: {
+        hours: 'Each hour counts by what it lies below the base (ISO 15927-6).',
+        mean: 'Each day counts by what its mean lies below the base.',
+        minmax: 'Each day counts by what the middle of its extremes lies below the base (the US convention).',
+        fourcase: 'Each day counts by its extremes, with rules for days that cross the base (the UK convention).',
+        threshold:
+          'Days with a mean of 15 °C or less count by their distance to 18 °C (European statistics); no base is used.',
+      },
+      cooling: {
+        hours: 'Each hour counts by what it lies above the base, as ISO 15927-6 counts what lies below.',
+        mean: 'Each day counts by what its mean lies above the base.',
+        minmax: 'Each day counts by what the middle of its extremes lies above the base (the US convention).',
+        fourcase:
+          'Each day counts by what of its extremes lies above the base, with rules for days that cross it (the UK convention).',
+        threshold:
+          'Days with a mean of 24 °C or more count by their distance to 21 °C (European statistics); no base is used.',
+      },
     },
   },
 

@@ -9,6 +9,9 @@ import { monthStarts } from './monthSteps.ts';
  */
 export type DegreeDayMethod = 'hours' | 'mean' | 'minmax' | 'fourcase' | 'threshold';
 
+/** Whether what lies below the base counts, or what lies above it. */
+export type DegreeDayKind = 'heating' | 'cooling';
+
 /** Methods that need no more than the highest and the lowest temperature of each day. */
 export type DailyExtremesMethod = 'minmax' | 'fourcase';
 

@@ -41,6 +41,20 @@ describe('degree-days', () => {
     expect(Math.abs(annual - expected)).toBeLessThan(1e-6);
   });
 
+  it('counts for heating unless cooling is asked, and says which', async () => {
+    expect((await jsonOf(weather, '--base', '22')).kind).toBe('heating');
+    const { kind, base, annual, monthly } = await jsonOf(weather, '--cooling', '--base', '22');
+    expect({ kind, base }).toEqual({ kind: 'cooling', base: 22 });
+    // The hours above the base, summed here straight from the file; 1e-6 K·d allows for another order of the sum.
+    const above = (temperatures: number[]) => temperatures.reduce((sum, t) => sum + Math.max(0, t - 22), 0) / 24;
+    expect(annual).toBeGreaterThan(1);
+    expect(Math.abs(annual - above(temperature))).toBeLessThan(1e-6);
+    expect(Math.abs(monthly[6] - above(temperature.slice(181 * 24, 212 * 24)))).toBeLessThan(1e-6);
+    const { stdout } = await run(folder, 'degree-days', weather, '--cooling', '--base', '22');
+    expect(stdout).toMatch(/^Cooling degree days to 22\.0 °C, hours\n/);
+    expect(stdout).toContain('lies above the base');
+  });
+
   it('prints months, year, how it counted and what it recognised', async () => {
     const { code, stdout } = await run(folder, 'degree-days', weather, '--method', 'threshold');
     expect(code).toBe(0);

@@ -84,6 +84,18 @@ describe('the cold water', () => {
     near(dayOf(draw, stepAt(berlin, '2025-08-17T22:00')), (3.489 * 26) / 30);
   });
 
+  test('has 1 March for its day 60 with 8760 hours, on a leap year too, and for its day 61 with 8784', () => {
+    const coldWater = { mean: 10, amplitude: 4 };
+    for (const { hours, day } of [
+      { hours: 8760, day: 60 },
+      { hours: 8784, day: 61 },
+    ]) {
+      const clock = clockOf('Europe/Berlin', 60, 2024, hours);
+      const column = prepare({ coldWater: { ...coldWater, warmestDay: day } }, clock).coldWater;
+      near(column[stepAt(clock, '2024-03-01T10:00')], 14);
+    }
+  });
+
   test('warmer than the use takes nothing', () => {
     const { draw } = prepare({
       draw: { given: 'litres', litresPerDay: 100, useTemperature: 30 },
@@ -136,6 +148,20 @@ describe('the weekly hygiene run', () => {
     expect(asked).toHaveLength(52);
     expect(asked[0]).toBe('2025-01-06T12:00');
     expect(asked).toContain('2025-07-07T11:00');
+  });
+
+  test('is left out in the week whose hour the clocks skip, and asked twice where it occurs twice', () => {
+    const { hygieneAsked } = prepare({ hygiene: { weekday: 'sun', hour: 2, temperature: 60 } });
+    const asked = instantsOf(berlin, hygieneAsked);
+    // Central European Time in 2025: 2:00 is skipped on 30 March and occurs at 0:00 and 1:00 UTC on 26 October.
+    expect(asked.filter((instant) => instant > '2025-03-23' && instant < '2025-04-07')).toEqual([
+      '2025-03-23T01:00',
+      '2025-04-06T00:00',
+    ]);
+    expect(asked.filter((instant) => instant.startsWith('2025-10-26'))).toEqual([
+      '2025-10-26T00:00',
+      '2025-10-26T01:00',
+    ]);
   });
 
   test('is never asked for where none is entered', () => {
