@@ -82,7 +82,9 @@ describe('check', () => {
     const told = stderr.split('\n').filter((line) => /^\S/.test(line));
     expect(told).toEqual([
       expect.stringMatching(/many\.yaml:\d+:9 {2}.*Europe\/Berln/),
-      expect.stringMatching(/many\.yaml:\d+:9 {2}flowTemperature\.flow is 50 °C; it must lie above the return temperature/),
+      expect.stringMatching(
+        /many\.yaml:\d+:9 {2}flowTemperature\.flow is 50 °C; it must lie above the return temperature/,
+      ),
       expect.stringMatching(/many\.yaml:\d+:27 {2}circulation\.pumpPower is -1/),
       expect.stringMatching(/units\/none\.yaml:.* {2}there is no such file/),
       expect.stringMatching(/wether\.csv:.* {2}there is no such file/),
