@@ -241,4 +241,32 @@ export const equivalents: readonly Equivalent[] = [
     becomes: '/',
     why: 'a short way for most steps: the way by pieces below comes to the same mean',
   },
+  {
+    file: 'src/sim/backup.ts',
+    text: 'if (lacking > UNMET) c.marks[i] |= MARK.unmet;',
+    was: '>',
+    becomes: '>=',
+    why: 'a lack that is the bound to the last bit is no more missing than one beside it',
+  },
+  {
+    file: 'src/sim/flowTemperature.ts',
+    text: 'overTemperature: 0,',
+    was: '0',
+    becomes: '1',
+    why: 'read of emitters only, and this is a setting without them',
+  },
+  {
+    file: 'src/sim/lumpedHouse.ts',
+    text: 'if (!(opaque < hSurfaceMass)) {',
+    was: '<',
+    becomes: '<=',
+    why: 'a loss that is the bound to the last bit is no more possible than one beside it',
+  },
+  {
+    file: 'src/tariffs/seriesMeans.ts',
+    text: 'if (index >= 0 && index < values.length && end <= (index + 1) * stepMinutes) return values[index];',
+    was: '0',
+    becomes: '1',
+    why: 'a short way for most steps: the way by pieces below comes to the same mean',
+  },
 ];

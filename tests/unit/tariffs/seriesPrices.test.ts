@@ -99,6 +99,13 @@ describe('a price series prices each step by its minutes', () => {
     expect(said(problems)).toEqual(['prices.csv  the price series does not reach 2025-11-30T07:00Z']);
   });
 
+  test('a series that begins late and ends with the year lacks the months before it', () => {
+    const series = seriesOf('2025-03-01T00:00+01:00', 60, 306 * 24, () => 0.3);
+    const { prepared: made, problems } = prepareTariff({ tariff: all, file: 't.yaml', series }, berlin);
+    expect(made).toBeUndefined();
+    expect(said(problems).join()).toMatch(/2024-12-31T23:00/);
+  });
+
   test('rates and series add, and the cost by rate holds the series of its minutes', () => {
     // Night 0.20 + series 0.1 at even hours of UTC, 0 at odd ones. 1 kWh in one step at 22:00 UTC+1 = 21:00 UTC.
     const rates = [
