@@ -34,6 +34,8 @@ const KIND_OF = { price: 'priceSeries', carbon: 'carbonFactors' } as const;
 
 /** Lines above the names of the columns that are looked through. */
 const MOST_LINES_ABOVE = 200;
+/** Characters of a line that are looked at: a line without end is not parted into its cells. */
+const LOOKED_AT = 10_000;
 
 /**
  * What kind of table a text is: of temperatures, weather; of prices or carbon factors, such a series; of energies, readings
@@ -63,7 +65,8 @@ function quantityOf(name: string): Quantity | undefined {
   return QUANTITIES.find(([, words]) => words.test(name))?.[0];
 }
 
-function cellsOf(line: string): string[] {
+function cellsOf(whole: string): string[] {
+  const line = whole.slice(0, LOOKED_AT);
   const mark = ['\t', ';', '|'].find((each) => line.includes(each)) ?? ',';
   return line.split(mark).map((cell) => cell.trim().replace(/^"(.*)"$/, '$1'));
 }

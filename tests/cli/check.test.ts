@@ -46,7 +46,7 @@ describe('check', () => {
     expect(wrong.code).toBe(2);
     expect(wrong.stderr).toContain("homes.csv:1:6  column 'house.heatLos.value' is no place in a scenario");
     expect(wrong.stderr).toContain('rows.csv:3  cells in this row: 1; names of columns: 2');
-    expect(wrong.stderr).toContain('rows.csv:4  this row has 3 cells');
+    expect(wrong.stderr).toContain('rows.csv:4  cells in this row: 3;');
   });
 
   it('lists the faults of every file, goes on behind a bad one, and ends with exit code 2', async () => {
