@@ -85,8 +85,9 @@ describe('an interruption', () => {
       child.kill(signal);
       const end = await ended;
       const text = readFileSync(join(folder, 'year.csv'), 'utf8');
-      if (end.code === 0) expect(text.trimEnd().split('\n')).toHaveLength(8761);
-      else expect({ signal: end.signal, text }).toEqual({ signal, text: old });
+      if (end.code !== 0) expect(end.signal).toBe(signal);
+      // the signal may come between the file's new name and the program's end
+      if (end.code === 0 || text !== old) expect(text.trimEnd().split('\n')).toHaveLength(8761);
       expect(passing(namesIn(folder))).toEqual([]);
     }
   });
