@@ -47,6 +47,12 @@ export async function benchBatch(say: (line: string) => void): Promise<void> {
     say(
       `peak memory ${peak.toFixed(0)} MB, of ${SMALL} years ${ofSmall.peakMegabytes.toFixed(0)} MB: ${(peak / ofSmall.peakMegabytes).toFixed(2)} times`,
     );
+    const alone = await timedRun(large, join(folder, 'out-alone'), 1, '1/2');
+    const apart = await Promise.all(
+      ['1/2', '2/2'].map((shard) => timedRun(large, join(folder, `out-${shard[0]}`), 1, shard)),
+    );
+    const gained = (2 * alone.seconds) / Math.max(...apart.map(({ seconds: each }) => each));
+    say(`two programs at once, each on its half, as much as this machine gives: ${gained.toFixed(2)} times`);
     const options = await timedRun(writeOptions(folder), join(folder, 'out-options'), 2);
     const { simulation, pricing, bareLoop } = partsOfJob(small);
     const ofBareLoops = (LARGE / options.seconds) * (bareLoop / 2);
@@ -98,9 +104,11 @@ async function timedRun(
   plan: string,
   out: string,
   workers: number,
+  shard = '1/1',
 ): Promise<{ seconds: number; peakMegabytes: number }> {
   const begin = process.hrtime.bigint();
-  const child = spawn(process.execPath, ['dist/main.js', 'batch', plan, '--out', out, '--workers', String(workers)]);
+  const words = ['batch', plan, '--out', out, '--workers', String(workers), '--shard', shard];
+  const child = spawn(process.execPath, ['dist/main.js', ...words]);
   let peakMegabytes = 0;
   const look = setInterval(() => {
     peakMegabytes = Math.max(peakMegabytes, peakOf(child.pid ?? 0));

@@ -28,6 +28,7 @@ ${said.join('\n')}
 | \`--help\` | \`node -e 0\`, whole processes | at most 1.4 times |
 | \`simulate\` of the demo | the same | at most 2.5 times |
 | batch on two workers | on one | at least 1.7 times, on two free cores |
+| batch on two workers | two programs at once, each on its half | as much |
 | many options of one home on two workers | two loops of hours, months and totals and nothing else | at least 80 % |
 | peak memory of a large batch | of a small one | at most 1.2 times |
 | what is neither simulation nor pricing in a job | the job | at most 30 % |
