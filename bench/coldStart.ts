@@ -8,8 +8,8 @@ export function benchColdStart(say: (line: string) => void): void {
   const main = 'dist/main.js';
   const starts = {
     'node -e 0': ['-e', '0'],
-    'winterledger --help': [main, '--help'],
-    'winterledger simulate, the demo': [main, 'simulate', 'data/demo/house.yaml'],
+    '--help alone': [main, '--help'],
+    'the demo simulated': [main, 'simulate', 'data/demo/house.yaml'],
   };
   const [nothing, ...ours] = measure(
     Object.entries(starts).map(([name, args]) => ({ name, repeat: 1, run: () => exitCodeOf(args) })),
