@@ -13,6 +13,7 @@ import { plainC } from './plainC.ts';
 import { everythingOn } from './plans.ts';
 import { benchReading } from './reading.ts';
 import { benchSheet } from './sheet.ts';
+import { benchSheetOpening } from './sheetOpening.ts';
 
 /** Everything that was printed, for the page. */
 const said: string[] = [];
@@ -90,6 +91,7 @@ say(`one more tariff costs ${((100 * perHour('one more tariff on it')) / year1).
 
 benchReading(say);
 benchSheet(say);
+await benchSheetOpening(say);
 benchColdStart(say);
 await benchBatch(say);
 if (process.argv.includes('--keep')) keepPage(said);

@@ -9,6 +9,7 @@ await build({
   platform: 'node',
   format: 'esm',
   target: 'node20',
+  external: ['playwright-core', '@sparticuz/chromium'],
   banner: { js: "import{createRequire as __cr}from'node:module';const require=__cr(import.meta.url);" },
 });
 const { status } = spawnSync(process.execPath, ['--expose-gc', 'dist/bench.mjs', ...process.argv.slice(2)], {
