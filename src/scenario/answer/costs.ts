@@ -46,10 +46,9 @@ export function costTotalsOf(
   const { household, scenario } = loaded;
   const service = scenario.wholeLife?.servicePerYear ?? 0;
   const withBoiler = boiler && keptSum(household, boiler.electricity, kept);
-  let last: { run: HeatingRun; electricity: Float64Array } | undefined;
+  const onBill = billedOf(household, billed);
   return loaded.tariffs.map(({ name, prepared }, i) => {
-    if (last?.run !== runs[i]) last = { run: runs[i], electricity: sumOf(household, runs[i].electricity, billed) };
-    const whole = billTotal(prepared, last.electricity);
+    const whole = billTotal(prepared, onBill(runs[i]));
     const ofHousehold = keptTotal(prepared, household, kept);
     const { fuel } = hybridFuelCost(loaded, runs[i].fuel);
     const heatingCost = annualTotal({ electricity: whole - ofHousehold, fuel, service });
@@ -80,12 +79,11 @@ export function costsOf(
   const { household, scenario } = loaded;
   const service = scenario.wholeLife?.servicePerYear ?? 0;
   const withBoiler = boiler && keptSum(household, boiler.electricity, kept);
-  // On most scenarios all tariffs share one run, and so one column.
-  let last: { run: HeatingRun; electricity: Float64Array } | undefined;
+  const onBill = billedOf(household);
   return loaded.tariffs.map((tariff, i) => {
     const { prepared } = tariff;
-    if (last?.run !== runs[i]) last = { run: runs[i], electricity: sumOf(household, runs[i].electricity) };
-    const whole = bill(prepared, last.electricity);
+    const electricity = onBill(runs[i]);
+    const whole = bill(prepared, electricity);
     const householdBill = keptBill(prepared, household, kept);
     const heating = {
       ...electricityCost(whole, householdBill),
@@ -99,7 +97,7 @@ export function costsOf(
       currency: tariff.currency ?? scenario.currency,
       pricesStated: tariff.pricesStated,
       taxes: tariff.taxes,
-      electricity: last.electricity,
+      electricity,
       bill: whole,
       householdBill,
       heating,
@@ -114,6 +112,19 @@ export function costsOf(
     const boilerCost = annualTotal(boilerParts);
     return { ...cost, boiler: boilerParts, boilerCost, saving: boilerCost - heatingCost };
   });
+}
+
+/**
+ * All electricity on the bill of a run; on most scenarios all tariffs share one run, and so one column.
+ *
+ * @param column written over for each run; without it each run has a column of its own
+ */
+function billedOf(household: Float64Array, column?: Float64Array): (run: HeatingRun) => Float64Array {
+  let last: { run: HeatingRun; electricity: Float64Array } | undefined;
+  return (run) => {
+    if (last?.run !== run) last = { run, electricity: sumOf(household, run.electricity, column) };
+    return last.electricity;
+  };
 }
 
 /** Bills and columns that the scenarios of a batch have in common; those of the heating itself differ from year to year. */
